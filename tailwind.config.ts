@@ -1,0 +1,51 @@
+import type { Config } from 'tailwindcss';
+
+/** Names of client/app/tokens.css as Tailwind classes: no color, size or shadow is written anywhere else. */
+export default {
+  content: ['./client/**/*.{ts,tsx}'],
+  theme: {
+    colors: {
+      transparent: 'transparent',
+      current: 'currentColor',
+      ground: 'var(--ground)',
+      sheet: 'var(--sheet)',
+      well: 'var(--well)',
+      choose: 'var(--choose)',
+      ink: 'var(--ink)',
+      graphite: 'var(--graphite)',
+      line: 'var(--line)',
+      rule: 'var(--rule)',
+      oxide: 'var(--oxide)',
+      'oxide-press': 'var(--oxide-press)',
+      'on-oxide': 'var(--on-oxide)',
+      'oxide-wash': 'var(--oxide-wash)',
+      ochre: 'var(--ochre)',
+      'ochre-wash': 'var(--ochre-wash)',
+      slate: 'var(--slate)',
+      'slate-wash': 'var(--slate-wash)',
+      lichen: 'var(--lichen)',
+      'lichen-wash': 'var(--lichen-wash)',
+    },
+    borderRadius: { none: '0', DEFAULT: 'var(--radius)' },
+    fontFamily: { sans: 'var(--sans)', mono: 'var(--mono)' },
+    fontSize: {
+      note: ['var(--t-note)', 'var(--l-note)'],
+      data: ['var(--t-data)', 'var(--l-data)'],
+      body: ['var(--t-body)', 'var(--l-body)'],
+      bar: ['var(--t-bar)', 'var(--l-bar)'],
+      head: ['var(--t-head)', 'var(--l-head)'],
+      mark: ['var(--t-mark)', 'var(--l-mark)'],
+    },
+    spacing: {
+      0: '0',
+      px: '1px',
+      1: 'var(--s1)',
+      2: 'var(--s2)',
+      3: 'var(--s3)',
+      4: 'var(--s4)',
+      5: 'var(--s5)',
+      6: 'var(--s6)',
+      7: 'var(--s7)',
+    },
+  },
+} satisfies Config;
