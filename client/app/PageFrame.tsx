@@ -1,0 +1,42 @@
+import type { ReactNode } from 'react';
+
+import { Foot, type KeyHint } from './Foot.tsx';
+
+export interface PageFrameProps {
+  readonly title: string;
+  readonly sub?: ReactNode;
+  /** at most one primary button, at the right end */
+  readonly actions?: ReactNode;
+  /** name of the story or band that is chosen, above the stack */
+  readonly stackTitle?: ReactNode;
+  readonly stackSub?: ReactNode;
+  /** the figure in the left column; it brings its own caption */
+  readonly stack?: ReactNode;
+  /** up to four key hints in the foot */
+  readonly keys?: readonly KeyHint[];
+  readonly children: ReactNode;
+}
+
+/** The frame of a building page: head and drawing field beside the stack column, the balance and the caution in the foot. */
+export function PageFrame({ title, sub, actions, stackTitle, stackSub, stack, keys = [], children }: PageFrameProps) {
+  return (
+    <>
+      <div className="gw-stack-head">
+        <p className="gw-page-name">{stackTitle}</p>
+        <p className="gw-sub">{stackSub}</p>
+      </div>
+      <div className="gw-head">
+        <div className="min-w-0">
+          <h1 className="gw-page-name">{title}</h1>
+          <div className="gw-sub">{sub}</div>
+        </div>
+        <div className="gw-acts">{actions}</div>
+      </div>
+      <aside className="gw-stack-column" aria-label="Stories">
+        {stack}
+      </aside>
+      <main className="gw-sheet">{children}</main>
+      <Foot keys={keys} />
+    </>
+  );
+}
