@@ -1,0 +1,36 @@
+import type { UnitSystem } from '../engineering/input.ts';
+import type { StoryHeight } from './heightScale.ts';
+
+export interface StackStory extends StoryHeight {
+  readonly value: number | null;
+  /** the value as printed */
+  readonly text: string;
+  readonly over?: boolean;
+}
+
+/** One band of a wall between two elevations. */
+export interface StackWall {
+  readonly name: string;
+  readonly x1: number;
+  readonly y1: number;
+  readonly x2: number;
+  readonly y2: number;
+  readonly fromElevation: number;
+  readonly toElevation: number;
+}
+
+export interface StackInput {
+  /** from the top down */
+  readonly stories: readonly StackStory[];
+  readonly walls: readonly StackWall[];
+  readonly units: UnitSystem;
+  readonly chosen: string | null;
+  readonly hovered?: string | null;
+  /** levels of a band: a bracket at the left, `choose` behind all of them */
+  readonly range?: readonly string[];
+  readonly chosenWall?: string | null;
+  /** ratios only: where the limit's dotted line stands */
+  readonly limit?: number;
+}
+
+export const stackWidth = 224;
