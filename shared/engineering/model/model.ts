@@ -28,6 +28,8 @@ export interface ModelSettings {
   readonly endFactor: 3 | 12;
   /** pcf; null: Ec = 57,000 sqrt(f'c) */
   readonly stiffnessWeightPcf: number | null;
+  readonly selfWeight: boolean;
+  readonly concreteWeightPcf: number;
   readonly basis: readonly (Basis | 'envelope')[];
   readonly accidental: number;
   readonly liveFactor: number;

@@ -1,0 +1,95 @@
+import type { Basis } from '../input.ts';
+import type { Model } from '../model/model.ts';
+import type { GravityTakedown } from '../takedown/gravityTakedown.ts';
+import type { WallDemand, WallForces, WallStory } from '../wall-design/designTypes.ts';
+
+import type { ExpandedCombination } from './expandCombinations.ts';
+
+/** Lateral results of one basis, `[action][story][wall]`, kip and kip-in. */
+export interface BasisForces {
+  readonly basis: Basis;
+  readonly shearKip: Float64Array;
+  readonly momentKipIn: Float64Array;
+}
+
+/**
+ * Factored axial, moment and shear of one wall as columns over (expansion, story of the wall), every basis. Signs are kept;
+ * compression positive.
+ */
+export function wallDemand(
+  model: Model,
+  gravity: GravityTakedown,
+  bases: readonly BasisForces[],
+  expansions: readonly ExpandedCombination[],
+  gravitySetCount: number,
+  wallIndex: number,
+): WallDemand {
+  const wall = model.walls[wallIndex];
+  if (!wall) throw new RangeError(`no wall ${wallIndex}`);
+  const stories = wall.segments.map((segment): WallStory => {
+    const story = model.stories[segment.story];
+    if (!story) throw new RangeError(`no story ${segment.story}`);
+    return {
+      story: segment.story,
+      level: story.level,
+      heightIn: story.heightIn,
+      bottomElevationIn: story.bottomElevationIn,
+      topElevationIn: story.elevationIn,
+      lengthIn: segment.lengthIn,
+      thicknessIn: segment.thicknessIn,
+      fcPsi: segment.fcPsi,
+    };
+  });
+  const at = (story: number) => story * model.walls.length + wallIndex;
+  return {
+    wall: wall.name,
+    stories,
+    heightIn: wall.heightIn,
+    expansions,
+    gravitySetCount,
+    forces: bases.map((basis) => factoredForces(model, gravity, basis, expansions, wallIndex)),
+    deadKip: Float64Array.from(stories, ({ story }) => gravity.axialKip.D[at(story)] ?? 0),
+  };
+}
+
+function factoredForces(
+  model: Model,
+  gravity: GravityTakedown,
+  basis: BasisForces,
+  expansions: readonly ExpandedCombination[],
+  wallIndex: number,
+): WallForces {
+  const wall = model.walls[wallIndex];
+  const count = wall?.segments.length ?? 0;
+  const from = wall?.fromStory ?? 0;
+  const walls = model.walls.length;
+  const plane = model.stories.length * walls;
+  const axialKip = new Float64Array(expansions.length * count);
+  const momentKipIn = new Float64Array(expansions.length * count);
+  const shearKip = new Float64Array(expansions.length * count);
+  const { axialKip: axial, momentKipIn: moment } = gravity;
+  expansions.forEach(({ factors, lateral }, expansion) => {
+    for (let story = 0; story < count; story += 1) {
+      const source = (from + story) * walls + wallIndex;
+      const target = expansion * count + story;
+      axialKip[target] =
+        factors.D * (axial.D[source] ?? 0) +
+        factors.L * (axial.L[source] ?? 0) +
+        factors.Lr * (axial.Lr[source] ?? 0) +
+        factors.S * (axial.S[source] ?? 0);
+      let m =
+        factors.D * (moment.D[source] ?? 0) +
+        factors.L * (moment.L[source] ?? 0) +
+        factors.Lr * (moment.Lr[source] ?? 0) +
+        factors.S * (moment.S[source] ?? 0);
+      let v = 0;
+      for (const part of lateral) {
+        m += part.factor * (basis.momentKipIn[part.action * plane + source] ?? 0);
+        v += part.factor * (basis.shearKip[part.action * plane + source] ?? 0);
+      }
+      momentKipIn[target] = m;
+      shearKip[target] = v;
+    }
+  });
+  return { basis: basis.basis, axialKip, momentKipIn, shearKip };
+}

@@ -1,0 +1,56 @@
+import type { BuildingInput, Settings } from '../input.ts';
+import { unitFactors } from '../units.ts';
+
+import { buildGravity, buildLoadCases } from './buildLoads.ts';
+import { buildStories, buildStoryHeights } from './buildStories.ts';
+import { buildWalls } from './buildWalls.ts';
+import type { Model, ModelSettings } from './model.ts';
+
+/**
+ * The kip-inch model of a building whose tables passed `checkTables`. The only place where typed units become internal ones.
+ */
+export function toModel(input: BuildingInput): Model {
+  const { settings, tables } = input;
+  const heights = buildStoryHeights(tables.levels, settings);
+  const walls = buildWalls(tables.walls, heights, settings);
+  const stories = buildStories(heights, walls, settings);
+  return {
+    settings: toModelSettings(settings),
+    stories,
+    walls,
+    cases: buildLoadCases(tables.forces, stories, settings),
+    gravity: buildGravity(tables.gravity, stories, walls, settings),
+  };
+}
+
+export function toModelSettings(settings: Settings): ModelSettings {
+  const factors = unitFactors[settings.units];
+  const { stiffness } = settings;
+  return {
+    units: settings.units,
+    code: settings.code,
+    wallClass: settings.wallClass,
+    fyKsi: settings.fy * factors.steelStrength,
+    fytKsi: settings.fyt * factors.steelStrength,
+    lambda: settings.lambda,
+    coverIn: settings.cover * factors.barLength,
+    edgeIn: settings.edge * factors.barLength,
+    joint: settings.joint,
+    slabThicknessIn: settings.slabThickness * factors.barLength,
+    flexureFactor: stiffness.flexure,
+    shearFactor: stiffness.shear,
+    endFactor: stiffness.end === 'fixed' ? 12 : 3,
+    stiffnessWeightPcf: stiffness.unitWeight === null ? null : stiffness.unitWeight * factors.density,
+    selfWeight: settings.selfWeight,
+    concreteWeightPcf: settings.concreteWeight * factors.density,
+    basis: settings.basis,
+    accidental: settings.accidental,
+    liveFactor: settings.liveFactor,
+    sds: settings.sds,
+    rho: settings.rho,
+    omega0: settings.omega0,
+    oopEccentricityIn: settings.oopEccentricity * factors.barLength,
+    bandStories: settings.bandStories,
+    bars: settings.bars,
+  };
+}

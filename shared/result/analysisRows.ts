@@ -1,0 +1,205 @@
+import type {
+  ResultBalance,
+  ResultDistribution,
+  ResultDocument,
+  ResultDrift,
+  ResultLateral,
+  ResultLevel,
+  ResultTransferred,
+} from '../contracts/result.ts';
+import { gravityCases } from '../engineering/model/model.ts';
+import type { Analysis } from '../engineering/stages.ts';
+import type { UnitFactors } from '../engineering/units.ts';
+
+/** Stories from the top down, as levels are read. */
+function fromTop(analysis: Analysis): number[] {
+  return analysis.model.stories.map((_, index) => analysis.model.stories.length - 1 - index);
+}
+
+export function levelRows(analysis: Analysis, units: UnitFactors): ResultLevel[] {
+  const { model, actions } = analysis;
+  return fromTop(analysis).map((index) => {
+    const story = model.stories[index];
+    const center = analysis.stiffness[index];
+    if (!story) throw new RangeError(`no story ${index}`);
+    const force: Record<string, { fx: number; fy: number; mz: number }> = {};
+    const shear: Record<string, { vx: number; vy: number; mz: number }> = {};
+    for (const loadCase of model.cases) {
+      force[loadCase.name] = {
+        fx: (loadCase.fxKip[index] ?? 0) / units.force,
+        fy: (loadCase.fyKip[index] ?? 0) / units.force,
+        mz: (loadCase.mzKipIn[index] ?? 0) / units.moment,
+      };
+    }
+    for (const action of actions) {
+      if (action.variant !== '0') continue;
+      shear[action.case] = {
+        vx: (action.storyFxKip[index] ?? 0) / units.force,
+        vy: (action.storyFyKip[index] ?? 0) / units.force,
+        mz: (action.storyTorqueKipIn[index] ?? 0) / units.moment,
+      };
+    }
+    return {
+      level: story.level,
+      elevation: story.elevationIn / units.planLength,
+      height: story.heightIn / units.planLength,
+      rigidity: center ? { x: center.centerXIn / units.planLength, y: center.centerYIn / units.planLength } : null,
+      force,
+      shear,
+      point: { x: story.xIn / units.planLength, y: story.yIn / units.planLength },
+      extent: {
+        x: story.extentXIn / units.planLength,
+        y: story.extentYIn / units.planLength,
+        edgeX: story.edgeXIn / units.planLength,
+        edgeY: story.edgeYIn / units.planLength,
+      },
+    };
+  });
+}
+
+/** Visits every standing wall and story of every action, from the top down. */
+function visit<Row>(analysis: Analysis, make: (at: number, action: number, level: string, wall: string) => Row): Row[] {
+  const { model, actions } = analysis;
+  const plane = model.stories.length * model.walls.length;
+  const rows: Row[] = [];
+  actions.forEach((_, action) => {
+    for (const story of fromTop(analysis)) {
+      model.walls.forEach((wall, wallIndex) => {
+        if (story < wall.fromStory || story > wall.toStory) return;
+        const at = action * plane + story * model.walls.length + wallIndex;
+        rows.push(make(at, action, model.stories[story]?.level ?? '', wall.name));
+      });
+    }
+  });
+  return rows;
+}
+
+export function rigidityRows(analysis: Analysis, units: UnitFactors): ResultDocument['rigidities'] {
+  const { model, rigidities } = analysis;
+  return fromTop(analysis).flatMap((story) =>
+    model.walls.flatMap((wall, wallIndex) =>
+      story < wall.fromStory || story > wall.toStory
+        ? []
+        : [
+            {
+              level: model.stories[story]?.level ?? '',
+              wall: wall.name,
+              k: (rigidities[story * model.walls.length + wallIndex] ?? 0) / units.stiffness,
+            },
+          ],
+    ),
+  );
+}
+
+export function distributionRows(analysis: Analysis, units: UnitFactors): ResultDistribution[] {
+  return analysis.bases.flatMap(({ basis, shares }) =>
+    visit(analysis, (at, action, level, wall) => ({
+      basis,
+      case: analysis.actions[action]?.case ?? '',
+      variant: analysis.actions[action]?.variant ?? '0',
+      level,
+      wall,
+      direct: (shares.directKip[at] ?? 0) / units.force,
+      torsional: (shares.torsionalKip[at] ?? 0) / units.force,
+      total: (shares.totalKip[at] ?? 0) / units.force,
+    })),
+  );
+}
+
+export function lateralRows(analysis: Analysis, units: UnitFactors): ResultLateral[] {
+  return analysis.bases.flatMap(({ basis, shearKip, momentKipIn }) =>
+    visit(analysis, (at, action, level, wall) => ({
+      basis,
+      case: analysis.actions[action]?.case ?? '',
+      variant: analysis.actions[action]?.variant ?? '0',
+      level,
+      wall,
+      shear: (shearKip[at] ?? 0) / units.force,
+      moment: (momentKipIn[at] ?? 0) / units.moment,
+    })),
+  );
+}
+
+/** Rows with blank values: displacements come from the whole-height solution only, which is not made here. */
+export function driftRows(analysis: Analysis): ResultDrift[] {
+  return analysis.actions.flatMap((action) =>
+    fromTop(analysis).map((story) => ({
+      case: action.case,
+      variant: action.variant,
+      level: analysis.model.stories[story]?.level ?? '',
+      x: null,
+      y: null,
+      edge: null,
+      torsionRatio: null,
+      ax: null,
+      theta: null,
+    })),
+  );
+}
+
+export function gravityRows(analysis: Analysis, units: UnitFactors): ResultDocument['gravity'] {
+  const { model, gravity } = analysis;
+  return fromTop(analysis).flatMap((story) =>
+    model.walls.flatMap((wall, wallIndex) =>
+      story < wall.fromStory || story > wall.toStory
+        ? []
+        : gravityCases.map((name) => ({
+            level: model.stories[story]?.level ?? '',
+            wall: wall.name,
+            case: name,
+            axial: (gravity.axialKip[name][story * model.walls.length + wallIndex] ?? 0) / units.force,
+            moment: (gravity.momentKipIn[name][story * model.walls.length + wallIndex] ?? 0) / units.moment,
+          })),
+    ),
+  );
+}
+
+/** What walls that start above the base bring down onto the floor on which they stand, per basis, case and variant. */
+export function transferredRows(analysis: Analysis, units: UnitFactors): ResultTransferred[] {
+  const { model, actions, bases, gravity, transfers } = analysis;
+  const plane = model.stories.length * model.walls.length;
+  return bases.flatMap(({ basis, shearKip, momentKipIn }) =>
+    transfers.flatMap(({ wallIndex, fromStory, level }) => {
+      const at = fromStory * model.walls.length + wallIndex;
+      const wall = model.walls[wallIndex]?.name ?? '';
+      return [
+        ...actions.map((action, index) => ({
+          basis,
+          case: action.case,
+          variant: action.variant,
+          level,
+          wall,
+          axial: 0,
+          shear: (shearKip[index * plane + at] ?? 0) / units.force,
+          moment: (momentKipIn[index * plane + at] ?? 0) / units.moment,
+        })),
+        ...gravityCases.map((name) => ({
+          basis,
+          case: name,
+          variant: '0' as const,
+          level,
+          wall,
+          axial: (gravity.axialKip[name][at] ?? 0) / units.force,
+          shear: 0,
+          moment: (gravity.momentKipIn[name][at] ?? 0) / units.moment,
+        })),
+      ];
+    }),
+  );
+}
+
+export function balanceRows(analysis: Analysis, units: UnitFactors): ResultBalance[] {
+  return analysis.bases.flatMap(({ basis }, index) =>
+    (analysis.balance[index] ?? []).map((entry) => ({
+      basis,
+      case: entry.case,
+      variant: entry.variant,
+      level: analysis.model.stories[entry.story]?.level ?? '',
+      residual: entry.lines.reduce((worst, line) => Math.max(worst, line.residual), 0),
+      lines: entry.lines.map(({ line, applied, resisted }) => {
+        const factor = line.startsWith('force') || line === 'vertical' ? units.force : units.moment;
+        return { line, applied: applied / factor, resisted: resisted / factor };
+      }),
+    })),
+  );
+}
