@@ -1,0 +1,158 @@
+import { tableColumns } from '../contracts/tableColumns.ts';
+
+import { decodeText } from './decodeText.ts';
+import { detectDelimiter } from './detectDelimiter.ts';
+import { limitProblems, problemLimit } from './fileProblem.ts';
+import { knownHeaders, matchHeader } from './matchHeader.ts';
+import { quoteText } from './quoteText.ts';
+import { readCell } from './readCell.ts';
+import { isQuoted, normalizeLineEnds, readRecords } from './readRecords.ts';
+
+import type { TableName, Tables, UnitSystem } from '../engineering/input.ts';
+
+import type { Encoding } from './decodeText.ts';
+import type { FileProblem } from './fileProblem.ts';
+import type { ColumnChoices, HeaderMatch } from './matchHeader.ts';
+import type { CsvRecord, Delimiter } from './readRecords.ts';
+
+export interface TableReading<T extends TableName = TableName> {
+  readonly table: T;
+  /**
+   * One row a record. Only where `problems` is empty may they be used as input: a number that could not be read is NaN here and
+   * a missing name is '', so that the checks across tables can still pass over them in silence.
+   */
+  readonly rows: Tables[T];
+  /** physical line of each row's start */
+  readonly lines: readonly number[];
+  readonly notices: readonly string[];
+  readonly problems: readonly FileProblem[];
+  /** how many problems there are; `problems` holds the first 500 and a count of the rest */
+  readonly problemCount: number;
+  readonly columns: HeaderMatch['columns'];
+  readonly delimiter: Delimiter;
+  readonly encoding: Encoding;
+  readonly headerUnits: Readonly<Record<string, string>>;
+}
+
+/** Keeps the first 500 and counts the others. */
+class ProblemList {
+  readonly kept: FileProblem[] = [];
+  count = 0;
+  private readonly file: string;
+  constructor(file: string) {
+    this.file = file;
+  }
+  add(row: number | null, column: string | null, message: string): void {
+    this.count += 1;
+    if (this.kept.length <= problemLimit) this.kept.push({ file: this.file, row, column, message });
+  }
+}
+
+const emptyMatch: HeaderMatch = { matched: [], columns: [], headerUnits: {}, problems: [], notices: [] };
+
+/** Bytes of one CSV file to rows of its table in the building's units, or to all problems of the file. */
+export function readTable<T extends TableName>(
+  table: T,
+  bytes: Uint8Array,
+  fileName: string,
+  units: UnitSystem,
+  choices: ColumnChoices = {},
+): TableReading<T> {
+  const list = new ProblemList(fileName);
+  const finish = (
+    rows: readonly unknown[],
+    lines: readonly number[],
+    match: HeaderMatch,
+    delimiter: Delimiter,
+    encoding: Encoding,
+  ): TableReading<T> => ({
+    table,
+    rows: rows as Tables[T],
+    lines,
+    notices: match.notices,
+    problems: limitProblems(list.kept, list.count, fileName),
+    problemCount: list.count,
+    columns: match.columns,
+    delimiter,
+    encoding,
+    headerUnits: match.headerUnits,
+  });
+
+  const decoded = decodeText(bytes);
+  if (!decoded.ok) {
+    list.add(decoded.row, null, decoded.message);
+    return finish([], [], emptyMatch, ',', 'utf-8');
+  }
+  const text = normalizeLineEnds(decoded.text);
+  const delimiter = detectDelimiter(text, knownHeaders(table, choices));
+  const [header, ...records] = readRecords(text, delimiter);
+  if (!header) {
+    const names = tableColumns[table].filter((column) => column.required).map((column) => column.name);
+    list.add(null, null, `the file is empty, expected a header with ${names.join(', ')} and one row a line`);
+    return finish([], [], emptyMatch, delimiter, decoded.encoding);
+  }
+  if (header.brokenQuote !== null) {
+    list.add(header.line, null, 'a double quote in the header does not close; close it or take it out');
+    return finish([], [], emptyMatch, delimiter, decoded.encoding);
+  }
+  const match = matchHeader(table, header.cells, units, choices);
+  for (const problem of match.problems) list.add(header.line, problem.column, problem.message);
+  const { rows, lines } = readRows(records, header, match, table, delimiter, list);
+  const complete = tableColumns[table].every(
+    (column) => !column.required || match.matched.some((entry) => entry.column === column),
+  );
+  return finish(complete ? rows : [], complete ? lines : [], match, delimiter, decoded.encoding);
+}
+
+function readRows(
+  records: readonly CsvRecord[],
+  header: CsvRecord,
+  match: HeaderMatch,
+  table: TableName,
+  delimiter: Delimiter,
+  list: ProblemList,
+): { rows: Record<string, string | number | null>[]; lines: number[] } {
+  const blank: Record<string, string | number | null> = {};
+  const unread: Record<string, string | number | null> = {};
+  for (const column of tableColumns[table]) {
+    blank[column.name] = null;
+    unread[column.name] = column.type === 'number' ? NaN : '';
+  }
+  const rows: Record<string, string | number | null>[] = [];
+  const lines: number[] = [];
+  for (const record of records) {
+    if (record.brokenQuote !== null) {
+      const entry = match.columns[record.brokenQuote];
+      list.add(
+        record.line,
+        entry?.column ?? entry?.header ?? null,
+        'a double quote opens the cell and does not close before the next separator; close it, or write a quote inside a quoted cell twice',
+      );
+      rows.push(unread);
+      lines.push(record.line);
+      continue;
+    }
+    const row = { ...blank };
+    for (const { column, index, convert, unitKnown } of match.matched) {
+      const cell = record.cells[index] ?? '';
+      const ambiguous = delimiter !== ',' && cell.includes(',') && !isQuoted(record, index, delimiter);
+      const reading = readCell(column, cell, convert, ambiguous);
+      if (reading.ok) row[column.name] = unitKnown || reading.value === null ? reading.value : NaN;
+      else {
+        list.add(record.line, column.name, reading.message);
+        row[column.name] = unread[column.name] ?? null;
+      }
+    }
+    const extra = record.cells.slice(header.cells.length).find((cell) => cell.trim() !== '');
+    if (extra !== undefined) {
+      list.add(
+        record.line,
+        null,
+        `the row has ${record.cells.length} cells, the header ${header.cells.length}; ${quoteText(extra)} stands under no header: quote a cell that holds the separator, or take the cell out`,
+      );
+    }
+    rows.push(row);
+    lines.push(record.line);
+  }
+  return { rows, lines };
+}
