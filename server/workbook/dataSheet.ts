@@ -43,7 +43,8 @@ export function addDataSheet<Row>(
     cell.value = head;
     cell.font = fonts.head;
     cell.numFmt = '@';
-    cell.alignment = { vertical: 'bottom', horizontal: format === undefined ? 'left' : 'right', wrapText: true };
+    const inset = format === undefined ? { horizontal: 'left' as const } : { horizontal: 'right' as const, indent: 1 };
+    cell.alignment = { vertical: 'bottom', wrapText: true, ...inset };
     cell.fill = headFill;
     cell.border = { bottom: inkRule };
   });

@@ -72,9 +72,9 @@ export function addTakedownSheet(workbook: Workbook, content: WorkbookContent): 
       { head: 'Variant', width: 8, value: (row) => row.variant },
       { head: 'Level', width: 12, value: (row) => row.level },
       { head: 'Wall', width: 10, value: (row) => row.wall },
-      { head: `Axial, compression + (${unit.force})`, width: 18, format: forceFormat, value: (row) => row.axial },
+      { head: `Axial, compression + (${unit.force})`, width: 24, format: forceFormat, value: (row) => row.axial },
       { head: `Shear (${unit.force})`, width: 14, format: forceFormat, value: (row) => row.shear },
-      { head: `Moment at story bottom (${unit.moment})`, width: 22, format: forceFormat, value: (row) => row.moment },
+      { head: `Moment at story bottom (${unit.moment})`, width: 30, format: forceFormat, value: (row) => row.moment },
     ],
     rows,
   );

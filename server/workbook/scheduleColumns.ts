@@ -16,22 +16,17 @@ export interface ScheduleColumn {
   readonly unit: string;
   readonly width: number;
   readonly look: 'mark' | 'text' | 'quiet' | 'number' | 'notation';
-  /** numbers only */
-  readonly format?: string;
   /** the cell of a row that a person may overwrite */
   readonly cell?: OverwritableCell;
   readonly value: (row: ScheduleResourceRow) => string | number;
 }
 
-const lengthFormat = '#,##0.##;-#,##0.##';
-
 /** Columns of the printed schedule, in the order in which a drafter reads a row. */
 export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
   const unit = resultUnits[units];
   const bars = units === 'us' ? 'size @ in' : 'size @ mm';
-  const barLengths = units === 'us' ? '#,##0.##' : '#,##0';
   return [
-    { group: '', head: 'Wall', unit: 'mark', width: 8, look: 'mark', value: (row) => row.wall },
+    { group: '', head: 'Wall', unit: 'mark', width: 7, look: 'mark', value: (row) => row.wall },
     {
       group: '',
       head: 'Levels',
@@ -40,14 +35,13 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       look: 'text',
       value: (row) => printLevelRange(row.from, row.to),
     },
-    { group: '', head: 'Limits', unit: 'of the band', width: 18, look: 'quiet', value: (row) => row.levels },
+    { group: '', head: 'Limits', unit: 'of the band', width: 16, look: 'quiet', value: (row) => row.levels },
     {
       group: 'Wall',
       head: 't',
       unit: unit.barLength,
       width: 6,
       look: 'number',
-      format: barLengths,
       value: (row) => row.thickness,
     },
     {
@@ -56,14 +50,13 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       unit: unit.concreteStrength,
       width: 8,
       look: 'number',
-      format: '#,##0.##',
       value: (row) => row.fc,
     },
     {
       group: 'Distributed steel',
       head: 'Vertical',
       unit: bars,
-      width: 14,
+      width: 13,
       look: 'notation',
       cell: 'vertical',
       value: (row) => printCurtains(row.vertical, units),
@@ -72,7 +65,7 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       group: 'Distributed steel',
       head: 'Horizontal',
       unit: bars,
-      width: 14,
+      width: 13,
       look: 'notation',
       cell: 'horizontal',
       value: (row) => printCurtains(row.horizontal, units),
@@ -81,7 +74,7 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       group: 'Distributed steel',
       head: 'Horiz. at ends',
       unit: 'anchorage',
-      width: 10,
+      width: 9,
       look: 'text',
       cell: 'horizontal',
       value: (row) => row.horizontal.end,
@@ -92,7 +85,6 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       unit: unit.barLength,
       width: 8,
       look: 'number',
-      format: barLengths,
       cell: 'ends',
       value: (row) => row.ends?.length ?? 'none',
     },
@@ -100,7 +92,7 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       group: 'End zone, each end',
       head: 'Bars',
       unit: units === 'us' ? '(no.) size' : 'no. - size',
-      width: 10,
+      width: 9,
       look: 'notation',
       cell: 'ends',
       value: (row) => printEnds(row.ends, units),
@@ -109,7 +101,7 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       group: 'End zone, each end',
       head: 'Ties',
       unit: `${bars}, legs`,
-      width: 18,
+      width: 16,
       look: 'notation',
       cell: 'ties',
       value: (row) => printTies(row.ties, units),
@@ -118,7 +110,7 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       group: 'End zone, each end',
       head: 'Ties from – to',
       unit: `elevation, ${unit.planLength}`,
-      width: 14,
+      width: 13,
       look: 'text',
       cell: 'ties',
       value: (row) => printTieRange(row.ties, units),
@@ -129,7 +121,6 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       unit: unit.barLength,
       width: 7,
       look: 'number',
-      format: lengthFormat,
       cell: 'laps',
       value: (row) => row.laps.web ?? dash,
     },
@@ -139,7 +130,6 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       unit: unit.barLength,
       width: 7,
       look: 'number',
-      format: lengthFormat,
       cell: 'laps',
       value: (row) => row.laps.ends ?? dash,
     },
@@ -147,9 +137,8 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       group: 'Laps',
       head: 'Horiz.',
       unit: unit.barLength,
-      width: 7,
+      width: 8,
       look: 'number',
-      format: lengthFormat,
       cell: 'laps',
       value: (row) => row.laps.horizontal ?? dash,
     },
@@ -157,34 +146,33 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       group: 'Laps',
       head: 'Ends by',
       unit: 'splice',
-      width: 8,
+      width: 9,
       look: 'text',
       cell: 'laps',
       value: (row) => (row.ends === null ? dash : row.laps.splice),
     },
     {
-      group: 'Limits',
+      group: 'At the limits',
       head: 'Past limit',
       unit: unit.barLength,
-      width: 9,
+      width: 8,
       look: 'number',
-      format: lengthFormat,
       value: (row) => row.extendAbove ?? dash,
     },
     {
-      group: 'Limits',
+      group: 'At the limits',
       head: 'Dowels',
       unit: `${bars}, embedment ${unit.barLength}`,
-      width: 18,
+      width: 17,
       look: 'notation',
       value: (row) => printDowels(row.dowels, units),
     },
-    { group: 'Limits', head: 'Joint', unit: 'surface', width: 10, look: 'text', value: (row) => row.joint },
+    { group: 'At the limits', head: 'Joint', unit: 'surface', width: 10, look: 'text', value: (row) => row.joint },
     {
       group: '',
       head: 'Notes',
       unit: 'drawing notes, overwritten cells',
-      width: 38,
+      width: 32,
       look: 'quiet',
       cell: 'notes',
       value: (row) => printNotes(row, units),
@@ -201,7 +189,7 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       group: 'Checks',
       head: 'Governs',
       unit: 'check, level, clause; combination',
-      width: 34,
+      width: 30,
       look: 'quiet',
       value: printGoverns,
     },

@@ -57,8 +57,9 @@ function writeLegend(sheet: Worksheet, content: WorkbookContent, last: number): 
   over.fill = hatch;
   over.alignment = alignments.center;
   sheet.mergeCells(5, 22, 5, last);
-  const overwritten = put(sheet.getCell(5, 22), 'a limit is exceeded     bar at the left of a cell: overwritten');
+  const overwritten = put(sheet.getCell(5, 22), 'limit exceeded     bar at the left of a cell, as here: overwritten');
   overwritten.font = fonts.quiet;
+  overwritten.alignment = { ...alignments.line, indent: 1 };
   overwritten.border = { left: ochreBar };
   sheet.getRow(5).height = 18;
 }
@@ -76,12 +77,13 @@ function writeColumnHeads(sheet: Worksheet, columns: readonly ScheduleColumn[]):
       groupStart = position + 1;
     }
     const horizontal = column.look === 'number' ? 'right' : 'left';
+    const inset = column.look === 'number' ? { indent: 1 } : {};
     const head = put(sheet.getCell(7, position), column.head);
     head.font = fonts.head;
-    head.alignment = { vertical: 'bottom', horizontal, wrapText: true };
+    head.alignment = { vertical: 'bottom', horizontal, wrapText: true, ...inset };
     const unit = put(sheet.getCell(8, position), column.unit);
     unit.font = fonts.quiet;
-    unit.alignment = { vertical: 'top', horizontal, wrapText: true };
+    unit.alignment = { vertical: 'top', horizontal, wrapText: true, ...inset };
     unit.border = { bottom: inkRule };
     for (const row of [6, 7, 8]) sheet.getCell(row, position).fill = headFill;
   });

@@ -3,6 +3,7 @@ import type { Cell, Workbook, Worksheet } from 'exceljs';
 import type { ScheduleResourceRow } from '#shared/contracts/schedule';
 import { isOver } from '#shared/format/ratio';
 
+import { listedFormat } from './listedFormat.ts';
 import { addPrintableSheet } from './pageSetup.ts';
 import type { ScheduleColumn } from './scheduleColumns.ts';
 import { scheduleColumns } from './scheduleColumns.ts';
@@ -93,7 +94,7 @@ function dress(cell: Cell, column: ScheduleColumn, row: ScheduleResourceRow, fir
     column.look === 'number' ? alignments.number : column.look === 'quiet' ? alignments.text : alignments.line;
   cell.border = { top: first ? inkRule : hairline, ...(own ? { left: ochreBar } : {}) };
   if (column.head === 'Worst ratio') cell.numFmt = ratioFormat(row.ratio);
-  else if (column.format !== undefined && typeof cell.value === 'number') cell.numFmt = column.format;
+  else if (typeof cell.value === 'number') cell.numFmt = listedFormat(cell.value);
   if (over && (column.look === 'mark' || column.head === 'State')) cell.fill = hatch;
 }
 

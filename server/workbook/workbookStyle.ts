@@ -39,7 +39,7 @@ export const fonts = {
 export const hatch: Fill = { type: 'pattern', pattern: 'lightUp', fgColor: colors.oxide, bgColor: argb('FFFFFF') };
 export const headFill: Fill = { type: 'pattern', pattern: 'solid', fgColor: colors.well };
 
-export const hairline: Partial<Border> = { style: 'hair', color: colors.line };
+export const hairline: Partial<Border> = { style: 'thin', color: colors.rule };
 export const inkRule: Partial<Border> = { style: 'medium', color: colors.ink };
 export const fineRule: Partial<Border> = { style: 'thin', color: colors.line };
 export const ochreBar: Partial<Border> = { style: 'thick', color: colors.ochre };
@@ -48,6 +48,6 @@ const middle: Partial<Alignment> = { vertical: 'middle' };
 export const alignments = {
   text: { ...middle, horizontal: 'left', wrapText: true },
   line: { ...middle, horizontal: 'left' },
-  number: { ...middle, horizontal: 'right' },
+  number: { ...middle, horizontal: 'right', indent: 1 },
   center: { ...middle, horizontal: 'center' },
 } satisfies Record<string, Partial<Alignment>>;
