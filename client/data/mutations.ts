@@ -31,10 +31,10 @@ export function useSignIn(): UseMutationResult<Session, ApiError, SignIn> {
   });
 }
 
-export function useSignOut(): UseMutationResult<void, ApiError, void> {
+export function useSignOut(): UseMutationResult<unknown, ApiError, unknown> {
   const client = useQueryClient();
-  return useMutation<void, ApiError, void>({
-    mutationFn: () => api<void>('DELETE', routes.session),
+  return useMutation<unknown, ApiError, unknown>({
+    mutationFn: () => api<unknown>('DELETE', routes.session),
     onSuccess: () => {
       client.clear();
     },
@@ -142,9 +142,9 @@ export function usePatchSchedule(id: string): UseMutationResult<SchedulePatchAns
 }
 
 /** The person's own last edit, of whatever kind it was. */
-export function useUndo(id: string): UseMutationResult<unknown, ApiError, void> {
+export function useUndo(id: string): UseMutationResult<unknown, ApiError, unknown> {
   const client = useQueryClient();
-  return useMutation<unknown, ApiError, void>({
+  return useMutation<unknown, ApiError, unknown>({
     mutationFn: () => api<unknown>('POST', routes.undo(id), { body: {} }),
     onSettled: () => invalidateBuilding(client, id),
   });
