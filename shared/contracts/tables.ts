@@ -39,6 +39,25 @@ export const tablePatchSchema = z.object({
 });
 export type TablePatch = z.infer<typeof tablePatchSchema>;
 
+/** Answer of the PATCH: rows as they stand now, cascades of a rename in other tables included. */
+export interface TablePatchAnswer<T extends EditableTable = EditableTable> {
+  /** changed and inserted rows of this table */
+  readonly rows: readonly StoredRow<T>[];
+  readonly deleted: readonly string[];
+  readonly version: number;
+  readonly seq: number;
+  /** other tables that a rename went through to */
+  readonly alsoChanged: readonly EditableTable[];
+}
+
+/** `current` of a 409 `cell-moved`: cells whose `was` is no longer stored; `stored` is absent where the row is gone. */
+export interface MovedCell {
+  readonly id: string;
+  readonly column: string;
+  readonly was: CellValue;
+  readonly stored?: CellValue;
+}
+
 /** PUT /api/buildings/:id/<table> with If-Match */
 export const tablePutSchema = z.object({
   rows: z.array(z.record(z.string(), cellValueSchema.optional())).max(50_000),

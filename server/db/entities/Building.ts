@@ -20,7 +20,7 @@ export class Building {
   number!: string;
 
   @Column({ type: 'simple-json' })
-  settings!: Record<string, unknown>;
+  settings!: object;
 
   @Column({ type: 'integer' })
   seq!: number;

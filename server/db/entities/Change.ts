@@ -31,10 +31,10 @@ export class Change {
   target!: string;
 
   @Column({ type: 'simple-json' })
-  before!: Record<string, unknown>;
+  before!: object;
 
   @Column({ type: 'simple-json' })
-  after!: Record<string, unknown>;
+  after!: object;
 
   @Column({ type: 'integer', nullable: true })
   undoes!: number | null;

@@ -23,5 +23,5 @@ export class InputTable {
   contentHash!: string | null;
 
   @Column({ type: 'simple-json', nullable: true })
-  source!: Record<string, unknown> | null;
+  source!: object | null;
 }

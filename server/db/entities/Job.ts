@@ -20,7 +20,7 @@ export class Job {
   buildingId!: string;
 
   @Column({ type: 'simple-json' })
-  params!: Record<string, unknown>;
+  params!: object;
 
   @Column({ type: 'varchar', length: 20 })
   state!: string;

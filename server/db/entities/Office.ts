@@ -10,7 +10,7 @@ export class Office {
   name!: string;
 
   @Column({ type: 'simple-json' })
-  standards!: Record<string, unknown>;
+  standards!: object;
 
   @Column({ type: 'integer' })
   version!: number;

@@ -29,10 +29,10 @@ export class ScheduleRow {
   stories!: string[];
 
   @Column({ type: 'simple-json' })
-  auto!: Record<string, unknown>;
+  auto!: object;
 
   @Column({ type: 'simple-json' })
-  own!: Record<string, unknown>;
+  own!: object;
 
   @Column({ type: 'simple-json' })
   locks!: string[];
@@ -50,7 +50,7 @@ export class ScheduleRow {
   ok!: boolean;
 
   @Column({ type: 'simple-json', nullable: true })
-  governing!: Record<string, unknown> | null;
+  governing!: object | null;
 
   @Column({ type: 'varchar', length: 64 })
   computedKey!: string;

@@ -28,5 +28,5 @@ export class WallCheck {
   seq!: number;
 
   @Column({ type: 'simple-json' })
-  facts!: Record<string, unknown>;
+  facts!: object;
 }
