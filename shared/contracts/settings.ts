@@ -217,7 +217,12 @@ export function readSettings(json: unknown): SettingsOutcome {
     problems.push(...notDesignedYet(whole).filter((problem) => !broken.has(problem.column)));
     if (problems.length === 0) return { ok: true, settings: whole };
   }
-  return { ok: false, problems };
+  const keys: readonly string[] = settingKeys();
+  const place = ({ column }: SettingProblem): number => {
+    const at = keys.indexOf((column ?? '').split('.', 1)[0] ?? '');
+    return at === -1 ? keys.length : at;
+  };
+  return { ok: false, problems: problems.sort((a, b) => place(a) - place(b)) };
 }
 
 /** The typed settings only, as building.json holds them: `readSettings(typedSettings(s))` gives `s` again. */

@@ -32,10 +32,11 @@ function checkNumber(column: Column, value: number, read: string): CellReading {
     (above === undefined || value > above) &&
     (max === undefined || value <= max);
   if (inside) return { ok: true, value: value === 0 ? 0 : value };
-  if (column.quantity === 'fraction' && value > 1 && value <= 100) {
+  if (column.quantity === 'fraction' && value >= 2 && value <= 100) {
     return refuse(column, read, `it is a fraction; ${value} percent is ${value / 100}`);
   }
-  return refuse(column, read, 'correct the value or the unit in the header');
+  const unitless = column.quantity === 'fraction' || column.quantity === 'plain';
+  return refuse(column, read, unitless ? 'correct the value' : 'correct the value or the unit in the header');
 }
 
 /** Text that a spreadsheet would take for a formula is kept behind an apostrophe in files; it comes off here. */

@@ -5,7 +5,7 @@ import { checkTables } from '../engineering/model/check-tables/checkTables.ts';
 
 import { limitProblems, problemLimit } from './fileProblem.ts';
 import { parseJson } from './parseJson.ts';
-import { readTable } from './readTable.ts';
+import { readTable, requiredTables } from './readTable.ts';
 
 import type { BuildingInput, Problem, Settings, TableName, Tables, Warning } from '../engineering/input.ts';
 
@@ -23,9 +23,6 @@ export type FolderReading =
   | { readonly ok: false; readonly problems: readonly FileProblem[] };
 
 const tableNames = ['levels', 'walls', 'forces', 'gravity', 'combinations', 'overrides'] as const;
-/** Tables that a folder can't do without. */
-const requiredTables: readonly TableName[] = ['levels', 'walls', 'forces'];
-
 /** The file of that name, letter case aside where no exact one is there. */
 function findFile(files: ReadonlyMap<string, Uint8Array>, name: string): { name: string; bytes: Uint8Array } | null {
   const exact = files.get(name);
@@ -114,11 +111,6 @@ export function readFolder(files: ReadonlyMap<string, Uint8Array>): FolderReadin
     const across = checked.problems
       .filter((problem) => problem.table === table)
       .map((problem) => inFile(problem, table, reading, files));
-    const empty = requiredTables.includes(table) && reading.rows.length === 0 && reading.problemCount === 0;
-    if (empty) {
-      const message = `the file has a header and no rows, expected at least one; fill it`;
-      across.push({ file: findFile(files, `${table}.csv`)?.name ?? `${table}.csv`, row: null, column: null, message });
-    }
     total += reading.problemCount + across.length;
     const own = reading.problems.slice(0, Math.min(reading.problemCount, problemLimit));
     problems.push(...[...own, ...across].sort(byRowAndColumn(table)));

@@ -34,6 +34,9 @@ export interface TableReading<T extends TableName = TableName> {
   readonly headerUnits: Readonly<Record<string, string>>;
 }
 
+/** Tables that a building can't do without: their files need at least one row. */
+export const requiredTables: readonly TableName[] = ['levels', 'walls', 'forces'];
+
 /** Keeps the first 500 and counts the others. */
 class ProblemList {
   readonly kept: FileProblem[] = [];
@@ -94,6 +97,9 @@ export function readTable<T extends TableName>(
   if (header.brokenQuote !== null) {
     list.add(header.line, null, 'a double quote in the header does not close; close it or take it out');
     return finish([], [], emptyMatch, delimiter, decoded.encoding);
+  }
+  if (records.length === 0 && requiredTables.includes(table)) {
+    list.add(null, null, 'the file has a header and no rows, expected at least one row; fill the table');
   }
   const match = matchHeader(table, header.cells, units, choices);
   for (const problem of match.problems) list.add(header.line, problem.column, problem.message);

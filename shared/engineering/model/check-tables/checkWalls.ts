@@ -65,7 +65,7 @@ function spanOf(row: WallRow, index: number, levels: LevelIndex, findings: Findi
   };
   const from = storyAt('from_level');
   const to = storyAt('to_level');
-  if (from === undefined || to === undefined) return null;
+  if (!levels.ordered || from === undefined || to === undefined) return null;
   if (to < from) {
     findings.refuse(
       'walls',

@@ -6,6 +6,8 @@ import { levelOrder } from './levelOrder.ts';
 export interface LevelIndex {
   /** false where the table has no rows or a name could not be read: references are then not held against it */
   readonly usable: boolean;
+  /** false where a name stands twice: existence can be looked up, above and below can't */
+  readonly ordered: boolean;
   /** from the base up */
   readonly names: readonly string[];
   readonly storyOf: ReadonlyMap<string, number>;
@@ -17,5 +19,6 @@ export function indexLevels(levels: readonly LevelRow[]): LevelIndex {
   names.forEach((name, story) => {
     if (!storyOf.has(name)) storyOf.set(name, story);
   });
-  return { usable: levels.length > 0 && !names.includes(''), names, storyOf };
+  const usable = levels.length > 0 && !names.includes('');
+  return { usable, ordered: usable && storyOf.size === names.length, names, storyOf };
 }
