@@ -60,9 +60,9 @@ export function Stack(props: StackProps): ReactElement {
   const at = stories.findIndex((story) => story.level === chosen);
   return (
     <figure aria-label="Stack" className="m-0 w-[224px]">
-      <figcaption className="flex h-6 items-end justify-between pb-[2px] text-note">
-        <span className="font-medium">{caption}</span>
-        <span className="text-graphite">{limit === undefined ? unit : `limit ${limit.toFixed(2)}`}</span>
+      <figcaption className="cap">
+        <span>{caption}</span>
+        <span>{limit === undefined ? unit : `limit ${limit.toFixed(2)}`}</span>
       </figcaption>
       <div ref={field} className="relative overflow-x-hidden overflow-y-auto" style={{ maxHeight: columnHeight }}>
         <DrawingSvg drawing={drawing} />

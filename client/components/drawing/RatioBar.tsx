@@ -1,0 +1,28 @@
+import type { ReactElement } from 'react';
+
+import { formatRatio, isOver } from '#shared/format/ratio';
+
+const perRatio = 67;
+const longest = 84;
+
+export interface RatioBarProps {
+  /** null: nothing resists */
+  ratio: number | null;
+  /** check and story beneath, for example `shear L5` */
+  note: string;
+}
+
+/** Ratio as a number with a thin bar and a tick at 1.00; over: hatched, and the word. Length is the scale, never color. */
+export function RatioBar({ ratio, note }: RatioBarProps): ReactElement {
+  const over = isOver(ratio);
+  const width = ratio === null ? longest : Math.min(longest, ratio * perRatio);
+  return (
+    <div className={`gw-ratio ${over ? 'over' : ''}`}>
+      <span className="v">{ratio === null ? '–' : formatRatio(ratio)}</span>
+      <span className="bar" aria-hidden="true">
+        <i style={{ width }} />
+      </span>
+      <em>{over ? `over, ${note}` : note}</em>
+    </div>
+  );
+}

@@ -1,0 +1,80 @@
+import type { ReactElement, ReactNode } from 'react';
+
+import { unitLabels } from '#shared/contracts/quantities';
+import type { ResultBalance } from '#shared/contracts/result';
+import type { UnitSystem } from '#shared/engineering/input';
+import { formatForce, formatMoment } from '#shared/format/force';
+import { minusSign } from '#shared/format/number';
+
+import { closedResidual } from '../../app/balanceInView.ts';
+import { Section } from '../../components/ui/Section.tsx';
+
+type Line = ResultBalance['lines'][number]['line'];
+
+const names: Readonly<Record<Line, string>> = {
+  'force x': 'Force x',
+  'force y': 'Force y',
+  torque: 'Torque about the origin',
+  'overturning x': 'Overturning about x',
+  'overturning y': 'Overturning about y',
+  vertical: 'Vertical',
+};
+
+export interface BalanceTableProps {
+  balance: ResultBalance;
+  title: string;
+  units: UnitSystem;
+  children?: ReactNode;
+}
+
+/** Applied against resisted at the story, line by line, with the residual of the whole. */
+export function BalanceTable({ balance, title, units, children }: BalanceTableProps): ReactElement {
+  const closed = Math.abs(balance.residual) <= closedResidual;
+  return (
+    <Section title={title} aside="applied against the sum over the walls">
+      <table className="gw-table">
+        <thead>
+          <tr>
+            <th>Line</th>
+            <th className="num">Applied</th>
+            <th className="num">Resisted</th>
+            <th className="num">Difference</th>
+            <th className="pl-3">Unit</th>
+          </tr>
+        </thead>
+        <tbody>
+          {balance.lines.map(({ line, applied, resisted }) => {
+            const isMoment = line === 'torque' || line.startsWith('overturning');
+            const print = isMoment ? formatMoment : formatForce;
+            return (
+              <tr key={line}>
+                <th scope="row">{names[line]}</th>
+                <td className="num">{print(applied)}</td>
+                <td className="num">{print(resisted)}</td>
+                <td className="num">{sayResidual(resisted - applied)}</td>
+                <td className="pl-3 text-graphite">{unitLabels[isMoment ? 'moment' : 'force'][units]}</td>
+              </tr>
+            );
+          })}
+        </tbody>
+        <tfoot>
+          <tr>
+            <th scope="row" colSpan={3}>
+              Residual
+            </th>
+            <td className={`num ${closed ? '' : 'gw-problem text-oxide'}`}>{sayResidual(balance.residual)}</td>
+            <td className="pl-3 font-normal text-graphite">{closed ? 'closed' : 'broken'}</td>
+          </tr>
+        </tfoot>
+      </table>
+      <p className="note mt-2">
+        Residual: the largest difference over the larger of the action and the sum of magnitudes; closed below 1e−9.
+      </p>
+      {children}
+    </Section>
+  );
+}
+
+/** A difference that is rounding reads in powers of ten, not as a row of zeros. */
+export const sayResidual = (value: number): string =>
+  value === 0 ? '0.0' : value.toExponential(1).replaceAll('-', minusSign);
