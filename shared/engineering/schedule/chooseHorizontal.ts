@@ -1,0 +1,74 @@
+import type { BarLists } from '../input.ts';
+import { barFit } from '../wall-design/barFit.ts';
+import type { WallBars } from '../wall-design/barLayers.ts';
+import { findBar } from '../wall-design/bars.ts';
+import type { DesignContext } from '../wall-design/designContext.ts';
+import type { ScheduleCells } from '../wall-design/designTypes.ts';
+import { horizontalRatio } from '../wall-design/detailChecks.ts';
+import { horizontalBars } from '../wall-design/reinforcement.ts';
+import { lapNeeded } from '../wall-design/rowLaps.ts';
+import { leastRatios, spacingLimits } from '../wall-design/steelNeeded.ts';
+
+import type { BandNeeds } from './bandNeeds.ts';
+import { score } from './choosing.ts';
+import { horizontalMass } from './rowMass.ts';
+import { notLighter } from './webChoices.ts';
+
+export type HorizontalCell = ScheduleCells['horizontal'];
+
+/**
+ * Horizontal steel of a band: the lowest score among the office's bars and spacings that give rho_t for strength and 11.6, keep the
+ * spacing, leave the vertical bars room, and are not lighter than the band above; as many curtains as the vertical bars. Where none does,
+ * the one with the most steel that comes nearest, which the checks then mark as over.
+ */
+export function chooseHorizontal(question: {
+  readonly needs: BandNeeds;
+  readonly lists: BarLists;
+  readonly bars: WallBars;
+  readonly above: HorizontalCell | null;
+  readonly used: ReadonlySet<number>;
+  readonly context: DesignContext;
+}): HorizontalCell {
+  const { needs, lists, bars, above, used, context } = question;
+  const { thicknessIn, lengthIn, heightsIn } = needs;
+  const { units, limits } = context;
+  const spacingLimitIn = spacingLimits(needs.shear.low, lengthIn, thicknessIn, context).horizontalIn;
+  const aboveSteel = above && { ...above, areaIn2: findBar(units, above.bar).areaIn2 };
+  const cells = lists.horizontal.sizes.flatMap((bar) =>
+    lists.horizontal.spacings.map((spacing): HorizontalCell => ({
+      curtains: bars.curtains,
+      bar,
+      spacing,
+      end: 'hook',
+    })),
+  );
+  if (above) cells.push({ ...above, curtains: bars.curtains });
+
+  let best: HorizontalCell | null = null;
+  let bestScore = Infinity;
+  let strongest: HorizontalCell | null = null;
+  let strongestRatio = -Infinity;
+  for (const cell of cells) {
+    const horizontal = horizontalBars(cell, context);
+    if (aboveSteel && !notLighter({ ...cell, areaIn2: horizontal.bar.areaIn2 }, aboveSteel)) continue;
+    const ratio = horizontalRatio(horizontal, thicknessIn);
+    const least = leastRatios(needs.shear, bars.web, horizontal.bar, ratio, context).horizontal;
+    const fit = barFit(bars, thicknessIn, context.coverIn, horizontal.bar.diameterIn, limits);
+    const enough = ratio >= Math.max(least, needs.shear.horizontalForStrength) * (1 - 1e-9);
+    const spaced = horizontal.spacingIn <= spacingLimitIn * (1 + 1e-9);
+    const lapIn = lapNeeded('horizontal', bars, horizontal, needs.fcPsi, context);
+    const value = score(horizontalMass(horizontal, lengthIn, heightsIn, lapIn, limits), [cell.bar], used);
+    if (enough && spaced && fit.clearIn >= fit.neededIn * (1 - 1e-9) && value < bestScore) {
+      best = cell;
+      bestScore = value;
+    }
+    const rank = ratio + (spaced ? 1 : 0);
+    if (rank > strongestRatio) {
+      strongest = cell;
+      strongestRatio = rank;
+    }
+  }
+  const chosen = best ?? strongest;
+  if (!chosen) throw new Error('no horizontal bars to choose from: the bar lists are empty');
+  return chosen;
+}

@@ -1,0 +1,38 @@
+import type { DesignContext } from '../wall-design/designContext.ts';
+import type { WallBars } from '../wall-design/barLayers.ts';
+import { compressionZones, sectionOf } from '../wall-design/reinforcement.ts';
+import { designStrength } from '../wall-design/flexuralStrength.ts';
+import { sectionCurve } from '../wall-design/sectionCurve.ts';
+import { passes, ratioOf } from '../wall-design/plainCheck.ts';
+
+import type { AxialMoment, BandNeeds } from './bandNeeds.ts';
+
+/** Answers for one band whether bars are strong enough; the pair that failed last is asked first, since most candidates fail at it. */
+export interface FlexureJudge {
+  readonly fits: (bars: WallBars, tied: boolean) => boolean;
+  /** worst |M|/phi Mn; Infinity where a pair has no capacity */
+  readonly worstRatio: (bars: WallBars, tied: boolean) => number;
+}
+
+export function flexureJudge(needs: BandNeeds, context: DesignContext): FlexureJudge {
+  const pairs: AxialMoment[] = [...needs.pairs];
+  const solver = (bars: WallBars, tied: boolean): ((pair: AxialMoment) => number | null) => {
+    const zones = compressionZones(bars, needs.thicknessIn, tied, context);
+    const curve = sectionCurve(sectionOf(bars, needs, zones, context), context.rules);
+    return ({ axialKip, momentKipIn }) => ratioOf(momentKipIn, designStrength(curve, axialKip)?.phiMnKipIn ?? null);
+  };
+  return {
+    fits: (bars, tied) => {
+      const ratio = solver(bars, tied);
+      for (let index = 0; index < pairs.length; index += 1) {
+        const pair = pairs[index] as AxialMoment;
+        if (passes(ratio(pair))) continue;
+        pairs.splice(index, 1);
+        pairs.unshift(pair);
+        return false;
+      }
+      return true;
+    },
+    worstRatio: (bars, tied) => Math.max(0, ...pairs.map(solver(bars, tied)).map((ratio) => ratio ?? Infinity)),
+  };
+}

@@ -1,0 +1,80 @@
+import type { BarLists } from '../input.ts';
+import { barFit } from '../wall-design/barFit.ts';
+import { webRatio } from '../wall-design/barLayers.ts';
+import { findBar } from '../wall-design/bars.ts';
+import type { DesignContext } from '../wall-design/designContext.ts';
+import type { ScheduleCells } from '../wall-design/designTypes.ts';
+import type { HorizontalBars } from '../wall-design/reinforcement.ts';
+import { wallBars } from '../wall-design/reinforcement.ts';
+import { curtainsNeeded, leastRatios, spacingLimits } from '../wall-design/steelNeeded.ts';
+import { horizontalRatio } from '../wall-design/detailChecks.ts';
+
+import type { BandNeeds } from './bandNeeds.ts';
+
+export type VerticalCell = ScheduleCells['vertical'];
+
+const slack = 1 - 1e-9;
+
+/** Bars and steel of a curtain-and-spacing cell are no fewer than those of the cell above. Areas in in2, spacings in one unit. */
+export function notLighter(
+  below: { readonly curtains: number; readonly spacing: number; readonly areaIn2: number },
+  above: { readonly curtains: number; readonly spacing: number; readonly areaIn2: number },
+): boolean {
+  const bars = below.curtains / below.spacing;
+  const barsAbove = above.curtains / above.spacing;
+  return (
+    below.curtains >= above.curtains &&
+    bars >= barsAbove * slack &&
+    bars * below.areaIn2 >= barsAbove * above.areaIn2 * slack
+  );
+}
+
+/**
+ * Web cells that a band may take, as one ladder for each number of curtains and bar size, lightest first. A cell stands in a ladder
+ * where curtains, spacing, least ratio, fit and the band above allow it and its steel is not above 1 % (beyond that the web would need
+ * ties; end zones serve better). `relaxed` keeps only the band above and the curtains: the last resort when no cell meets all.
+ */
+export function webLadders(
+  needs: BandNeeds,
+  lists: BarLists,
+  horizontal: HorizontalBars,
+  above: VerticalCell | null,
+  context: DesignContext,
+  relaxed: boolean,
+): VerticalCell[][] {
+  const { thicknessIn, lengthIn } = needs;
+  const { units, limits, rules } = context;
+  const rhoT = horizontalRatio(horizontal, thicknessIn);
+  const spacingLimitIn = spacingLimits(needs.shear.low, lengthIn, thicknessIn, context).verticalIn;
+  const aboveSteel = above && { ...above, areaIn2: findBar(units, above.bar).areaIn2 };
+  const sizes = lists.web.sizes.map((size) => ({ size, spacings: [...lists.web.spacings] }));
+  if (above) {
+    const own = sizes.find(({ size }) => size === above.bar);
+    if (!own) sizes.push({ size: above.bar, spacings: [above.spacing] });
+    else if (!own.spacings.includes(above.spacing)) own.spacings.push(above.spacing);
+  }
+  const ladders: VerticalCell[][] = [];
+  for (const curtains of [1, 2] as const) {
+    if (curtains < curtainsNeeded(thicknessIn, context)) continue;
+    for (const { size, spacings } of sizes) {
+      const bar = findBar(units, size);
+      const least = leastRatios(needs.shear, bar, horizontal.bar, rhoT, context).vertical;
+      const ladder = [...spacings]
+        .sort((a, b) => b - a)
+        .map((spacing): VerticalCell => ({ curtains, bar: size, spacing }))
+        .filter((cell) => {
+          if (aboveSteel && !notLighter({ ...cell, areaIn2: bar.areaIn2 }, aboveSteel)) return false;
+          if (relaxed) return true;
+          const spacingIn = cell.spacing * limits.toIn;
+          const rho = webRatio(curtains, bar, spacingIn, thicknessIn);
+          if (spacingIn > spacingLimitIn * (1 + 1e-9) || rho < least * slack) return false;
+          if (rho > rules.tiesAboveRatio * (1 + 1e-9)) return false;
+          const bars = wallBars({ vertical: cell, ends: null }, context);
+          const fit = barFit(bars, thicknessIn, context.coverIn, horizontal.bar.diameterIn, limits);
+          return fit.clearIn >= fit.neededIn * slack;
+        });
+      if (ladder.length > 0) ladders.push(ladder);
+    }
+  }
+  return ladders;
+}

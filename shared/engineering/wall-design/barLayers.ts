@@ -1,0 +1,71 @@
+import type { Bar } from './bars.ts';
+import type { SectionLayer } from './sectionCurve.ts';
+
+/** Reinforcement of a wall in engine units. */
+export interface WallBars {
+  readonly curtains: 1 | 2;
+  readonly web: Bar;
+  readonly webSpacingIn: number;
+  readonly ends: null | { readonly bar: Bar; readonly count: number; readonly lengthIn: number };
+  /** wall end to the first bar */
+  readonly edgeIn: number;
+}
+
+/** The bars in a zone may count in compression. */
+export interface CompressionZones {
+  readonly web: boolean;
+  readonly ends: boolean;
+}
+
+/** Places of the end-zone columns from the wall end: count/2 columns on two faces, spread evenly from edge to length - edge. */
+export function endColumns(count: number, zoneLengthIn: number, edgeIn: number): number[] {
+  const columns = Math.max(1, Math.round(count / 2));
+  if (columns === 1) return [edgeIn];
+  const stepIn = Math.max(0, zoneLengthIn - 2 * edgeIn) / (columns - 1);
+  return Array.from({ length: columns }, (_, column) => edgeIn + column * stepIn);
+}
+
+/**
+ * Places of the web bars: G is the clear run between the innermost end bars (without end zones, between the edge bars), cut in
+ * ceil(G/s) equal spaces with bars at the inner points; without end zones the edge bars are web bars themselves. No gap above s.
+ * A sliver of 1e-9 of a space does not add one.
+ */
+export function webPlaces(bars: WallBars, lengthIn: number): number[] {
+  const startIn = bars.ends
+    ? Math.max(...endColumns(bars.ends.count, bars.ends.lengthIn, bars.edgeIn))
+    : Math.min(bars.edgeIn, lengthIn / 2);
+  const runIn = lengthIn - 2 * startIn;
+  const spaces = runIn <= 0 ? 0 : Math.ceil(runIn / bars.webSpacingIn - 1e-9);
+  const places: number[] = [];
+  for (let index = 1; index < spaces; index += 1) places.push(startIn + (runIn * index) / spaces);
+  if (bars.ends) return places;
+  return runIn > 0 ? [startIn, ...places, lengthIn - startIn] : [startIn];
+}
+
+/** The bars of a row as layers along the wall, both ends alike, in order from the compression face. */
+export function barLayers(bars: WallBars, lengthIn: number, zones: CompressionZones): SectionLayer[] {
+  const layers: SectionLayer[] = webPlaces(bars, lengthIn).map((positionIn) => ({
+    positionIn,
+    areaIn2: bars.curtains * bars.web.areaIn2,
+    compression: zones.web,
+  }));
+  if (bars.ends) {
+    const columns = endColumns(bars.ends.count, bars.ends.lengthIn, bars.edgeIn);
+    const areaIn2 = (bars.ends.count * bars.ends.bar.areaIn2) / columns.length;
+    for (const positionIn of columns) {
+      layers.push({ positionIn, areaIn2, compression: zones.ends });
+      layers.push({ positionIn: lengthIn - positionIn, areaIn2, compression: zones.ends });
+    }
+  }
+  return layers.sort((a, b) => a.positionIn - b.positionIn);
+}
+
+/** Steel over concrete of the web: curtains x bar area / (spacing x thickness). End-zone bars do not count. */
+export function webRatio(curtains: number, bar: Bar, spacingIn: number, thicknessIn: number): number {
+  return (curtains * bar.areaIn2) / (spacingIn * thicknessIn);
+}
+
+/** Steel over concrete of one end zone: bars over length x thickness; 0 without one. */
+export function endRatio(ends: WallBars['ends'], thicknessIn: number): number {
+  return ends ? (ends.count * ends.bar.areaIn2) / (ends.lengthIn * thicknessIn) : 0;
+}

@@ -1,0 +1,151 @@
+import type { CodeRules } from '../codes/codeRules.ts';
+import { psiPerKsi } from '../units.ts';
+
+/** Bars at one place along the wall. */
+export interface SectionLayer {
+  /** from the compression face */
+  readonly positionIn: number;
+  readonly areaIn2: number;
+  /** false: the bars take no compression (11.7.4.1, not tied); tension counts as ever, the concrete they displace is not deducted */
+  readonly compression: boolean;
+}
+
+export interface WallSection {
+  readonly lengthIn: number;
+  readonly thicknessIn: number;
+  readonly fcPsi: number;
+  readonly fyKsi: number;
+  readonly layers: readonly SectionLayer[];
+}
+
+export const steelModulusKsi = 29000;
+
+/**
+ * A section bent about mid-length, as exact functions of the depth c of the neutral axis (in), piece by piece: within a piece
+ * no bar changes its state, so Pn = p1 c + p0 + pm/c (kip), Mn = m2 c^2 + m1 c + m0 + mm/c (kip-in), phi = a + b/c. A piece is a run
+ * of ten numbers: from, to, p1, p0, pm, m2, m1, m0, a, b, mm. Assumptions of 22.2: plane sections, 0.003 at the compression face,
+ * 0.85 f'c over beta1 c, steel elastic up to fy with 29,000 ksi, bars inside the block lose 0.85 f'c; phi of Table 21.2.2 by
+ * the strain of the farthest bar.
+ */
+export interface SectionCurve {
+  readonly pieces: Float64Array;
+  readonly count: number;
+  /** Po = 0.85 f'c (Ag - Ast) + fy Ast (22.4.2.2), fy to the edition's cap, bars without compression left out; kip */
+  readonly squashKip: number;
+  /** phi times the cap on Pn (22.4.2.1); kip */
+  readonly phiAxialCapKip: number;
+  /** 0.90 As fy, negative; kip */
+  readonly phiTensionKip: number;
+  /** the same without phi */
+  readonly tensionKip: number;
+}
+
+export const pieceWidth = 11;
+
+/** Where some bar, the block or phi changes its rule: sorted depths of the neutral axis, in, from 0 to far outside the section. */
+function breakpoints(
+  section: WallSection,
+  yieldStrain: number,
+  rules: CodeRules,
+  beta1: number,
+  farIn: number,
+): number[] {
+  const ecu = rules.crushingStrain;
+  const found = [0, section.lengthIn / beta1, 1000 * section.lengthIn];
+  for (const { positionIn: x, compression } of section.layers) {
+    if (x <= 0) continue;
+    found.push((x * ecu) / (ecu + yieldStrain));
+    if (!compression) found.push(x);
+    else found.push(x / beta1);
+    if (yieldStrain < ecu) found.push((x * ecu) / (ecu - yieldStrain));
+  }
+  if (farIn > 0) {
+    found.push((farIn * ecu) / (ecu + yieldStrain), (farIn * ecu) / (ecu + rules.tensionControlledStrain(yieldStrain)));
+  }
+  found.sort((a, b) => a - b);
+  return found.filter((c, index) => index === 0 || c > (found[index - 1] as number));
+}
+
+/**
+ * Makes the curve of a section. `steelFactor` multiplies fy (1; 1.25 for the probable strength Mpr); fy above the edition's cap for
+ * flexure counts as the cap before that. A section without bars has no farthest bar: phi is that of compression throughout.
+ */
+export function sectionCurve(section: WallSection, rules: CodeRules, steelFactor = 1): SectionCurve {
+  const { lengthIn, thicknessIn, layers } = section;
+  const fyKsi = Math.min(section.fyKsi, rules.caps.fyFlexureKsi) * steelFactor;
+  const yieldStrain = fyKsi / steelModulusKsi;
+  const ecu = rules.crushingStrain;
+  const beta1 = rules.blockDepthFactor(section.fcPsi);
+  const blockKsi = (0.85 * section.fcPsi) / psiPerKsi;
+  const halfIn = lengthIn / 2;
+  let farIn = 0;
+  let steelIn2 = 0;
+  let squashKip = blockKsi * lengthIn * thicknessIn;
+  const axialFyKsi = Math.min(fyKsi, rules.caps.fyAxialKsi * steelFactor);
+  for (const layer of layers) {
+    farIn = Math.max(farIn, layer.positionIn);
+    steelIn2 += layer.areaIn2;
+    if (layer.compression) squashKip += layer.areaIn2 * (axialFyKsi - blockKsi);
+  }
+  const depths = breakpoints(section, yieldStrain, rules, beta1, farIn);
+  const count = depths.length - 1;
+  const pieces = new Float64Array(count * pieceWidth);
+  const compressionDepthIn = (farIn * ecu) / (ecu + yieldStrain);
+  const tensionControlled = rules.tensionControlledStrain(yieldStrain);
+  const tensionDepthIn = (farIn * ecu) / (ecu + tensionControlled);
+  const elasticKsi = steelModulusKsi * ecu;
+
+  for (let piece = 0; piece < count; piece += 1) {
+    const from = depths[piece] as number;
+    const to = depths[piece + 1] as number;
+    const c = from + (to - from) / 2;
+    let p1 = 0;
+    let p0 = 0;
+    let pm = 0;
+    let m2 = 0;
+    let m1 = 0;
+    let m0 = 0;
+    let mm = 0;
+    if (beta1 * c < lengthIn) {
+      p1 = blockKsi * thicknessIn * beta1;
+      m1 = p1 * halfIn;
+      m2 = (-p1 * beta1) / 2;
+    } else {
+      p0 = blockKsi * thicknessIn * lengthIn;
+    }
+    for (const { positionIn: x, areaIn2, compression } of layers) {
+      const arm = halfIn - x;
+      const strain = (ecu * (c - x)) / c;
+      if (strain > 0 && !compression) continue;
+      let constantKip: number;
+      if (strain >= yieldStrain) constantKip = areaIn2 * fyKsi;
+      else if (strain <= -yieldStrain) constantKip = -areaIn2 * fyKsi;
+      else {
+        const elasticKip = areaIn2 * elasticKsi;
+        constantKip = elasticKip;
+        pm -= elasticKip * x;
+        mm -= elasticKip * x * arm;
+      }
+      if (x < beta1 * c) constantKip -= areaIn2 * blockKsi;
+      p0 += constantKip;
+      m0 += constantKip * arm;
+    }
+    let a = rules.phiCompression;
+    let b = 0;
+    if (c < tensionDepthIn) a = rules.phiTension;
+    else if (c < compressionDepthIn) {
+      const slope = (rules.phiTension - rules.phiCompression) / (tensionControlled - yieldStrain);
+      a = rules.phiCompression - slope * (ecu + yieldStrain);
+      b = slope * ecu * farIn;
+    }
+    pieces.set([from, to, p1, p0, pm, m2, m1, m0, a, b, mm], piece * pieceWidth);
+  }
+  return {
+    pieces,
+    count,
+    squashKip,
+    phiAxialCapKip: rules.phiCompression * rules.axialCapFactor * squashKip,
+    phiTensionKip: -rules.phiTension * steelIn2 * fyKsi,
+    tensionKip: -steelIn2 * fyKsi,
+  };
+}
