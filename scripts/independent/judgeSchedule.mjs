@@ -3,9 +3,10 @@ import { inch, psi } from './siUnits.mjs';
 
 /**
  * Judges every story of every schedule row again (ordinary walls, ACI 318-19): flexure, shear, distributed steel, spacing,
- * curtains. Answers a list of lines, one for each judgement that differs from what the result says.
+ * curtains. Answers a list of lines, one for each judgement that differs from what the result says. `untiedCount`: bars in
+ * compression count although no ties are scheduled (318-19 asks for none up to 0.01 Ag); otherwise they carry nothing.
  */
-export function judgeSchedule(building, result, solution) {
+export function judgeSchedule(building, result, solution, untiedCount) {
   const found = { lines: [], flexure: 0, shear: 0, sections: 0, worstFlexure: 0, worstShear: 0 };
   if (result.code !== 'aci318-19' || (building.settings.wallClass ?? 'ordinary') !== 'ordinary') return found;
   const checks = new Map();
@@ -16,14 +17,14 @@ export function judgeSchedule(building, result, solution) {
     for (let i = building.index.get(row.from); i <= building.index.get(row.to); i += 1) {
       const actions = solution.actions.get(JSON.stringify([row.wall, i]));
       const of = (name) => checks.get(JSON.stringify([row.wall, building.stories[i].level, name]));
-      verdict = judgeStory({ building, row, wall, i, actions, of, found }) && verdict;
+      verdict = judgeStory({ building, row, wall, i, actions, of, found, untiedCount }) && verdict;
     }
     if (row.ok && !verdict) found.lines.push(`row ${row.wall} ${row.from} to ${row.to}: ok in the result, not ok here`);
   }
   return found;
 }
 
-function judgeStory({ building, row, wall, i, actions, of, found }) {
+function judgeStory({ building, row, wall, i, actions, of, found, untiedCount }) {
   const { settings, system, stories } = building;
   const segment = wall.segments.get(i);
   const height = stories[wall.to].top - stories[wall.from].bottom;
@@ -32,7 +33,7 @@ function judgeStory({ building, row, wall, i, actions, of, found }) {
   const where = `${row.wall} ${stories[i].level}`;
   found.sections += 1;
 
-  const flexure = makeFlexure({ segment, bars, fy: settings.fy, compression: row.ties !== null });
+  const flexure = makeFlexure({ segment, bars, fy: settings.fy, compression: untiedCount || row.ties !== null });
   const bending = worst(actions, ({ axial, moment }) => {
     const capacity = flexure(axial);
     return capacity === null || capacity <= 0
