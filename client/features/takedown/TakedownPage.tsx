@@ -1,0 +1,179 @@
+import type { ReactElement } from 'react';
+
+import { unitLabels } from '#shared/contracts/quantities';
+import type { ResultDocument } from '#shared/contracts/result';
+import type { TableResource } from '#shared/contracts/tables';
+import { placeStackWalls } from '#shared/drawing/placeStackWalls';
+import type { WallRow } from '#shared/engineering/input';
+import { forceDecimals, formatForce } from '#shared/format/force';
+import { formatBarLength, formatPlanLength, formatProseLength } from '#shared/format/length';
+
+import { PageFrame } from '../../app/PageFrame.tsx';
+import { useBuildingId } from '../../app/useBuildingId.ts';
+import { useChoice } from '../../app/useChoice.ts';
+import { DownTheHeight } from '../../components/drawing/DownTheHeight.tsx';
+import { levelsDown, resultChoice, sayVariant, type ResultChoice } from '../../components/drawing/resultChoice.ts';
+import { ResultGate } from '../../components/drawing/ResultGate.tsx';
+import { Stack } from '../../components/drawing/Stack.tsx';
+import { useWallKey } from '../../components/drawing/useWallKey.ts';
+import { Segments } from '../../components/ui/Segments.tsx';
+import { StateNote } from '../../components/ui/StateNote.tsx';
+import { useBuilding } from '../../data/queries.ts';
+import { heightDiagrams } from './heightDiagrams.ts';
+import { ReactionTable } from './ReactionTable.tsx';
+import { baseReactions, baseShearSum } from './reactions.ts';
+import { StoryTable } from './StoryTable.tsx';
+import { variantOf, wallStories } from './wallStories.ts';
+
+/** What comes down each wall, story by story, to its foot. */
+export function TakedownPage(): ReactElement {
+  const id = useBuildingId();
+  const [choice] = useChoice();
+  return (
+    <ResultGate buildingId={id} page="Takedown">
+      {(document, walls) => {
+        const chosen = resultChoice(document, choice);
+        const names = [...new Set(walls.rows.map((row) => row.wall))];
+        const wall = names.find((name) => name === choice.wall) ?? names[0];
+        if (chosen === null || wall === undefined) return <NoForces />;
+        return <Shown id={id} document={document} walls={walls} chosen={chosen} wall={wall} names={names} />;
+      }}
+    </ResultGate>
+  );
+}
+
+function NoForces(): ReactElement {
+  return (
+    <PageFrame title="Takedown">
+      <StateNote art="empty" place="Takedown, no forces yet" title="No forces yet">
+        <p>Levels and walls stand. Bring forces and gravity, and what comes down each wall stands here.</p>
+      </StateNote>
+    </PageFrame>
+  );
+}
+
+interface ShownProps {
+  id: string;
+  document: ResultDocument;
+  walls: TableResource<'walls'>;
+  chosen: ResultChoice;
+  wall: string;
+  names: readonly string[];
+}
+
+function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactElement {
+  const [, choose] = useChoice();
+  const { units } = document;
+  const accidental = useBuilding(id).data?.accidental ?? 0;
+  const down = levelsDown(document);
+  const stories = wallStories(document, down, wall, chosen);
+  const reactions = baseReactions(document, down, chosen);
+  const chooseWall = (name: string): void => choose({ wall: name });
+  useWallKey(names, wall, chooseWall);
+  const cases = chosen.cases.map((name) => {
+    const variant = variantOf(document, name, chosen.variant);
+    return { name, variant: variant === '0' ? '' : sayVariant(variant, accidental) };
+  });
+  const force = unitLabels.force[units];
+  const shears = stories.map((story) => story.lateral.get(chosen.case)?.shear ?? null);
+  const decimals = forceDecimals(shears.map((shear) => shear ?? 0));
+  const unit = units === 'us' ? 'ft' : 'm';
+  return (
+    <PageFrame
+      title={`Takedown, wall ${wall}`}
+      sub={`${sayWall(walls.rows, wall, units)} Bottom of each story; compression positive.`}
+      actions={
+        <>
+          <label className="flex items-center gap-2 text-data font-medium">
+            Wall
+            <select
+              className="gw-input gw-input-low w-auto min-w-[72px]"
+              value={wall}
+              onChange={(event) => chooseWall(event.target.value)}
+            >
+              {names.map((name) => (
+                <option key={name}>{name}</option>
+              ))}
+            </select>
+          </label>
+          <Segments
+            label="Case"
+            options={chosen.cases.map((name) => ({ value: name, text: name }))}
+            value={chosen.case}
+            onChoose={(name) => choose({ case: name })}
+          />
+          {chosen.variants.length > 1 ? (
+            <Segments
+              label="Accidental eccentricity"
+              options={chosen.variants.map((one) => ({ value: one, text: sayVariant(one, accidental) }))}
+              value={chosen.variant}
+              onChoose={(variant) => choose({ variant })}
+            />
+          ) : null}
+        </>
+      }
+      stackTitle={chosen.level.level}
+      stackSub={`elevation ${formatPlanLength(chosen.level.elevation, units)} ${unit}, story ${formatPlanLength(chosen.level.height, units)} ${unit}`}
+      stack={
+        <Stack
+          stories={down.map((level, index) => ({
+            level: level.level,
+            elevation: level.elevation,
+            height: level.height,
+            value: shears[index] ?? null,
+            text: shears[index] === null || shears[index] === undefined ? '–' : formatForce(shears[index], decimals),
+          }))}
+          walls={placeStackWalls(down, walls.rows)}
+          caption={`Wall shear ${chosen.case}, ${wall}`}
+          unit={force}
+          units={units}
+          chosen={chosen.level.level}
+          onChoose={(level) => choose({ level })}
+          chosenWall={wall}
+        />
+      }
+      keys={[
+        { keys: ['↑', '↓'], does: 'story' },
+        { keys: ['W'], does: 'next wall' },
+      ]}
+    >
+      <div className="grid gap-x-5 gap-y-4 min-[1400px]:grid-cols-[704px_minmax(0,1fr)]">
+        <DownTheHeight diagrams={heightDiagrams(document, down, wall, stories, chosen)} />
+        <div className="min-w-0">
+          <ReactionTable
+            reactions={reactions}
+            shearSum={baseShearSum(document, down, reactions, walls.rows, chosen.case)}
+            caseText={`${chosen.case}${chosen.variant === '0' ? '' : `, ${sayVariant(chosen.variant, accidental)}`}, ${chosen.basis}`}
+            units={units}
+            chosenWall={wall}
+            onChooseWall={chooseWall}
+          />
+        </div>
+      </div>
+      <div className="mt-4">
+        <StoryTable
+          wall={wall}
+          stories={stories}
+          cases={cases}
+          units={units}
+          chosenLevel={chosen.level.level}
+          onChooseLevel={(level) => choose({ level })}
+        />
+      </div>
+    </PageFrame>
+  );
+}
+
+/** Where a wall stands in plan, how long it is, and how thick from its foot to its top. */
+function sayWall(rows: readonly WallRow[], wall: string, units: 'us' | 'si'): string {
+  const bands = rows.filter((row) => row.wall === wall);
+  const first = bands[0];
+  if (!first) return '';
+  const print = (length: number): string => formatPlanLength(length, units);
+  const length = Math.sqrt(
+    (first.x2 - first.x1) * (first.x2 - first.x1) + (first.y2 - first.y1) * (first.y2 - first.y1),
+  );
+  const thick = [...new Set(bands.map((row) => formatBarLength(row.thickness, units)))].join(', ');
+  const place = `(${print(first.x1)}, ${print(first.y1)}) to (${print(first.x2)}, ${print(first.y2)}) ${units === 'us' ? 'ft' : 'm'}`;
+  return `From ${place}; ${formatProseLength(length, units)} long, ${thick} ${units === 'us' ? 'in' : 'mm'} thick.`;
+}
