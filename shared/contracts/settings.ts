@@ -201,7 +201,12 @@ export function readSettings(json: unknown): SettingsOutcome {
   if (!parsed.success) {
     for (const issue of parsed.error.issues) {
       if (issue.code === 'unrecognized_keys') problems.push(...unknownKeyProblems(issue.path, issue.keys));
-      else problems.push({ column: issue.path.join('.'), message: settingsMessage(issue, json) });
+      else {
+        // length limits complain once more of what is no list at all
+        const column = issue.path.join('.');
+        const told = problems.some((problem) => problem.column === column);
+        if (!told) problems.push({ column, message: settingsMessage(issue, json) });
+      }
     }
     // what stands besides the faulty keys is still read, so that all problems come at once
     const faulty = new Set(parsed.error.issues.flatMap((issue) => issue.path.slice(0, 1).map(String)));
