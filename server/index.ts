@@ -1,15 +1,19 @@
 import { existsSync } from 'node:fs';
-import { resolve } from 'node:path';
+import { join, resolve } from 'node:path';
 
 import { pino } from 'pino';
 
 import { createApp } from './app.ts';
 import { PasswordHasher, productionCost } from './auth/PasswordHasher.ts';
 import { productionSignInLimit } from './auth/signInLimiter.ts';
+import { buildHash } from './compute/buildHash.ts';
+import { inlineRunner, pooledRunner } from './compute/createRunner.ts';
 import { createGate } from './db/gate.ts';
 import { openDatabase } from './db/openDatabase.ts';
 import { seedDemo } from './demo/seedDemo.ts';
+import { seedDemoBuilding } from './demo/seedDemoBuilding.ts';
 import { readEnvironment } from './env.ts';
+import { errorForLog } from './http/errorForLog.ts';
 import { newId } from './newId.ts';
 
 /** Opens, migrates, seeds where asked, listens; stops gracefully. */
@@ -23,8 +27,9 @@ async function start(): Promise<void> {
   });
   const context = { gate, now: () => new Date().toISOString(), newId: () => newId() };
   const hasher = new PasswordHasher(productionCost);
-  if (environment.demoPassword !== null) await seedDemo(context, hasher, environment.demoPassword);
-
+  const threads = join(import.meta.dirname, 'worker.js');
+  const built = existsSync(threads);
+  const runner = built ? pooledRunner(threads) : inlineRunner();
   const pages = resolve('dist/client');
   const app = createApp({
     ...context,
@@ -34,12 +39,22 @@ async function start(): Promise<void> {
     signInLimit: productionSignInLimit,
     logger,
     pagesRoot: existsSync(pages) ? pages : null,
+    runner,
+    // from its sources the engine changes under the cache, so nothing outlives the process
+    resultFolder: built ? resolve('data/cache') : null,
+    engineBuild: built ? buildHash(import.meta.dirname) : 'sources',
   });
+  if (environment.demoPassword !== null) {
+    const engineerId = await seedDemo(context, hasher, environment.demoPassword);
+    if (engineerId !== null) {
+      await seedDemoBuilding(context, app.services.buildings, engineerId, resolve('fixtures/buildings/demo'), logger);
+    }
+  }
   const server = app.express.listen(environment.port, environment.host, () => {
     logger.info({ port: environment.port, host: environment.host }, 'listening');
   });
   server.on('error', (error) => {
-    logger.fatal({ err: error }, 'the address can not be listened on');
+    logger.fatal({ err: errorForLog(error) }, 'the address can not be listened on');
     process.exit(1);
   });
 
@@ -48,7 +63,7 @@ async function start(): Promise<void> {
     if (stopping) return;
     stopping = true;
     server.close(() => {
-      void gate.close().then(() => process.exit(0));
+      void Promise.all([gate.close(), runner.close()]).then(() => process.exit(0));
     });
     server.closeIdleConnections();
     setTimeout(() => process.exit(1), 10_000).unref();

@@ -1,6 +1,7 @@
 import type { ErrorRequestHandler } from 'express';
 import type { Logger } from 'pino';
 
+import { errorForLog } from './errorForLog.ts';
 import { HttpError } from './HttpError.ts';
 import { requestId } from './requestId.ts';
 
@@ -53,7 +54,7 @@ export function errorHandler(logger: Logger): ErrorRequestHandler {
     const known = toHttpError(error);
     if (known === null) {
       const reference = requestId(request);
-      logger.error({ err: error, requestId: reference }, 'request failed');
+      logger.error({ err: errorForLog(error), requestId: reference }, 'request failed');
       response.status(500).json({
         error: { code: 'internal', message: `The server failed on this request. Reference: ${reference}.` },
       });

@@ -2,6 +2,8 @@ import type { RequestHandler } from 'express';
 import type { Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
 
+import { errorForLog } from './errorForLog.ts';
+
 /** One line a request: no headers, no cookies, no bodies, no query. */
 export function requestLog(logger: Logger, newId: () => string): RequestHandler {
   return pinoHttp({
@@ -17,6 +19,7 @@ export function requestLog(logger: Logger, newId: () => string): RequestHandler 
         method: request.method,
         path: request.url.split('?')[0],
       }),
+      err: errorForLog,
       res: (response: { statusCode: number }) => ({ status: response.statusCode }),
     },
     customLogLevel: (_request, response, error) => {

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 
-import type { OverwritableCell } from '../engineering/wall-design/designTypes.ts';
+import type { OverwritableCell, OwnCells } from '../engineering/wall-design/designTypes.ts';
 import type { ResultRow } from './result.ts';
 
 /** GET /api/buildings/:id/schedule: {rows: ScheduleResourceRow[], seq} */
@@ -13,9 +13,21 @@ export type ScheduleResourceRow = ResultRow & {
   readonly reason: string | null;
 };
 
+/** Overwritten cells whose stories the wall no longer has; they stay until someone releases all of them. */
+export interface OrphanedOverwrite {
+  readonly id: string;
+  readonly version: number;
+  readonly wall: string;
+  readonly from: string;
+  readonly to: string;
+  readonly own: OwnCells;
+  readonly reason: string | null;
+}
+
 export interface ScheduleResource {
   readonly rows: readonly ScheduleResourceRow[];
   readonly seq: number;
+  readonly orphans: readonly OrphanedOverwrite[];
 }
 
 const curtains = z.union([z.literal(1), z.literal(2)]);
@@ -63,7 +75,8 @@ export type SchedulePatch = z.infer<typeof schedulePatchSchema>;
 
 /** answer of the PATCH */
 export interface SchedulePatchAnswer {
-  readonly row: ScheduleResourceRow;
+  /** null where an overwrite without stories was released: no row is left */
+  readonly row: ScheduleResourceRow | null;
   readonly alsoChanged: readonly ScheduleResourceRow[];
   readonly seq: number;
 }

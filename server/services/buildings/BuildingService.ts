@@ -2,14 +2,16 @@ import type { BuildingListRow, BuildingResource } from '#shared/contracts/buildi
 import { readSettings, readSettingsPatch, settingsPatchSchema, typedSettings } from '#shared/contracts/settings';
 import type { SettingsOutcome } from '#shared/contracts/settings';
 import { tableColumns } from '#shared/contracts/tableColumns';
-import type { Settings, TableName } from '#shared/engineering/input';
+import type { CellValue } from '#shared/contracts/tables';
+import type { Settings, TableName, Tables } from '#shared/engineering/input';
 
 import { recordChange } from '../../change-log/recordChange.ts';
 import type { BuildingRecord } from '../../db/repositories/BuildingRepository.ts';
 import type { Caller } from '../../db/repositories/PersonRepository.ts';
 import { HttpError } from '../../http/HttpError.ts';
-import { validate } from '../../http/validate.ts';
 import type { Context } from '../Context.ts';
+
+import { positionStep } from '../tables/planReplacement.ts';
 
 import { settingsRefusal } from './settingsRefusal.ts';
 
@@ -37,7 +39,8 @@ export class BuildingService {
     return buildingResource(await this.add(caller, id, settings));
   }
 
-  async add(caller: Caller, id: string, settings: Settings): Promise<BuildingRecord> {
+  /** A building with rows that are checked already (the demo); without rows all its tables are empty. */
+  async add(caller: Caller, id: string, settings: Settings, tables: Partial<Tables> = {}): Promise<BuildingRecord> {
     const { gate, now, newId } = this.context;
     return gate.write(async (store) => {
       await store.buildings.add(
@@ -45,7 +48,14 @@ export class BuildingService {
         caller.id,
         newId(),
       );
-      for (const table of Object.keys(tableColumns)) await store.tables.addTable(newId(), id, table as TableName);
+      for (const table of Object.keys(tableColumns) as TableName[]) {
+        await store.tables.addTable(newId(), id, table);
+        const rows = (tables[table] ?? []) as unknown as readonly Readonly<Record<string, CellValue>>[];
+        const records = rows.map((cells, place) => {
+          return { id: newId(), version: 1, position: (place + 1) * positionStep, cells };
+        });
+        await store.tables.insert(id, table, records);
+      }
       const seq = await store.buildings.nextSeq(id, true);
       const delta = { before: {}, after: { settings: typedSettings(settings) } };
       await recordChange(store, this.context, { buildingId: id, personId: caller.id, seq, kind: 'create', delta });

@@ -9,6 +9,7 @@ import type { Caller } from '../../db/repositories/PersonRepository.ts';
 import { HttpError } from '../../http/HttpError.ts';
 import type { Context } from '../Context.ts';
 
+import { checkRows, readSurroundings } from './checkRows.ts';
 import { planReplacement, type Replacement } from './planReplacement.ts';
 import { readRow } from './readCells.ts';
 
@@ -77,6 +78,13 @@ export async function replaceTable(
       problems: problems.slice(0, 500),
     });
   }
+  const { others } = await readSurroundings(context.gate, building.id, table);
+  const checked = checkRows(table, cells, others, building.settings.units);
+  if (checked.problems.length > 0) {
+    throw new HttpError(422, 'problems', `The rows of ${table} do not fit; nothing of them was taken.`, {
+      problems: checked.problems.slice(0, 500).map(({ row, column, message }) => ({ table, row, column, message })),
+    });
+  }
   const taken = await storeTable(context, caller, building.id, table, cells, version, null);
-  return { ...taken, notices: [] };
+  return { ...taken, notices: checked.notices.map((notice) => notice.message) };
 }
