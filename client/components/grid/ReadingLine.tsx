@@ -12,6 +12,28 @@ export interface ReadingLineProps {
   readonly children: ReactNode;
 }
 
+const choicesShown = 8;
+
+/** The choices that the draft may still become, the fitting one in ink. */
+function ChoiceWords({ choices, draft }: { readonly choices: readonly string[]; readonly draft: string }) {
+  const at = Math.max(0, choices.indexOf(draft));
+  const from = Math.max(0, Math.min(at - 3, choices.length - choicesShown));
+  const shown = choices.slice(from, from + choicesShown);
+  return (
+    <span>
+      <b>one of {choices.length}</b>
+      {from > 0 ? '… ' : ''}
+      {shown.map((choice, index) => (
+        <span key={choice} className={choice === draft ? 'font-semibold' : 'text-graphite'}>
+          {index === 0 ? '' : ', '}
+          {choice}
+        </span>
+      ))}
+      {from + choicesShown < choices.length ? ' …' : ''}
+    </span>
+  );
+}
+
 /** What the typed text is taken for, in a line of its own under the row; never over other rows. */
 export function ReadingLine({
   id,
@@ -43,15 +65,7 @@ export function ReadingLine({
             own ? (
               children
             ) : (
-              <span>
-                <b>one of</b>
-                {(choices ?? []).map((choice, index) => (
-                  <span key={choice} className={choice === draft ? 'font-semibold' : 'text-graphite'}>
-                    {index === 0 ? '' : ', '}
-                    {choice}
-                  </span>
-                ))}
-              </span>
+              <ChoiceWords choices={choices ?? []} draft={draft} />
             )
           ) : (
             <span>

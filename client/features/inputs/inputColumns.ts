@@ -1,0 +1,113 @@
+import { nearestName } from '#shared/contracts/nearestName';
+import { unitLabels } from '#shared/contracts/quantities';
+import { tableColumns, type Column, type EditableTable } from '#shared/contracts/tableColumns';
+import type { CellValue, StoredRow } from '#shared/contracts/tables';
+import { readCell } from '#shared/csv/readCell';
+
+import type { GridColumn, Parsed } from '../../components/grid/gridTypes.ts';
+import { cellEditText, cellText, columnDecimals } from './cellText.ts';
+
+export type InputRow = StoredRow;
+
+export interface ColumnContext {
+  readonly units: 'us' | 'si';
+  readonly rows: readonly InputRow[];
+  readonly levels: readonly string[];
+  readonly walls: readonly string[];
+  /** elevations of the levels, worked out from the heights */
+  readonly elevations: ReadonlyMap<string, number>;
+}
+
+export const valueOf = (row: object, column: string): CellValue => {
+  const value = (row as Readonly<Record<string, CellValue | undefined>>)[column];
+  return value ?? null;
+};
+
+/** Columns that refer to names of another table. */
+const references: Readonly<Record<EditableTable, Readonly<Record<string, 'levels' | 'walls'>>>> = {
+  levels: {},
+  walls: { from_level: 'levels', to_level: 'levels' },
+  forces: { level: 'levels' },
+  gravity: { level: 'levels', wall: 'walls' },
+  combinations: {},
+};
+
+const widths: Readonly<Record<string, number>> = {
+  expression: 480,
+  name: 220,
+  level: 84,
+  diaphragm: 84,
+  live_class: 96,
+  from_level: 88,
+  to_level: 80,
+  flexure_factor: 92,
+  shear_factor: 84,
+  tributary_area: 96,
+  eccentricity: 92,
+};
+
+/** `height reads "x", expected a number above 0; write digits ...`: what follows `expected`. */
+const expectedOf = (message: string): string => message.split('expected ').slice(1).join('expected ') || message;
+
+/** A reference to a name that is not there, while the other table has rows. */
+function checkReference(value: CellValue, known: readonly string[], what: string): Parsed {
+  if (typeof value !== 'string' || known.length === 0 || known.includes(value)) return { ok: true, value };
+  const near = nearestName(value, known);
+  return { ok: false, expected: `one of the ${known.length} ${what}.${near === null ? '' : ` Nearest: ${near}`}` };
+}
+
+function parseCell(table: EditableTable, column: Column, context: ColumnContext, text: string, row: InputRow): Parsed {
+  const reading = readCell(column, text);
+  if (!reading.ok) return { ok: false, expected: expectedOf(reading.message) };
+  const reference = references[table][column.name];
+  if (reference !== undefined) return checkReference(reading.value, context[reference], reference);
+  if (table === 'levels' && column.name === 'level') {
+    const taken = context.rows.some((other) => other.id !== row.id && valueOf(other, 'level') === reading.value);
+    if (taken) return { ok: false, expected: 'a name that no other level has' };
+  }
+  return { ok: true, value: reading.value };
+}
+
+function choicesOf(table: EditableTable, column: Column, context: ColumnContext): readonly string[] | undefined {
+  const reference = references[table][column.name];
+  if (column.choices !== undefined) return column.choices;
+  if (reference === undefined || context[reference].length === 0) return undefined;
+  return context[reference];
+}
+
+/** The grid's columns for one input table: labels, units, limits and choices are the contract's. */
+export function inputColumns(table: EditableTable, context: ColumnContext): readonly GridColumn<InputRow>[] {
+  const columns: readonly Column[] = tableColumns[table];
+  return columns.map((column) => {
+    const decimals = columnDecimals(
+      column,
+      context.rows.map((row) => valueOf(row, column.name)),
+      context.units,
+    );
+    const unit = column.quantity === undefined ? '' : unitLabels[column.quantity][context.units];
+    const choices = choicesOf(table, column, context);
+    const worksOut = table === 'levels' && column.name === 'elevation';
+    const workedOut = (row: InputRow): number | undefined =>
+      worksOut && valueOf(row, 'elevation') === null
+        ? context.elevations.get(String(valueOf(row, 'level')))
+        : undefined;
+    return {
+      id: column.name,
+      header: column.label,
+      ...(unit === '' ? {} : { unit }),
+      align: column.type === 'number' ? 'right' : 'left',
+      mono: column.name === 'expression',
+      width: widths[column.name] ?? 72,
+      editable: true,
+      text: (row) => {
+        const elevation = workedOut(row);
+        return elevation === undefined ? cellText(valueOf(row, column.name), decimals) : cellText(elevation, decimals);
+      },
+      editText: (row) => cellEditText(valueOf(row, column.name)),
+      describe: (row) => (workedOut(row) === undefined ? null : 'worked out from the heights'),
+      quiet: (row) => valueOf(row, column.name) === null,
+      parse: (text, row) => parseCell(table, column, context, text, row),
+      ...(choices === undefined ? {} : { choices }),
+    };
+  });
+}
