@@ -50,17 +50,19 @@ export function chooseHorizontal(question: {
   let strongestRatio = -Infinity;
   for (const cell of cells) {
     const horizontal = horizontalBars(cell, context);
-    if (aboveSteel && !notLighter({ ...cell, areaIn2: horizontal.bar.areaIn2 }, aboveSteel)) continue;
+    if (aboveSteel && !notLighter(cell.curtains, cell.spacing, horizontal.bar.areaIn2, aboveSteel)) continue;
     const ratio = horizontalRatio(horizontal, thicknessIn);
     const least = leastRatios(needs.shear, bars.web, horizontal.bar, ratio, context).horizontal;
-    const fit = barFit(bars, thicknessIn, context.coverIn, horizontal.bar.diameterIn, limits);
     const enough = ratio >= Math.max(least, needs.shear.horizontalForStrength) * (1 - 1e-9);
     const spaced = horizontal.spacingIn <= spacingLimitIn * (1 + 1e-9);
-    const lapIn = lapNeeded('horizontal', bars, horizontal, needs.fcPsi, context);
-    const value = score(horizontalMass(horizontal, lengthIn, heightsIn, lapIn, limits), [cell.bar], used);
-    if (enough && spaced && fit.clearIn >= fit.neededIn * (1 - 1e-9) && value < bestScore) {
-      best = cell;
-      bestScore = value;
+    if (enough && spaced) {
+      const lapIn = lapNeeded('horizontal', bars, horizontal, needs.fcPsi, context);
+      const value = score(horizontalMass(horizontal, lengthIn, heightsIn, lapIn, limits), [cell.bar], used);
+      const fit = barFit(bars, thicknessIn, context.coverIn, horizontal.bar.diameterIn, limits);
+      if (value < bestScore && fit.clearIn >= fit.neededIn * (1 - 1e-9)) {
+        best = cell;
+        bestScore = value;
+      }
     }
     const rank = ratio + (spaced ? 1 : 0);
     if (rank > strongestRatio) {

@@ -1,5 +1,5 @@
 import type { BarLists } from '../input.ts';
-import { barLayers } from '../wall-design/barLayers.ts';
+import { webCount } from '../wall-design/barLayers.ts';
 import type { WallBars } from '../wall-design/barLayers.ts';
 import type { DesignContext } from '../wall-design/designContext.ts';
 import type { HorizontalBars } from '../wall-design/reinforcement.ts';
@@ -11,7 +11,7 @@ import type { CellsAbove } from './choosing.ts';
 import { lightest, score } from './choosing.ts';
 import { endLadder, endSizes } from './endChoices.ts';
 import type { EndsCell } from './endChoices.ts';
-import { flexureJudge } from './flexureJudge.ts';
+import type { FlexureJudge } from './flexureJudge.ts';
 import { verticalMass } from './rowMass.ts';
 import { webLadders } from './webChoices.ts';
 import type { VerticalCell } from './webChoices.ts';
@@ -35,6 +35,8 @@ const plainWebAllowance = 1.1;
 
 export interface VerticalQuestion {
   readonly needs: BandNeeds;
+  /** of these needs; kept from round to round */
+  readonly judge: FlexureJudge;
   readonly lists: BarLists;
   /** horizontal bars of the last round; they set cover, fit and the bracket of 11.6.2 */
   readonly horizontal: HorizontalBars;
@@ -47,7 +49,8 @@ export interface VerticalQuestion {
 
 /** All vertical steel through a section, in2. */
 export function verticalSteel(bars: WallBars, lengthIn: number): number {
-  return barLayers(bars, lengthIn, { web: true, ends: true }).reduce((total, layer) => total + layer.areaIn2, 0);
+  const endsIn2 = bars.ends ? 2 * bars.ends.count * bars.ends.bar.areaIn2 : 0;
+  return webCount(bars, lengthIn) * bars.curtains * bars.web.areaIn2 + endsIn2;
 }
 
 /**
@@ -56,8 +59,7 @@ export function verticalSteel(bars: WallBars, lengthIn: number): number {
  * lightest web cell of each size is tried. Where nothing passes, the strongest arrangement, which the checks then mark as over.
  */
 export function chooseVertical(question: VerticalQuestion): VerticalChoice {
-  const { needs, lists, horizontal, above, used, fixed, context } = question;
-  const judge = flexureJudge(needs, context);
+  const { needs, judge, lists, horizontal, above, used, fixed, context } = question;
   const candidate = (vertical: VerticalCell, ends: EndsCell | null): Candidate => {
     const bars = wallBars({ vertical, ends }, context);
     const laps = {
@@ -91,26 +93,33 @@ export function chooseVertical(question: VerticalQuestion): VerticalChoice {
   const least = Math.min(...plain.map((ladder) => (ladder[0] as Candidate).score));
   if (bestPlain && (fixed.ends === null || bestPlain.score <= least * plainWebAllowance)) return finish(bestPlain);
 
-  const withEnds: Candidate[][] = [];
-  for (const ladder of fixed.ends === null ? [] : webOptions) {
+  const endCandidates = (more: boolean): Candidate[][] => {
+    if (fixed.ends === null) return [];
     if (fixed.ends) {
       const { ends } = fixed;
-      withEnds.push(ladder.map((vertical) => candidate(vertical, ends)));
-      continue;
+      return webOptions.map((ladder) => ladder.map((vertical) => candidate(vertical, ends)));
     }
-    const vertical = ladder[0] as VerticalCell;
-    const heaviest = ladder[ladder.length - 1] as VerticalCell;
-    for (const size of endSizes(lists, aboveEnds)) {
-      const cells = endLadder(needs, size, vertical, horizontal, aboveEnds, context);
-      const most = cells[cells.length - 1];
-      if (!most) continue;
-      withEnds.push([...cells.map((cell) => candidate(vertical, cell)), candidate(heaviest, most)]);
+    const found: Candidate[][] = [];
+    for (const ladder of webOptions) {
+      const vertical = ladder[0] as VerticalCell;
+      const heaviest = ladder[ladder.length - 1] as VerticalCell;
+      for (const size of endSizes(lists, aboveEnds)) {
+        const cells = endLadder(needs, size, vertical, horizontal, aboveEnds, context, more);
+        const most = cells[cells.length - 1];
+        if (!most) continue;
+        found.push(cells.map((cell) => candidate(vertical, cell)));
+        if (more) found.push([candidate(heaviest, most)]);
+      }
     }
+    if (found.length > 0 || !aboveEnds) return found;
+    return webOptions.map((ladder) => ladder.map((vertical) => candidate(vertical, aboveEnds)));
+  };
+  let withEnds = endCandidates(false);
+  let bestEnds = lightest(withEnds, accept);
+  if (!bestEnds && !bestPlain) {
+    withEnds = endCandidates(true);
+    bestEnds = lightest(withEnds, accept);
   }
-  if (withEnds.length === 0 && aboveEnds && fixed.ends === undefined) {
-    withEnds.push(...webOptions.map((ladder) => ladder.map((vertical) => candidate(vertical, aboveEnds))));
-  }
-  const bestEnds = lightest(withEnds, accept);
   if (bestPlain && (!bestEnds || bestPlain.score <= bestEnds.score * plainWebAllowance)) return finish(bestPlain);
   if (bestEnds) return finish(bestEnds);
   return finish(

@@ -20,8 +20,9 @@ import type { LoadedSection } from './bandNeeds.ts';
 import { checkRow, governing } from './checkRow.ts';
 import { dowelCell, extendAbove, finishCells, rowQuantities } from './finishRow.ts';
 import type { RowPlace } from './finishRow.ts';
+import { flexureJudge } from './flexureJudge.ts';
 import { planBands, planWithout } from './planBands.ts';
-import type { BandPlan } from './planBands.ts';
+import type { BandPlan, BandTask } from './planBands.ts';
 
 const outOfPlaneNote = 'out-of-plane slenderness to 11.4/11.8 needed';
 
@@ -60,6 +61,7 @@ function jointWords(context: DesignContext): string {
 function designRow(
   demand: WallDemand,
   band: Band,
+  task: BandTask,
   sections: readonly LoadedSection[],
   plan: BandPlan,
   above: BandPlan | null,
@@ -71,17 +73,10 @@ function designRow(
   const place: RowPlace = { stories, atBase: band.from === 0, above };
   const cells = finishCells(plan, own, place, settings.bars, context);
   const overwritten = overwrittenCells(own);
-  const needs = bandNeeds(sections, context);
   const automatic =
     overwritten.length === 0
       ? cells
-      : finishCells(
-          planWithout({ needs, own }, plan, above, settings.bars, context),
-          {},
-          place,
-          settings.bars,
-          context,
-        );
+      : finishCells(planWithout(task, above, settings.bars, context), {}, place, settings.bars, context);
   const checks = checkRow(demand, stories, sections, cells, context);
   const slender = checks.some((check) => check.check === 'axial' && !check.ok);
   const row: DesignRow = {
@@ -112,11 +107,16 @@ export const designWall: DesignWall = (demand, settings, pinned) => {
   const sections = loadedSections(demand);
   const bands = bandLimits(demand.wall, demand.stories, settings.bandStories, pinned).reverse();
   const sectionsOf = (band: Band): LoadedSection[] => sections.slice(band.from, band.to + 1);
-  const tasks = bands.map((band) => ({ needs: bandNeeds(sectionsOf(band), context), own: ownOf(band) }));
+  const tasks = bands.map((band): BandTask => {
+    const needs = bandNeeds(sectionsOf(band), context);
+    return { needs, judge: flexureJudge(needs, context), own: ownOf(band) };
+  });
   const plans = planBands(tasks, settings.bars, context);
-  const designed = bands.map((band, index) =>
-    designRow(demand, band, sectionsOf(band), plans[index] as BandPlan, plans[index - 1] ?? null, settings, context),
-  );
+  const designed = bands.map((band, index) => {
+    const above = plans[index - 1] ?? null;
+    const plan = plans[index] as BandPlan;
+    return designRow(demand, band, tasks[index] as BandTask, sectionsOf(band), plan, above, settings, context);
+  });
   return {
     wall: demand.wall,
     rows: designed.map(({ row }) => row),

@@ -11,14 +11,16 @@ import type { VerticalCell } from './webChoices.ts';
 
 export type EndsCell = NonNullable<ScheduleCells['ends']>;
 
-const largestCount = 24;
+/** usual end zones; more bars only where these do not do */
+const usualCounts = [4, 6, 8, 10, 12];
+const moreCounts = [14, 16, 18, 20, 22, 24];
 /** steel over concrete of an end zone is not chosen above this (common practice) */
 const largestEndRatio = 0.04;
 /** both end zones together leave at least this much of the length to the web */
 const largestShareOfLength = 0.6;
 
 /**
- * End zones that a band may take with one bar size, fewest bars first: even counts from 4, the shortest length in steps of 2 in
+ * End zones that a band may take with one bar size, fewest bars first: even counts from 4 to 12 (with `more` to 24), the shortest length in steps of 2 in
  * (50 mm) in which the columns stand clear with laps doubled (25.2.3) and steel stays within 4 %, never shorter, with fewer bars or less
  * steel than the end zone above.
  */
@@ -29,13 +31,14 @@ export function endLadder(
   horizontal: HorizontalBars,
   above: EndsCell | null,
   context: DesignContext,
+  more: boolean,
 ): EndsCell[] {
   const { limits, units, edgeIn } = context;
   const bar = findBar(units, size);
   const stepIn = 2 * bar.diameterIn + Math.max(limits.clearIn, 1.5 * bar.diameterIn);
   const aboveIn2 = above ? above.count * findBar(units, above.bar).areaIn2 : 0;
   const ladder: EndsCell[] = [];
-  for (let count = 4; count <= largestCount; count += 2) {
+  for (const count of more ? [...usualCounts, ...moreCounts] : usualCounts) {
     if (above && (count < above.count || count * bar.areaIn2 < aboveIn2 * (1 - 1e-9))) continue;
     const lengthIn = Math.max(
       2 * edgeIn + (count / 2 - 1) * stepIn,

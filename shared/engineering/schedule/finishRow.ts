@@ -63,7 +63,9 @@ export function finishCells(
   const first = firstOf(place);
   const last = place.stories[place.stories.length - 1] as WallStory;
   const perPlan = context.units === 'us' ? inchesPerFoot : inchesPerMeter;
-  const elevations = { from: first.bottomElevationIn / perPlan, to: last.topElevationIn / perPlan };
+  // six decimals: enough for an inch in a meter, and free of the noise of conversion
+  const plain = (elevationIn: number): number => Math.round((elevationIn / perPlan) * 1e6) / 1e6;
+  const elevations = { from: plain(first.bottomElevationIn), to: plain(last.topElevationIn) };
   const automaticTies =
     plan.tied && bars.ends
       ? chooseTies(bars.ends, plan.horizontal.spacing, first.thicknessIn, lists, elevations, context)

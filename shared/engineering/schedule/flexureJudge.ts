@@ -7,7 +7,7 @@ import { passes, ratioOf } from '../wall-design/plainCheck.ts';
 
 import type { AxialMoment, BandNeeds } from './bandNeeds.ts';
 
-/** Answers for one band whether bars are strong enough; the pair that failed last is asked first, since most candidates fail at it. */
+/** Answers for one band whether bars are strong enough; the pair that failed last is asked first, since most candidates fail at it; answers are kept. */
 export interface FlexureJudge {
   readonly fits: (bars: WallBars, tied: boolean) => boolean;
   /** worst |M|/phi Mn; Infinity where a pair has no capacity */
@@ -21,18 +21,33 @@ export function flexureJudge(needs: BandNeeds, context: DesignContext): FlexureJ
     const curve = sectionCurve(sectionOf(bars, needs, zones, context), context.rules);
     return ({ axialKip, momentKipIn }) => ratioOf(momentKipIn, designStrength(curve, axialKip)?.phiMnKipIn ?? null);
   };
+  const known = new Map<string, boolean>();
+  const judged = (bars: WallBars, tied: boolean): boolean => {
+    const ratio = solver(bars, tied);
+    for (let index = 0; index < pairs.length; index += 1) {
+      const pair = pairs[index] as AxialMoment;
+      if (passes(ratio(pair))) continue;
+      pairs.splice(index, 1);
+      pairs.unshift(pair);
+      return false;
+    }
+    return true;
+  };
   return {
     fits: (bars, tied) => {
-      const ratio = solver(bars, tied);
-      for (let index = 0; index < pairs.length; index += 1) {
-        const pair = pairs[index] as AxialMoment;
-        if (passes(ratio(pair))) continue;
-        pairs.splice(index, 1);
-        pairs.unshift(pair);
-        return false;
+      const { ends } = bars;
+      const zone = ends ? `${String(ends.bar.number)} ${String(ends.count)} ${String(ends.lengthIn)}` : '';
+      const key = `${String(bars.curtains)} ${String(bars.web.number)} ${String(bars.webSpacingIn)} ${zone} ${String(tied)}`;
+      let answer = known.get(key);
+      if (answer === undefined) {
+        answer = judged(bars, tied);
+        known.set(key, answer);
       }
-      return true;
+      return answer;
     },
-    worstRatio: (bars, tied) => Math.max(0, ...pairs.map(solver(bars, tied)).map((ratio) => ratio ?? Infinity)),
+    worstRatio: (bars, tied) => {
+      const ratio = solver(bars, tied);
+      return pairs.reduce((worst, pair) => Math.max(worst, ratio(pair) ?? Infinity), 0);
+    },
   };
 }

@@ -9,6 +9,7 @@ import type { HorizontalCell } from './chooseHorizontal.ts';
 import { chooseVertical } from './chooseVertical.ts';
 import type { VerticalChoice } from './chooseVertical.ts';
 import type { CellsAbove } from './choosing.ts';
+import type { FlexureJudge } from './flexureJudge.ts';
 
 /** Bars of a band before laps, ties and notes. */
 export interface BandPlan extends VerticalChoice {
@@ -17,6 +18,7 @@ export interface BandPlan extends VerticalChoice {
 
 export interface BandTask {
   readonly needs: BandNeeds;
+  readonly judge: FlexureJudge;
   readonly own: OwnCells;
 }
 
@@ -33,6 +35,7 @@ function verticalFor(
 ): VerticalChoice {
   return chooseVertical({
     needs: task.needs,
+    judge: task.judge,
     lists,
     horizontal: horizontalBars(own.horizontal ?? horizontal, context),
     above,
@@ -102,7 +105,6 @@ export function planBands(tasks: readonly BandTask[], lists: BarLists, context: 
 /** What choice would take for one band if the engineer's cells there were released, the bands above as they stand. */
 export function planWithout(
   task: BandTask,
-  standing: BandPlan,
   above: CellsAbove | null,
   lists: BarLists,
   context: DesignContext,
@@ -111,14 +113,15 @@ export function planWithout(
     above ? [above.vertical.bar, above.horizontal.bar, ...(above.ends ? [above.ends.bar] : [])] : [],
   );
   let horizontal: HorizontalCell = firstHorizontal(lists);
-  let plan: BandPlan = standing;
+  let plan: BandPlan | null = null;
   for (let round = 0; round < mostRounds; round += 1) {
     const vertical = verticalFor(task, {}, horizontal, above, used, lists, context);
     const chosen = horizontalFor(task, vertical, above, used, lists, context);
     const next = { ...vertical, horizontal: chosen };
-    if (round > 0 && same([plan], [next])) break;
+    if (plan && same([plan], [next])) break;
     plan = next;
     horizontal = chosen;
   }
+  if (!plan) throw new Error('no round was run');
   return plan;
 }

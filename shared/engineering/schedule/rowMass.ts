@@ -1,5 +1,5 @@
 import type { WallBars } from '../wall-design/barLayers.ts';
-import { webPlaces } from '../wall-design/barLayers.ts';
+import { webCount } from '../wall-design/barLayers.ts';
 import type { Bar } from '../wall-design/bars.ts';
 import type { DetailLimits } from '../wall-design/detailLimits.ts';
 import type { HorizontalBars, LapsInInches } from '../wall-design/reinforcement.ts';
@@ -18,7 +18,7 @@ export function verticalMass(
   extraIn = 0,
 ): number {
   const runIn = (lapIn: number | null): number => sum(heightsIn) + heightsIn.length * (lapIn ?? 0) + extraIn;
-  const webLb = webPlaces(bars, lengthIn).length * bars.curtains * bars.web.massLbPerIn * runIn(laps.webIn);
+  const webLb = webCount(bars, lengthIn) * bars.curtains * bars.web.massLbPerIn * runIn(laps.webIn);
   const endsLb = bars.ends ? 2 * bars.ends.count * bars.ends.bar.massLbPerIn * runIn(laps.endsIn) : 0;
   return webLb + endsLb;
 }

@@ -1,11 +1,10 @@
 import type { BarLists } from '../input.ts';
-import { barFit } from '../wall-design/barFit.ts';
+import { acrossFit, neededClear } from '../wall-design/barFit.ts';
 import { webRatio } from '../wall-design/barLayers.ts';
 import { findBar } from '../wall-design/bars.ts';
 import type { DesignContext } from '../wall-design/designContext.ts';
 import type { ScheduleCells } from '../wall-design/designTypes.ts';
 import type { HorizontalBars } from '../wall-design/reinforcement.ts';
-import { wallBars } from '../wall-design/reinforcement.ts';
 import { curtainsNeeded, leastRatios, spacingLimits } from '../wall-design/steelNeeded.ts';
 import { horizontalRatio } from '../wall-design/detailChecks.ts';
 
@@ -15,18 +14,18 @@ export type VerticalCell = ScheduleCells['vertical'];
 
 const slack = 1 - 1e-9;
 
-/** Bars and steel of a curtain-and-spacing cell are no fewer than those of the cell above. Areas in in2, spacings in one unit. */
-export function notLighter(
-  below: { readonly curtains: number; readonly spacing: number; readonly areaIn2: number },
-  above: { readonly curtains: number; readonly spacing: number; readonly areaIn2: number },
-): boolean {
-  const bars = below.curtains / below.spacing;
-  const barsAbove = above.curtains / above.spacing;
-  return (
-    below.curtains >= above.curtains &&
-    bars >= barsAbove * slack &&
-    bars * below.areaIn2 >= barsAbove * above.areaIn2 * slack
-  );
+/** A curtain-and-spacing cell with the area of its bar in in2. */
+export interface SpacedSteel {
+  readonly curtains: number;
+  readonly spacing: number;
+  readonly areaIn2: number;
+}
+
+/** Bars and steel of a cell are no fewer than those of the cell above. Spacings in one unit. */
+export function notLighter(curtains: number, spacing: number, areaIn2: number, above: SpacedSteel): boolean {
+  const bars = curtains / spacing;
+  const barsAbove = (above.curtains / above.spacing) * slack;
+  return curtains >= above.curtains && bars >= barsAbove && bars * areaIn2 >= barsAbove * above.areaIn2;
 }
 
 /**
@@ -59,19 +58,19 @@ export function webLadders(
     for (const { size, spacings } of sizes) {
       const bar = findBar(units, size);
       const least = leastRatios(needs.shear, bar, horizontal.bar, rhoT, context).vertical;
+      const clearIn = neededClear(bar, limits) * slack;
+      const acrossFits = acrossFit(curtains, bar, thicknessIn, context.coverIn, horizontal.bar.diameterIn, limits);
       const ladder = [...spacings]
         .sort((a, b) => b - a)
         .map((spacing): VerticalCell => ({ curtains, bar: size, spacing }))
         .filter((cell) => {
-          if (aboveSteel && !notLighter({ ...cell, areaIn2: bar.areaIn2 }, aboveSteel)) return false;
+          if (aboveSteel && !notLighter(curtains, cell.spacing, bar.areaIn2, aboveSteel)) return false;
           if (relaxed) return true;
           const spacingIn = cell.spacing * limits.toIn;
           const rho = webRatio(curtains, bar, spacingIn, thicknessIn);
           if (spacingIn > spacingLimitIn * (1 + 1e-9) || rho < least * slack) return false;
           if (rho > rules.tiesAboveRatio * (1 + 1e-9)) return false;
-          const bars = wallBars({ vertical: cell, ends: null }, context);
-          const fit = barFit(bars, thicknessIn, context.coverIn, horizontal.bar.diameterIn, limits);
-          return fit.clearIn >= fit.neededIn * slack;
+          return spacingIn - 2 * bar.diameterIn >= clearIn && acrossFits;
         });
       if (ladder.length > 0) ladders.push(ladder);
     }

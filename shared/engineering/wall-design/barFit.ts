@@ -1,5 +1,5 @@
 import type { Bar } from './bars.ts';
-import { endColumns } from './barLayers.ts';
+import { endStep } from './barLayers.ts';
 import type { WallBars } from './barLayers.ts';
 import type { DetailLimits } from './detailLimits.ts';
 
@@ -10,7 +10,7 @@ export interface BarFit {
 }
 
 /** Clear distance between vertical bars (25.2.3): 1.5 in (40 mm), 1.5 db. The coarse aggregate is not known and not judged. */
-function needed(bar: Bar, limits: DetailLimits): number {
+export function neededClear(bar: Bar, limits: DetailLimits): number {
   return Math.max(limits.clearIn, 1.5 * bar.diameterIn);
 }
 
@@ -31,17 +31,44 @@ export function barFit(
     if (clearIn / neededIn < worst.clearIn / worst.neededIn) worst = { clearIn, neededIn };
   };
   const acrossIn = thicknessIn - 2 * (coverIn + outerDiameterIn);
-  judge(bars.webSpacingIn - 2 * bars.web.diameterIn, needed(bars.web, limits));
-  if (bars.curtains === 2) judge(acrossIn - 2 * bars.web.diameterIn, needed(bars.web, limits));
-  else judge(thicknessIn - 2 * coverIn - outerDiameterIn, bars.web.diameterIn);
+  judge(bars.webSpacingIn - 2 * bars.web.diameterIn, neededClear(bars.web, limits));
+  const web = webAcross(bars.curtains, bars.web, thicknessIn, coverIn, outerDiameterIn, limits);
+  judge(web.clearIn, web.neededIn);
   if (bars.ends) {
-    const { bar, count, lengthIn } = bars.ends;
-    const columns = endColumns(count, lengthIn, bars.edgeIn);
-    if (columns.length > 1) {
-      const stepIn = (lengthIn - 2 * bars.edgeIn) / (columns.length - 1);
-      judge(stepIn - 2 * bar.diameterIn, needed(bar, limits));
-    }
-    judge(acrossIn - 2 * bar.diameterIn, needed(bar, limits));
+    const { bar, count } = bars.ends;
+    if (count > 2) judge(endStep(bars.ends, bars.edgeIn) - 2 * bar.diameterIn, neededClear(bar, limits));
+    judge(acrossIn - 2 * bar.diameterIn, neededClear(bar, limits));
   }
   return worst;
+}
+
+/** Whether web bars of one size stand clear through the thickness: the part of `barFit` that no spacing changes. */
+export function acrossFit(
+  curtains: 1 | 2,
+  bar: Bar,
+  thicknessIn: number,
+  coverIn: number,
+  outerDiameterIn: number,
+  limits: DetailLimits,
+): boolean {
+  const { clearIn, neededIn } = webAcross(curtains, bar, thicknessIn, coverIn, outerDiameterIn, limits);
+  return clearIn >= neededIn * (1 - 1e-9);
+}
+
+/** Two curtains stand clear of each other; one curtain keeps the cover of both faces beside the horizontal bar. */
+function webAcross(
+  curtains: 1 | 2,
+  bar: Bar,
+  thicknessIn: number,
+  coverIn: number,
+  outerDiameterIn: number,
+  limits: DetailLimits,
+): BarFit {
+  if (curtains === 1) {
+    return { clearIn: thicknessIn - 2 * coverIn - outerDiameterIn, neededIn: bar.diameterIn };
+  }
+  return {
+    clearIn: thicknessIn - 2 * (coverIn + outerDiameterIn) - 2 * bar.diameterIn,
+    neededIn: neededClear(bar, limits),
+  };
 }

@@ -17,12 +17,32 @@ export interface CompressionZones {
   readonly ends: boolean;
 }
 
+/** Distance between the columns of an end zone; 0 where it has one column or is too short. */
+export function endStep(ends: { readonly count: number; readonly lengthIn: number }, edgeIn: number): number {
+  const columns = Math.max(1, Math.round(ends.count / 2));
+  return columns === 1 ? 0 : Math.max(0, ends.lengthIn - 2 * edgeIn) / (columns - 1);
+}
+
 /** Places of the end-zone columns from the wall end: count/2 columns on two faces, spread evenly from edge to length - edge. */
 export function endColumns(count: number, zoneLengthIn: number, edgeIn: number): number[] {
   const columns = Math.max(1, Math.round(count / 2));
   if (columns === 1) return [edgeIn];
-  const stepIn = Math.max(0, zoneLengthIn - 2 * edgeIn) / (columns - 1);
+  const stepIn = endStep({ count, lengthIn: zoneLengthIn }, edgeIn);
   return Array.from({ length: columns }, (_, column) => edgeIn + column * stepIn);
+}
+
+/** Where the web begins: the innermost column of the end zone, or the edge bar; and into how many spaces the run between is cut. */
+function webRun(bars: WallBars, lengthIn: number): { startIn: number; runIn: number; spaces: number } {
+  let startIn = Math.min(bars.edgeIn, lengthIn / 2);
+  if (bars.ends && bars.ends.count > 2) startIn = Math.max(bars.edgeIn, bars.ends.lengthIn - bars.edgeIn);
+  const runIn = lengthIn - 2 * startIn;
+  return { startIn, runIn, spaces: runIn <= 0 ? 0 : Math.ceil(runIn / bars.webSpacingIn - 1e-9) };
+}
+
+/** Number of places of `webPlaces`. */
+export function webCount(bars: WallBars, lengthIn: number): number {
+  const { spaces } = webRun(bars, lengthIn);
+  return bars.ends ? Math.max(0, spaces - 1) : spaces + 1;
 }
 
 /**
@@ -31,15 +51,11 @@ export function endColumns(count: number, zoneLengthIn: number, edgeIn: number):
  * A sliver of 1e-9 of a space does not add one.
  */
 export function webPlaces(bars: WallBars, lengthIn: number): number[] {
-  const startIn = bars.ends
-    ? Math.max(...endColumns(bars.ends.count, bars.ends.lengthIn, bars.edgeIn))
-    : Math.min(bars.edgeIn, lengthIn / 2);
-  const runIn = lengthIn - 2 * startIn;
-  const spaces = runIn <= 0 ? 0 : Math.ceil(runIn / bars.webSpacingIn - 1e-9);
+  const { startIn, runIn, spaces } = webRun(bars, lengthIn);
   const places: number[] = [];
   for (let index = 1; index < spaces; index += 1) places.push(startIn + (runIn * index) / spaces);
   if (bars.ends) return places;
-  return runIn > 0 ? [startIn, ...places, lengthIn - startIn] : [startIn];
+  return spaces > 0 ? [startIn, ...places, lengthIn - startIn] : [startIn];
 }
 
 /** The bars of a row as layers along the wall, both ends alike, in order from the compression face. */

@@ -29,49 +29,79 @@ function phiAt(pieces: Float64Array, at: number, c: number): number {
   return (pieces[at + 8] as number) + (b === 0 ? 0 : b / c);
 }
 
-/** Halves [low, high] until no number lies between; `rising` holds where the function grows. Throws where it does not close. */
-export function bisect(value: (c: number) => number, low: number, high: number, target: number): number {
-  const rising = value(high) >= value(low);
+/** phi Pn (or Pn) of a piece at c. */
+function valueAt(pieces: Float64Array, at: number, reduced: boolean, c: number): number {
+  return reduced ? phiAt(pieces, at, c) * axialAt(pieces, at, c) : axialAt(pieces, at, c);
+}
+
+/**
+ * The sign of the slope of phi Pn within a piece: (a + b/c)(p1 c + p0 + pm/c) has the derivative
+ * a p1 - (a pm + b p0)/c^2 - 2 b pm/c^3; this is that times c^3.
+ */
+function slopeAt(pieces: Float64Array, at: number, c: number): number {
+  const pm = pieces[at + 4] as number;
+  const a = pieces[at + 8] as number;
+  const b = pieces[at + 9] as number;
+  const linear = a * pm + b * (pieces[at + 3] as number);
+  return (a * (pieces[at + 2] as number) * c * c - linear) * c - 2 * b * pm;
+}
+
+type PieceFunction = (pieces: Float64Array, at: number, c: number) => number;
+const reducedAt: PieceFunction = (pieces, at, c) => valueAt(pieces, at, true, c);
+
+/**
+ * Halves [low, high] until no number lies between; the function takes the target between its ends. Throws where it does not close.
+ */
+function bisect(
+  value: PieceFunction,
+  pieces: Float64Array,
+  at: number,
+  low: number,
+  high: number,
+  target: number,
+): number {
+  const rising = value(pieces, at, high) >= value(pieces, at, low);
   let from = low;
   let to = high;
   for (let step = 0; step < 2200; step += 1) {
     const middle = from + (to - from) / 2;
     if (middle <= from || middle >= to) {
-      return Math.abs(value(from) - target) <= Math.abs(value(to) - target) ? from : to;
+      const fromError = Math.abs(value(pieces, at, from) - target);
+      return fromError <= Math.abs(value(pieces, at, to) - target) ? from : to;
     }
-    const below = value(middle) < target;
-    if (below === rising) from = middle;
+    if (value(pieces, at, middle) < target === rising) from = middle;
     else to = middle;
   }
   throw new Error(`neutral axis did not close between ${String(low)} and ${String(high)} in`);
 }
 
+const noTurns: readonly number[] = [];
+
 /**
- * Where phi Pn of a piece turns: (a + b/c)(p1 c + p0 + pm/c) has the derivative a p1 - (a pm + b p0)/c^2 - 2 b pm/c^3, whose cubic
- * a p1 c^3 - (a pm + b p0) c - 2 b pm is itself monotone on both sides of c* = sqrt((a pm + b p0)/(3 a p1)). At most two turns.
+ * Where phi Pn of a piece turns. The cubic of `slopeAt` is monotone on both sides of c* = sqrt((a pm + b p0)/(3 a p1)), so there are at
+ * most two turns and each is bracketed.
  */
-function turningDepths(pieces: Float64Array, at: number, from: number, to: number): number[] {
-  const [p1, p0, pm] = [pieces[at + 2] as number, pieces[at + 3] as number, pieces[at + 4] as number];
-  const [a, b] = [pieces[at + 8] as number, pieces[at + 9] as number];
-  const cubic = a * p1;
-  const linear = a * pm + b * p0;
-  const constant = 2 * b * pm;
-  const slope = (c: number): number => (cubic * c * c - linear) * c - constant;
-  const edges = [from];
-  if (cubic !== 0 && linear / cubic > 0) {
-    const star = Math.sqrt(linear / (3 * cubic));
-    if (star > from && star < to) edges.push(star);
-  }
-  edges.push(to);
+function turningDepths(pieces: Float64Array, at: number, from: number, to: number): readonly number[] {
+  const cubic = (pieces[at + 8] as number) * (pieces[at + 2] as number);
+  const linear =
+    (pieces[at + 8] as number) * (pieces[at + 4] as number) + (pieces[at + 9] as number) * (pieces[at + 3] as number);
+  const square = cubic === 0 ? -1 : linear / (3 * cubic);
+  const star = square > from * from && square < to * to ? Math.sqrt(square) : from;
   const turns: number[] = [];
-  for (let index = 0; index + 1 < edges.length; index += 1) {
-    const [low, high] = [edges[index] as number, edges[index + 1] as number];
-    if (slope(low) * slope(high) < 0) turns.push(bisect(slope, low, high, 0));
-  }
-  return turns;
+  const search = (low: number, high: number): void => {
+    if (slopeAt(pieces, at, low) * slopeAt(pieces, at, high) < 0) {
+      turns.push(bisect(slopeAt, pieces, at, low, high, 0));
+    }
+  };
+  if (star > from) search(from, star);
+  search(star, to);
+  return turns.length === 0 ? noTurns : turns;
 }
 
-/** Calls `found` with every c at which the curve carries the target. Pieces meet with jumps where the block reaches a bar, so each piece is searched by itself. */
+/**
+ * Calls `found` with every c at which the curve carries the target. Pieces meet with jumps where the block reaches a bar, so each
+ * piece is searched by itself, and between its turns.
+ */
 function eachRoot(
   curve: SectionCurve,
   targetKip: number,
@@ -79,23 +109,22 @@ function eachRoot(
   found: (at: number, c: number) => void,
 ): void {
   const { pieces, count } = curve;
+  const value = reduced ? reducedAt : axialAt;
   for (let piece = 0; piece < count; piece += 1) {
     const at = piece * pieceWidth;
     const from = pieces[at] as number;
     const to = pieces[at + 1] as number;
-    const varying = reduced && pieces[at + 9] !== 0;
-    const value = reduced
-      ? (c: number): number => phiAt(pieces, at, c) * axialAt(pieces, at, c)
-      : (c: number): number => axialAt(pieces, at, c);
-    const edges = varying ? [from, ...turningDepths(pieces, at, from, to), to] : [from, to];
+    const turns = reduced && pieces[at + 9] !== 0 ? turningDepths(pieces, at, from, to) : noTurns;
     let low = from;
-    let lowValue = value(low);
-    for (let index = 1; index < edges.length; index += 1) {
-      const high = edges[index] as number;
-      const highValue = value(high);
+    let lowValue = value(pieces, at, low);
+    for (let index = 0; index <= turns.length; index += 1) {
+      const high = index < turns.length ? (turns[index] as number) : to;
+      const highValue = value(pieces, at, high);
       if (lowValue === targetKip) found(at, low);
       else if (highValue === targetKip) found(at, high);
-      else if (lowValue < targetKip !== highValue < targetKip) found(at, bisect(value, low, high, targetKip));
+      else if (lowValue < targetKip !== highValue < targetKip) {
+        found(at, bisect(value, pieces, at, low, high, targetKip));
+      }
       low = high;
       lowValue = highValue;
     }

@@ -1,5 +1,5 @@
 import type { WallBars } from './barLayers.ts';
-import { endColumns } from './barLayers.ts';
+import { endStep } from './barLayers.ts';
 import type { DesignContext } from './designContext.ts';
 import type { LapCell } from './designTypes.ts';
 import { roundUpLength } from './detailLimits.ts';
@@ -35,8 +35,8 @@ export function anchoredBar(
   const bar = which === 'ends' && bars.ends ? bars.ends.bar : bars.web;
   let spacingIn = bars.webSpacingIn;
   if (which === 'ends' && bars.ends) {
-    const columns = endColumns(bars.ends.count, bars.ends.lengthIn, bars.edgeIn);
-    if (columns.length > 1) spacingIn = Math.min(spacingIn, (columns[1] as number) - (columns[0] as number));
+    const stepIn = endStep(bars.ends, bars.edgeIn);
+    if (stepIn > 0) spacingIn = Math.min(spacingIn, stepIn);
   }
   return {
     bar,

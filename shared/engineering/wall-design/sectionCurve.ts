@@ -49,21 +49,36 @@ function breakpoints(
   rules: CodeRules,
   beta1: number,
   farIn: number,
-): number[] {
+): Float64Array {
   const ecu = rules.crushingStrain;
-  const found = [0, section.lengthIn / beta1, 1000 * section.lengthIn];
-  for (const { positionIn: x, compression } of section.layers) {
+  const { layers, lengthIn } = section;
+  const found = new Float64Array(5 + 3 * layers.length);
+  let count = 1;
+  const add = (c: number): void => {
+    found[count] = c;
+    count += 1;
+  };
+  add(lengthIn / beta1);
+  add(1000 * lengthIn);
+  for (const { positionIn: x, compression } of layers) {
     if (x <= 0) continue;
-    found.push((x * ecu) / (ecu + yieldStrain));
-    if (!compression) found.push(x);
-    else found.push(x / beta1);
-    if (yieldStrain < ecu) found.push((x * ecu) / (ecu - yieldStrain));
+    add((x * ecu) / (ecu + yieldStrain));
+    add(compression ? x / beta1 : x);
+    if (yieldStrain < ecu) add((x * ecu) / (ecu - yieldStrain));
   }
   if (farIn > 0) {
-    found.push((farIn * ecu) / (ecu + yieldStrain), (farIn * ecu) / (ecu + rules.tensionControlledStrain(yieldStrain)));
+    add((farIn * ecu) / (ecu + yieldStrain));
+    add((farIn * ecu) / (ecu + rules.tensionControlledStrain(yieldStrain)));
   }
-  found.sort((a, b) => a - b);
-  return found.filter((c, index) => index === 0 || c > (found[index - 1] as number));
+  const sorted = found.subarray(0, count).sort();
+  let kept = 1;
+  for (let index = 1; index < count; index += 1) {
+    if ((sorted[index] as number) > (sorted[kept - 1] as number)) {
+      sorted[kept] = sorted[index] as number;
+      kept += 1;
+    }
+  }
+  return sorted.subarray(0, kept);
 }
 
 /**
@@ -138,7 +153,18 @@ export function sectionCurve(section: WallSection, rules: CodeRules, steelFactor
       a = rules.phiCompression - slope * (ecu + yieldStrain);
       b = slope * ecu * farIn;
     }
-    pieces.set([from, to, p1, p0, pm, m2, m1, m0, a, b, mm], piece * pieceWidth);
+    const at = piece * pieceWidth;
+    pieces[at] = from;
+    pieces[at + 1] = to;
+    pieces[at + 2] = p1;
+    pieces[at + 3] = p0;
+    pieces[at + 4] = pm;
+    pieces[at + 5] = m2;
+    pieces[at + 6] = m1;
+    pieces[at + 7] = m0;
+    pieces[at + 8] = a;
+    pieces[at + 9] = b;
+    pieces[at + 10] = mm;
   }
   return {
     pieces,

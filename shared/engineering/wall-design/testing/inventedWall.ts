@@ -17,6 +17,8 @@ export const usSettings: ModelSettings = {
   shearFactor: 1,
   endFactor: 3,
   stiffnessWeightPcf: null,
+  concreteWeightPcf: 150,
+  selfWeight: true,
   basis: ['rigid'],
   accidental: 0.05,
   liveFactor: 1,
