@@ -34,21 +34,21 @@ export function layBars(row, segment, system, edge) {
 
 /**
  * phi Pn and phi Mn of a section at neutral-axis depth c: rectangular block, bars one by one, moments about mid-length.
- * `compression` false: bars in compression carry nothing.
+ * `compressed.end` and `.web` false: such bars carry nothing in compression.
  */
 function atDepth(section, c) {
-  const { segment, bars, fy, compression } = section;
+  const { segment, bars, fy, compressed } = section;
   const { length, thickness, fc } = segment;
   const beta = Math.min(0.85, Math.max(0.65, 0.85 - 0.05 * (fc / psi / 1000 - 4)));
   const block = Math.min(length, beta * c);
   let force = 0.85 * fc * thickness * block;
   let moment = force * (length / 2 - block / 2);
   let farthest = 0;
-  for (const { at, area } of bars) {
+  for (const { at, area, end } of bars) {
     farthest = Math.max(farthest, at);
     const strain = (crushing * (c - at)) / c;
     let stress = Math.max(-fy, Math.min(fy, steelModulus * strain));
-    if (strain > 0 && !compression) stress = 0;
+    if (strain > 0 && !(end ? compressed.end : compressed.web)) stress = 0;
     else if (at < beta * c) stress -= 0.85 * fc;
     force += stress * area;
     moment += stress * area * (length / 2 - at);
@@ -61,10 +61,11 @@ function atDepth(section, c) {
 
 /** The smallest phi Mn at Pu among all depths that carry it; null outside the axial range. */
 export function makeFlexure(section) {
-  const { segment, bars, fy, compression } = section;
+  const { segment, bars, fy, compressed } = section;
   const gross = segment.length * segment.thickness;
   const steel = bars.reduce((sum, { area }) => sum + area, 0);
-  const squash = compression ? 0.85 * segment.fc * (gross - steel) + fy * steel : 0.85 * segment.fc * gross;
+  const counted = bars.reduce((sum, { area, end }) => ((end ? compressed.end : compressed.web) ? sum + area : sum), 0);
+  const squash = 0.85 * segment.fc * (gross - counted) + fy * counted;
   const largest = 0.65 * 0.8 * squash;
   const least = -0.9 * steel * fy;
   const steps = 3000;
