@@ -1,0 +1,106 @@
+import { pino } from 'pino';
+import request from 'supertest';
+
+import { createApp, type App } from '../app.ts';
+import { PasswordHasher } from '../auth/PasswordHasher.ts';
+import type { SignInLimit } from '../auth/signInLimiter.ts';
+import { inlineRunner } from '../compute/createRunner.ts';
+import type { Runner } from '../compute/Runner.ts';
+import { createGate, type Gate } from '../db/gate.ts';
+import { newId } from '../newId.ts';
+
+import { openTestDatabase, type TestDatabase } from '../db/testing/openTestDatabase.ts';
+import { addressOf, testPassword, testPeople, type TestKey } from './people.ts';
+
+export type Agent = ReturnType<typeof request.agent>;
+
+export interface TestServer {
+  readonly app: App;
+  readonly database: TestDatabase;
+  readonly gate: Gate;
+  /** signed in, sends the header that changes ask for */
+  as(key: TestKey): Agent;
+  /** not signed in, sends the header */
+  nobody(): Agent;
+  close(): Promise<void>;
+}
+
+export interface TestServerOptions {
+  readonly signInLimit?: SignInLimit;
+  readonly runner?: Runner;
+  readonly overTls?: boolean;
+  readonly pagesRoot?: string | null;
+}
+
+/** Argon2 at its cheapest: tests sign in often. */
+const hasher = new PasswordHasher({ memoryKib: 1024, passes: 1 });
+const secret = 'secret of the tests, not of any server';
+
+async function addPeople(gate: Gate): Promise<void> {
+  const passwordHash = await hasher.hash(testPassword);
+  const offices = { ours: newId(), theirs: newId() };
+  await gate.write(async (store) => {
+    await store.people.addOffice(offices.ours, 'Our office');
+    await store.people.addOffice(offices.theirs, 'Their office');
+    for (const { key, role, office } of testPeople) {
+      const person = { id: newId(), officeId: offices[office], email: addressOf(key), name: `The ${key}` };
+      await store.people.add({ ...person, role, passwordHash });
+    }
+  });
+}
+
+/** The whole application on a database of its own, with everybody signed in. A long hold of the connection fails the test. */
+export async function startTestServer(options: TestServerOptions = {}): Promise<TestServer> {
+  const database = await openTestDatabase();
+  const longHolds: string[] = [];
+  const gate = createGate(database.dataSource, {
+    onLongHold: (milliseconds, kind) => longHolds.push(`${kind} ${Math.round(milliseconds)} ms`),
+    // the machine of the tests is shared: the limit is that of production times four
+    longestHoldMs: 1000,
+  });
+  await addPeople(gate);
+  const app = createApp({
+    gate,
+    now: () => new Date().toISOString(),
+    newId: () => newId(),
+    hasher,
+    sessionSecret: secret,
+    overTls: options.overTls ?? false,
+    signInLimit: options.signInLimit ?? { windowSeconds: 60, perAccount: 1000, perAddress: 1000 },
+    logger: pino({ level: 'silent' }),
+    runner: options.runner ?? inlineRunner(),
+    resultFolder: null,
+    engineBuild: 'tests',
+    pagesRoot: options.pagesRoot ?? null,
+  });
+  const agents = new Map<TestKey, Agent>();
+  const nobody = (): Agent => {
+    const agent = request.agent(app.express);
+    agent.set('X-Requested-With', 'groundward');
+    return agent;
+  };
+  for (const { key } of testPeople) {
+    const agent = nobody();
+    await agent
+      .post('/api/session')
+      .send({ email: addressOf(key), password: testPassword })
+      .expect(200);
+    agents.set(key, agent);
+  }
+  return {
+    app,
+    database,
+    gate,
+    nobody,
+    as: (key) => {
+      const agent = agents.get(key);
+      if (agent === undefined) throw new Error(`nobody is called ${key}`);
+      return agent;
+    },
+    close: async () => {
+      await gate.close();
+      await database.drop();
+      if (longHolds.length > 0) throw new Error(`the connection was held for long: ${longHolds.join(', ')}`);
+    },
+  };
+}
