@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
 import { readSettings, readSettingsPatch, settingsPatchSchema, typedSettings } from './settings.ts';
@@ -96,6 +97,7 @@ describe('readSettings', () => {
     [{ units: 'us' }, ['name']],
     [{ name: 'A' }, ['units']],
     [{ ...least, name: '  ' }, ['name']],
+    [{ ...least, name: 'A\nB' }, ['name']],
     [{ ...least, fc: -1 }, ['fc']],
     [{ ...least, fc: 35 }, ['fc']],
     [{ ...least, fy: 420 }, ['fy']],
@@ -154,6 +156,36 @@ describe('readSettings', () => {
       joint: 'plain',
     };
     expect(settingsOf({ ...least, ...later })).toMatchObject(later);
+  });
+});
+
+describe('any JSON', () => {
+  const known = fc.constantFrom(
+    'name',
+    'units',
+    'fc',
+    'basis',
+    'bars',
+    'stiffness',
+    'expectedBaseShear',
+    '__proto__',
+    'constructor',
+  );
+  const anything = fc.oneof(fc.jsonValue(), fc.dictionary(known, fc.jsonValue()));
+  it('gives settings or problems and never throws', () => {
+    fc.assert(
+      fc.property(anything, anything, (json, patch) => {
+        const outcome = readSettings(json);
+        expect(outcome.ok || outcome.problems.length > 0).toBe(true);
+        const patched = readSettingsPatch(settingsOf(least), patch);
+        expect(patched.ok || patched.problems.length > 0).toBe(true);
+      }),
+    );
+  });
+
+  it('refuses the keys of objects themselves', () => {
+    expect(columnsOf(JSON.parse('{"name": "A", "units": "us", "__proto__": {"fc": 1}}'))).toEqual(['__proto__']);
+    expect(readSettingsPatch(settingsOf(least), JSON.parse('{"__proto__": {"fc": 1}}')).ok).toBe(false);
   });
 });
 

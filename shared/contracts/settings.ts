@@ -8,6 +8,8 @@ import { settingsMessage } from './settingsMessage.ts';
 import type { Settings, UnitSystem } from '../engineering/input.ts';
 import type { SettingProblem } from './notDesignedYet.ts';
 
+/** Control characters can't stand in a workbook's header. */
+const printable = /^\P{Cc}*$/u;
 const positive = z.number().gt(0).max(1e12);
 const notNegative = z.number().min(0).max(1e12);
 const fraction = z.number().min(0).max(1);
@@ -19,8 +21,8 @@ const endBarList = z.strictObject({ sizes: barList.shape.sizes, spacings: z.arra
 
 /** building.json as typed. Keys, values and defaults are those of the contract; limits that need the units follow below. */
 export const typedSettingsSchema = z.strictObject({
-  name: z.string().trim().min(1).max(200),
-  number: z.string().trim().max(100).optional(),
+  name: z.string().trim().min(1).max(200).regex(printable),
+  number: z.string().trim().max(100).regex(printable).optional(),
   units: z.enum(['us', 'si']),
   code: z.enum(['aci318-19', 'aci318-14']).optional(),
   loads: z.enum(['asce7-22', 'asce7-16']).optional(),
@@ -263,12 +265,13 @@ function mergeTyped(
   patch: Record<string, unknown>,
   depth: number,
 ): Record<string, unknown> {
-  const merged: Record<string, unknown> = { ...base };
+  const merged = new Map(Object.entries(base));
   for (const [key, value] of Object.entries(patch)) {
-    const inner = merged[key];
+    const inner = merged.get(key);
     const nested = depth > 0 || key === 'stiffness' || key === 'bars';
-    if (value === null) merged[key] = undefined;
-    else merged[key] = nested && isObject(value) ? mergeTyped(isObject(inner) ? inner : {}, value, depth + 1) : value;
+    if (value === null) merged.delete(key);
+    else
+      merged.set(key, nested && isObject(value) ? mergeTyped(isObject(inner) ? inner : {}, value, depth + 1) : value);
   }
-  return Object.fromEntries(Object.entries(merged).filter(([, value]) => value !== undefined));
+  return Object.fromEntries(merged);
 }

@@ -37,6 +37,8 @@ function expectation(issue: z.core.$ZodIssue): string {
       if (issue.origin === 'string') return `at most ${issue.maximum} characters`;
       if (issue.origin === 'array') return `at most ${issue.maximum} in the list`;
       return issue.inclusive === false ? `a number below ${issue.maximum}` : `a number of at most ${issue.maximum}`;
+    case 'invalid_format':
+      return 'text without line breaks and control characters';
     default:
       return 'another value';
   }

@@ -75,8 +75,7 @@ export function matchHeader(
           column: header,
           message: `${quoteText(header)} was matched to ${quoteText(chosen)}, which is no column of ${table}.csv; choose one of ${ours.map((own) => own.name).join(', ')}`,
         });
-      else if (header === '') unknown.push(`number ${index + 1}, without a header,`);
-      else unknown.push(quoteText(header));
+      else if (header !== '') unknown.push(quoteText(header));
       return;
     }
     const earlier = found.get(column.name);

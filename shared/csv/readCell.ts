@@ -1,3 +1,4 @@
+import { cleanText } from './cleanText.ts';
 import { largestNumber, parseNumber } from './parseNumber.ts';
 import { quoteText } from './quoteText.ts';
 
@@ -62,7 +63,8 @@ export function readCell(
     if (!reading.ok) return refuse(column, quoteText(text), reading.remedy);
     return checkNumber(column, convert ? convert(reading.value) : reading.value, quoteText(text));
   }
-  const own = withoutApostrophe(text);
+  const own = cleanText(withoutApostrophe(text));
+  if (own === null) return refuse(column, quoteText(text), 'take the control characters out');
   if (own.length > longestText) return refuse(column, `${own.length} characters`, `shorten it to ${longestText}`);
   if (column.type === 'text') return { ok: true, value: own };
   const folded = own.toLowerCase();

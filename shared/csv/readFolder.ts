@@ -1,11 +1,11 @@
 import { readSettings } from '../contracts/settings.ts';
 import { settingsDefaults } from '../contracts/settingsDefaults.ts';
-import { tableColumns } from '../contracts/tableColumns.ts';
 import { checkTables } from '../engineering/model/check-tables/checkTables.ts';
 
 import { limitProblems, problemLimit } from './fileProblem.ts';
 import { parseJson } from './parseJson.ts';
 import { readTable, requiredTables } from './readTable.ts';
+import { byRowAndColumn } from './sortProblems.ts';
 
 import type { BuildingInput, Problem, Settings, TableName, Tables, Warning } from '../engineering/input.ts';
 
@@ -142,14 +142,4 @@ function inFile(
   const row = problem.row === null ? null : (reading.lines[problem.row - 1] ?? null);
   const place = { file, row, column: problem.column, message: problem.message };
   return problem.code ? { ...place, code: problem.code } : place;
-}
-
-/** Problems of one file as an engineer goes through it: by line, then by column of the contract; without a column last. */
-function byRowAndColumn(table: TableName): (a: FileProblem, b: FileProblem) => number {
-  const names: readonly string[] = tableColumns[table].map((column) => column.name);
-  const place = (column: string | null): number => {
-    const at = column === null ? -1 : names.indexOf(column);
-    return at === -1 ? names.length : at;
-  };
-  return (a, b) => (a.row ?? 0) - (b.row ?? 0) || place(a.column) - place(b.column);
 }

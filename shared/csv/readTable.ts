@@ -2,18 +2,18 @@ import { tableColumns } from '../contracts/tableColumns.ts';
 
 import { decodeText } from './decodeText.ts';
 import { detectDelimiter } from './detectDelimiter.ts';
-import { limitProblems, problemLimit } from './fileProblem.ts';
+import { limitProblems } from './fileProblem.ts';
 import { knownHeaders, matchHeader } from './matchHeader.ts';
-import { quoteText } from './quoteText.ts';
-import { readCell } from './readCell.ts';
-import { isQuoted, normalizeLineEnds, readRecords } from './readRecords.ts';
+import { ProblemList } from './problemList.ts';
+import { normalizeLineEnds, readRecords } from './readRecords.ts';
+import { readRows } from './readRows.ts';
 
 import type { TableName, Tables, UnitSystem } from '../engineering/input.ts';
 
 import type { Encoding } from './decodeText.ts';
 import type { FileProblem } from './fileProblem.ts';
 import type { ColumnChoices, HeaderMatch } from './matchHeader.ts';
-import type { CsvRecord, Delimiter } from './readRecords.ts';
+import type { Delimiter } from './readRecords.ts';
 
 export interface TableReading<T extends TableName = TableName> {
   readonly table: T;
@@ -37,20 +37,6 @@ export interface TableReading<T extends TableName = TableName> {
 /** Tables that a building can't do without: their files need at least one row. */
 export const requiredTables: readonly TableName[] = ['levels', 'walls', 'forces'];
 
-/** Keeps the first 500 and counts the others. */
-class ProblemList {
-  readonly kept: FileProblem[] = [];
-  count = 0;
-  private readonly file: string;
-  constructor(file: string) {
-    this.file = file;
-  }
-  add(row: number | null, column: string | null, message: string): void {
-    this.count += 1;
-    if (this.kept.length <= problemLimit) this.kept.push({ file: this.file, row, column, message });
-  }
-}
-
 const emptyMatch: HeaderMatch = { matched: [], columns: [], headerUnits: {}, problems: [], notices: [] };
 
 /** Bytes of one CSV file to rows of its table in the building's units, or to all problems of the file. */
@@ -68,11 +54,12 @@ export function readTable<T extends TableName>(
     match: HeaderMatch,
     delimiter: Delimiter,
     encoding: Encoding,
+    notices: readonly string[] = [],
   ): TableReading<T> => ({
     table,
     rows: rows as Tables[T],
     lines,
-    notices: match.notices,
+    notices: [...match.notices, ...notices],
     problems: limitProblems(list.kept, list.count, fileName),
     problemCount: list.count,
     columns: match.columns,
@@ -107,58 +94,10 @@ export function readTable<T extends TableName>(
   const complete = tableColumns[table].every(
     (column) => !column.required || match.matched.some((entry) => entry.column === column),
   );
-  return finish(complete ? rows : [], complete ? lines : [], match, delimiter, decoded.encoding);
-}
-
-function readRows(
-  records: readonly CsvRecord[],
-  header: CsvRecord,
-  match: HeaderMatch,
-  table: TableName,
-  delimiter: Delimiter,
-  list: ProblemList,
-): { rows: Record<string, string | number | null>[]; lines: number[] } {
-  const blank: Record<string, string | number | null> = {};
-  const unread: Record<string, string | number | null> = {};
-  for (const column of tableColumns[table]) {
-    blank[column.name] = null;
-    unread[column.name] = column.type === 'number' ? NaN : '';
-  }
-  const rows: Record<string, string | number | null>[] = [];
-  const lines: number[] = [];
-  for (const record of records) {
-    if (record.brokenQuote !== null) {
-      const entry = match.columns[record.brokenQuote];
-      list.add(
-        record.line,
-        entry?.column ?? entry?.header ?? null,
-        'a double quote opens the cell and does not close before the next separator; close it, or write a quote inside a quoted cell twice',
-      );
-      rows.push(unread);
-      lines.push(record.line);
-      continue;
-    }
-    const row = { ...blank };
-    for (const { column, index, convert, unitKnown } of match.matched) {
-      const cell = record.cells[index] ?? '';
-      const ambiguous = delimiter !== ',' && cell.includes(',') && !isQuoted(record, index, delimiter);
-      const reading = readCell(column, cell, convert, ambiguous);
-      if (reading.ok) row[column.name] = unitKnown || reading.value === null ? reading.value : NaN;
-      else {
-        list.add(record.line, column.name, reading.message);
-        row[column.name] = unread[column.name] ?? null;
-      }
-    }
-    const extra = record.cells.slice(header.cells.length).find((cell) => cell.trim() !== '');
-    if (extra !== undefined) {
-      list.add(
-        record.line,
-        null,
-        `the row has ${record.cells.length} cells, the header ${header.cells.length}; ${quoteText(extra)} stands under no header: quote a cell that holds the separator, or take the cell out`,
-      );
-    }
-    rows.push(row);
-    lines.push(record.line);
-  }
-  return { rows, lines };
+  const unnamed = header.cells.flatMap((cell, index) =>
+    cell.trim() === '' && records.some((record) => (record.cells[index] ?? '').trim() !== '')
+      ? [`column number ${index + 1} has no header and was left out`]
+      : [],
+  );
+  return finish(complete ? rows : [], complete ? lines : [], match, delimiter, decoded.encoding, unnamed);
 }

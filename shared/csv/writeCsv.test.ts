@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 
 import { tableColumns } from '../contracts/tableColumns.ts';
 
+import { cleanText } from './cleanText.ts';
 import { readTable } from './readTable.ts';
 import { templateCsv, writeCsv } from './writeCsv.ts';
 
@@ -11,7 +12,7 @@ import type { TableName, Tables } from '../engineering/input.ts';
 
 const bytes = (text: string): Uint8Array => new TextEncoder().encode(text);
 
-/** Names as they are stored: trimmed, not empty, no characters that a text file can't hold. */
+/** Names as they are stored: trimmed, not empty, as cleanText gives them. */
 const nameText = fc
   .oneof(
     fc.string({ minLength: 1, maxLength: 12 }),
@@ -34,8 +35,8 @@ const nameText = fc
       '−1',
     ),
   )
-  .map((text) => text.replace(/[\0\r\uFEFF]/g, '').trim())
-  .filter((text) => text !== '' && !/\p{Surrogate}/u.test(text));
+  .map((text) => cleanText(text) ?? '')
+  .filter((text) => text !== '');
 
 function valueFor(column: Column): fc.Arbitrary<string | number | null> {
   const filled: fc.Arbitrary<string | number> =
