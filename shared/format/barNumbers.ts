@@ -1,10 +1,11 @@
 import type { UnitSystem } from '../engineering/input.ts';
+import { barTables } from '../engineering/wall-design/bars.ts';
 import { refuse, type Parsed } from './parsed.ts';
 
-/** Deformed bars of ASTM A615 and A706: inch-pound numbers, and the soft-metric numbers of the same bars. From memory. */
+/** The bars of each unit system, as the engine has them. */
 export const barNumbers: Readonly<Record<UnitSystem, readonly number[]>> = {
-  us: [3, 4, 5, 6, 7, 8, 9, 10, 11, 14, 18],
-  si: [10, 13, 16, 19, 22, 25, 29, 32, 36, 43, 57],
+  us: barTables.us.map((bar) => bar.number),
+  si: barTables.si.map((bar) => bar.number),
 };
 
 /** `#5` in US units, `16` in SI. */

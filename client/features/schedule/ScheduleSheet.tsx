@@ -1,0 +1,163 @@
+import { useCallback, useMemo, useState, type ReactElement } from 'react';
+
+import type { ResultDocument } from '#shared/contracts/result';
+import type { ScheduleResource, ScheduleResourceRow } from '#shared/contracts/schedule';
+import type { TableResource } from '#shared/contracts/tables';
+import type { OwnCells } from '#shared/engineering/wall-design/designTypes';
+import { printLevelRange } from '#shared/format/levelRange';
+
+import { sentenceOf } from '../../app/errorSentences.ts';
+import { useCanEdit } from '../../app/useCanEdit.ts';
+import { DataGrid } from '../../components/grid/DataGrid.tsx';
+import type { GridEdit } from '../../components/grid/gridTypes.ts';
+import { useUndo } from '../../data/mutations.ts';
+import { useBuildingInput } from '../../engine/useBuildingInput.ts';
+import { editedColumns, isEditedColumn } from './cellText.ts';
+import { ConflictNote } from './ConflictNote.tsx';
+import { OrphanNotes } from './OrphanNotes.tsx';
+import type { BandElevations } from './parseColumn.ts';
+import { scheduleColumns } from './scheduleColumns.tsx';
+import { filterRows, type ScheduleFilter } from './scheduleFilter.ts';
+import { ScheduleReading } from './ScheduleReading.tsx';
+import { ScheduleToolbar } from './ScheduleToolbar.tsx';
+import type { ScheduleChoice } from './useScheduleChoice.ts';
+import { useScheduleEdits } from './useScheduleEdits.ts';
+import { WallFoot } from './WallFoot.tsx';
+import { WallHead } from './WallHead.tsx';
+
+export interface ScheduleSheetProps {
+  id: string;
+  document: ResultDocument;
+  walls: TableResource<'walls'>;
+  schedule: ScheduleResource;
+  filter: ScheduleFilter;
+  choice: ScheduleChoice;
+}
+
+const rowId = (row: ScheduleResourceRow): string => row.id;
+const wallOf = (row: ScheduleResourceRow): string => row.wall;
+
+/** Edits of one commit by row: parts of one cell that were edited together become one whole cell. */
+export function mergeEdits(edits: readonly GridEdit[]): ReadonlyMap<string, OwnCells> {
+  const byRow = new Map<string, OwnCells>();
+  for (const { rowId: id, value } of edits) byRow.set(id, { ...byRow.get(id), ...(value as OwnCells) });
+  return byRow;
+}
+
+/** The grid of the schedule with what an edit reads as, its conflicts and the way back to the automatic choice. */
+export function ScheduleSheet({ id, document, walls, schedule, filter, choice }: ScheduleSheetProps): ReactElement {
+  const { units } = document;
+  const canEdit = useCanEdit();
+  const edits = useScheduleEdits(id);
+  const undo = useUndo(id);
+  const input = useBuildingInput(id);
+  const [cell, setCell] = useState<{ rowId: string; columnId: string } | null>(null);
+  const rows = useMemo(() => filterRows(schedule.rows, filter), [schedule.rows, filter]);
+  const { down, levelsOf } = choice;
+  const bandOf = useCallback(
+    ({ from, to }: Pick<ScheduleResourceRow, 'from' | 'to'>): BandElevations => {
+      const foot = down.find((level) => level.level === from);
+      const head = down.find((level) => level.level === to);
+      return { from: foot ? foot.elevation - foot.height : 0, to: head?.elevation ?? 0 };
+    },
+    [down],
+  );
+  const columns = useMemo(() => scheduleColumns({ units, bandOf }), [units, bandOf]);
+  const focused = cell === null ? null : (schedule.rows.find((row) => row.id === cell.rowId) ?? null);
+  const release = (row: string, columnId: string): void => {
+    const stored = schedule.rows.find((one) => one.id === row);
+    if (!isEditedColumn(columnId) || !stored?.overwritten.includes(editedColumns[columnId])) return;
+    edits.send({ rowId: row, release: [editedColumns[columnId]] });
+  };
+  const error = edits.error ?? undo.error;
+  return (
+    <>
+      <ScheduleToolbar
+        row={focused}
+        columnId={cell?.columnId ?? null}
+        units={units}
+        canEdit={canEdit}
+        saving={edits.saving}
+        onTakeAuto={() => {
+          if (cell) release(cell.rowId, cell.columnId);
+        }}
+      />
+      {error ? (
+        <p role="alert" className="gw-problem mb-2 text-data">
+          {sentenceOf(error)}
+        </p>
+      ) : null}
+      {edits.alsoChanged.length > 0 ? (
+        <p role="status" className="mb-2 text-data">
+          Verdicts that changed with this edit: {edits.alsoChanged.map(sayRow).join('; ')}.
+        </p>
+      ) : null}
+      {edits.conflict ? (
+        <ConflictNote
+          conflict={edits.conflict}
+          units={units}
+          onKeepMine={edits.keepMine}
+          onTakeTheirs={edits.takeTheirs}
+        />
+      ) : null}
+      <OrphanNotes
+        orphans={schedule.orphans}
+        canEdit={canEdit}
+        onRelease={(orphan, cells) => edits.send({ rowId: orphan, release: cells })}
+      />
+      {rows.length === 0 ? (
+        <p className="border-t border-ink py-3 text-graphite" role="status">
+          {filter === 'over' ? 'No band is over a limit.' : 'No cell is overwritten.'}
+        </p>
+      ) : (
+        <DataGrid
+          name="Wall schedule"
+          columns={columns}
+          rows={rows}
+          rowId={rowId}
+          groupOf={wallOf}
+          renderGroupHead={(wall) => <WallHead wall={wall} rows={walls.rows} units={units} />}
+          renderGroupFoot={(wall) => (
+            <WallFoot
+              rows={schedule.rows.filter((row) => row.wall === wall)}
+              quantities={document.quantities.walls.find((one) => one.wall === wall)}
+              units={units}
+            />
+          )}
+          rowHeight={40}
+          rowState={(row) => ({ over: !row.ok })}
+          onCommit={(committed) => {
+            for (const [row, own] of mergeEdits(committed)) edits.send({ rowId: row, own });
+          }}
+          onClear={release}
+          onUndo={() => undo.mutate()}
+          reading={(row, columnId, draft) =>
+            isEditedColumn(columnId) ? (
+              <ScheduleReading
+                column={columnId}
+                draft={draft}
+                row={row}
+                rows={schedule.rows}
+                checks={document.checks}
+                levels={levelsOf(row).map((level) => level.level)}
+                units={units}
+                band={bandOf(row)}
+                input={input}
+              />
+            ) : null
+          }
+          onFocusCell={(row, columnId) => {
+            setCell({ rowId: row, columnId });
+            const next = schedule.rows.find((one) => one.id === row);
+            if (next) choice.chooseRow(next);
+          }}
+          focusRowId={choice.row?.id ?? null}
+          readOnly={!canEdit}
+        />
+      )}
+    </>
+  );
+}
+
+const sayRow = (row: ScheduleResourceRow): string =>
+  `${row.wall} ${printLevelRange(row.from, row.to)} ${row.ok ? 'within' : 'over'}`;

@@ -1,0 +1,42 @@
+import type { UnitSystem } from '#shared/engineering/input';
+import type { OwnCells } from '#shared/engineering/wall-design/designTypes';
+import { barTables } from '#shared/engineering/wall-design/bars';
+import { millimetersPerInch } from '#shared/engineering/units';
+import { sayBar } from '#shared/format/barNumbers';
+import { formatBarLength } from '#shared/format/length';
+
+/** What was typed, in words: `2 curtains, No. 5 at 10 in`. */
+export function sayCells(cells: OwnCells, units: UnitSystem): string {
+  const unit = units === 'us' ? 'in' : 'mm';
+  const length = (value: number): string => `${formatBarLength(value, units)} ${unit}`;
+  const curtains = cells.vertical ?? cells.horizontal;
+  if (curtains) {
+    const faces = curtains.curtains === 2 ? '2 curtains' : '1 curtain';
+    return `${faces}, ${sayBar(curtains.bar)} at ${length(curtains.spacing)}`;
+  }
+  if (cells.ends === null) return 'no end zone';
+  if (cells.ends) return `${cells.ends.count} bars ${sayBar(cells.ends.bar)} in ${length(cells.ends.length)}, each end`;
+  if (cells.ties === null) return 'no ties';
+  if (cells.ties) {
+    const { bar, spacing, legsAcross, legsAlong } = cells.ties;
+    return `${sayBar(bar)} at ${length(spacing)}, ${legsAcross} legs through the thickness, ${legsAlong} along`;
+  }
+  if (cells.laps) {
+    const { web, ends, horizontal } = cells.laps;
+    const part = (name: string, value: number | null): string => `${name} ${value === null ? 'none' : length(value)}`;
+    return `laps: ${part('vertical', web)}, ${part('ends', ends)}, ${part('horizontal', horizontal)}`;
+  }
+  return '';
+}
+
+/** Steel ratio of distributed bars over the whole thickness: curtains x area of a bar / (spacing x thickness). */
+export function distributedSteelRatio(
+  cell: { readonly curtains: number; readonly bar: number; readonly spacing: number },
+  thickness: number,
+  units: UnitSystem,
+): number | null {
+  const bar = barTables[units].find((one) => one.number === cell.bar);
+  if (!bar || !(cell.spacing > 0) || !(thickness > 0)) return null;
+  const perInch = units === 'us' ? 1 : millimetersPerInch;
+  return (cell.curtains * bar.areaIn2 * perInch * perInch) / (cell.spacing * thickness);
+}

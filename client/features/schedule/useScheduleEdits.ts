@@ -1,0 +1,105 @@
+import { useQueryClient } from '@tanstack/react-query';
+import { useCallback, useRef, useState } from 'react';
+
+import type { ScheduleResource, ScheduleResourceRow } from '#shared/contracts/schedule';
+import type { OverwritableCell, OwnCells } from '#shared/engineering/wall-design/designTypes';
+
+import { ApiError } from '../../data/ApiError.ts';
+import { keys } from '../../data/keys.ts';
+import { usePatchSchedule } from '../../data/mutations.ts';
+import { mergeRows } from './mergeRows.ts';
+import { toPatch } from './toPatch.ts';
+
+export interface ScheduleChange {
+  readonly rowId: string;
+  readonly own?: OwnCells;
+  readonly release?: readonly OverwritableCell[];
+}
+
+/** Both values of a row that someone else changed meanwhile. */
+export interface ScheduleConflict {
+  readonly change: ScheduleChange;
+  readonly stored: ScheduleResourceRow;
+}
+
+export interface ScheduleEdits {
+  readonly send: (change: ScheduleChange) => void;
+  readonly saving: boolean;
+  readonly conflict: ScheduleConflict | null;
+  readonly keepMine: () => void;
+  readonly takeTheirs: () => void;
+  readonly error: ApiError | null;
+  /** rows of the last answer whose verdict changed with the edit, beside the edited one */
+  readonly alsoChanged: readonly ScheduleResourceRow[];
+}
+
+const isRow = (value: unknown): value is ScheduleResourceRow =>
+  typeof value === 'object' && value !== null && 'id' in value && 'version' in value && 'vertical' in value;
+
+/**
+ * Sends edits one after the other, each with the version that the answer before it left, so that two quick edits of one person
+ * never conflict with each other. A conflict with someone else stops there and shows both values.
+ */
+export function useScheduleEdits(id: string): ScheduleEdits {
+  const client = useQueryClient();
+  const { mutateAsync } = usePatchSchedule(id);
+  const queue = useRef<Promise<void>>(Promise.resolve());
+  const [open, setOpen] = useState(0);
+  const [conflict, setConflict] = useState<ScheduleConflict | null>(null);
+  const [error, setError] = useState<ApiError | null>(null);
+  const [alsoChanged, setAlsoChanged] = useState<readonly ScheduleResourceRow[]>([]);
+  const key = keys.schedule(id);
+
+  const store = useCallback(
+    (rows: readonly ScheduleResourceRow[]) =>
+      client.setQueryData<ScheduleResource>(keys.schedule(id), (before) => before && mergeRows(before, rows)),
+    [client, id],
+  );
+
+  const sendNow = useCallback(
+    async (change: ScheduleChange, version: number): Promise<void> => {
+      try {
+        const answer = await mutateAsync({ rowId: change.rowId, patch: toPatch(change, version) });
+        store(answer.row === null ? answer.alsoChanged : [answer.row, ...answer.alsoChanged]);
+        setAlsoChanged(answer.alsoChanged);
+      } catch (failure) {
+        if (!(failure instanceof ApiError)) throw failure;
+        const { code, current } = failure;
+        if (code === 'version' && isRow(current)) setConflict({ change, stored: current });
+        else setError(failure);
+      }
+    },
+    [mutateAsync, store],
+  );
+
+  const enqueue = useCallback(
+    (change: ScheduleChange, version: number | null) => {
+      setOpen((count) => count + 1);
+      setError(null);
+      queue.current = queue.current.then(async () => {
+        const { rows = [], orphans = [] } = client.getQueryData<ScheduleResource>(keys.schedule(id)) ?? {};
+        const stored = version ?? [...rows, ...orphans].find((row) => row.id === change.rowId)?.version;
+        if (stored !== undefined) await sendNow(change, stored);
+        setOpen((count) => count - 1);
+      });
+    },
+    [client, id, sendNow],
+  );
+
+  return {
+    send: (change) => enqueue(change, null),
+    saving: open > 0,
+    conflict,
+    keepMine: () => {
+      if (conflict) enqueue(conflict.change, conflict.stored.version);
+      setConflict(null);
+    },
+    takeTheirs: () => {
+      if (conflict) store([conflict.stored]);
+      setConflict(null);
+      void client.invalidateQueries({ queryKey: key });
+    },
+    error,
+    alsoChanged,
+  };
+}
