@@ -1,6 +1,7 @@
 import { readFileSync, readdirSync } from 'node:fs';
 import { join } from 'node:path';
 
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
 import { readFolder } from './readFolder.ts';
@@ -109,5 +110,31 @@ describe('readFolder', () => {
     );
     if (!reading.ok) throw new Error(JSON.stringify(reading.problems));
     expect(reading.notices.map(({ code }) => code)).toEqual(['file-notice', 'forces-added']);
+  });
+
+  it('never throws, whatever one of its files holds or loses', () => {
+    const name = fc.constantFrom(
+      'building.json',
+      'levels.csv',
+      'walls.csv',
+      'forces.csv',
+      'gravity.csv',
+      'combinations.csv',
+    );
+    fc.assert(
+      fc.property(name, fc.nat(), fc.nat(), fc.uint8Array({ maxLength: 6 }), (file, at, cut, patch) => {
+        const all = files();
+        const own = all.get(file) ?? new Uint8Array();
+        const start = at % (own.length + 1);
+        const end = Math.min(own.length, start + (cut % 8));
+        all.set(file, new Uint8Array([...own.slice(0, start), ...patch, ...own.slice(end)]));
+        const reading = readFolder(all);
+        if (reading.ok) {
+          expect(reading.lines.walls).toHaveLength(reading.input.tables.walls.length);
+          expect(reading.input.tables.walls.every(({ wall, x1 }) => wall !== '' && Number.isFinite(x1))).toBe(true);
+        } else expect(reading.problems.length).toBeGreaterThan(0);
+      }),
+      { numRuns: 400 },
+    );
   });
 });
