@@ -59,7 +59,11 @@ function runSection(file: string): void {
 async function runFolder(folder: string, out: string | undefined, json: boolean, allActions: boolean): Promise<void> {
   const reading = readFolder(readFiles(folder));
   if (!reading.ok) return refuse(reading.problems, json);
-  const outcome = runBuilding(reading.input, { now: () => performance.now(), allActions });
+  const outcome = runBuilding(reading.input, {
+    now: () => performance.now(),
+    allActions,
+    notices: reading.notices.filter(({ code }) => code === 'file-notice' || code === 'no-gravity'),
+  });
   if (!outcome.ok) {
     const lineOf = (table: string, row: number | null) =>
       row === null ? null : (Object.entries(reading.lines).find(([name]) => name === table)?.[1][row - 1] ?? null);

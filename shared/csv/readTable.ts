@@ -1,3 +1,4 @@
+import { checkExpression } from '../combination-text/checkExpression.ts';
 import { tableColumns } from '../contracts/tableColumns.ts';
 
 import { decodeText } from './decodeText.ts';
@@ -91,6 +92,7 @@ export function readTable<T extends TableName>(
   const match = matchHeader(table, header.cells, units, choices);
   for (const problem of match.problems) list.add(header.line, problem.column, problem.message);
   const { rows, lines } = readRows(records, header, match, table, delimiter, list);
+  if (table === 'combinations') addExpressionProblems(rows, lines, list);
   const complete = tableColumns[table].every(
     (column) => !column.required || match.matched.some((entry) => entry.column === column),
   );
@@ -100,4 +102,17 @@ export function readTable<T extends TableName>(
       : [],
   );
   return finish(complete ? rows : [], complete ? lines : [], match, delimiter, decoded.encoding, unnamed);
+}
+
+/** A combination that can't be read is a problem of its file, with the place in the text. */
+function addExpressionProblems(
+  rows: readonly Readonly<Record<string, unknown>>[],
+  lines: readonly number[],
+  list: ProblemList,
+): void {
+  rows.forEach(({ expression }, index) => {
+    if (typeof expression !== 'string' || expression === '') return;
+    const fault = checkExpression(expression);
+    if (fault !== null) list.add(lines[index] ?? null, 'expression', fault);
+  });
 }

@@ -40,18 +40,20 @@ const nameText = fc
 
 function valueFor(column: Column): fc.Arbitrary<string | number | null> {
   const filled: fc.Arbitrary<string | number> =
-    column.type === 'text'
-      ? nameText
-      : column.type === 'choice'
-        ? fc.constantFrom(...(column.choices ?? []))
-        : fc
-            .double({
-              min: column.min ?? column.above ?? -1e9,
-              max: column.max ?? 1e9,
-              minExcluded: column.above !== undefined,
-              noNaN: true,
-            })
-            .map((value) => (value === 0 ? 0 : value));
+    column.name === 'expression'
+      ? fc.constantFrom('1.4D', '1.2D + 1.6L + 0.5(Lr or S or R)', '-0.9D + 1.0W', '+1.2D')
+      : column.type === 'text'
+        ? nameText
+        : column.type === 'choice'
+          ? fc.constantFrom(...(column.choices ?? []))
+          : fc
+              .double({
+                min: column.min ?? column.above ?? -1e9,
+                max: column.max ?? 1e9,
+                minExcluded: column.above !== undefined,
+                noNaN: true,
+              })
+              .map((value) => (value === 0 ? 0 : value));
   return column.required ? filled : fc.option(filled, { nil: null });
 }
 

@@ -1,3 +1,4 @@
+import { placedMessage } from '../combination-text/checkExpression.ts';
 import { defaultCombinations } from '../combination-text/defaultCombinations.ts';
 import { parseCombination } from '../combination-text/parseCombination.ts';
 import type { FactoredCombination } from '../engineering/combinations/expandCombinations.ts';
@@ -28,7 +29,7 @@ export function readCombinations(building: BuildingInput): CombinationSet | { re
         table: 'combinations',
         row: index + 1,
         column: 'expression',
-        message: `${reading.message} (at character ${reading.position + 1} of “${row.expression}”)`,
+        message: placedMessage(reading.message, reading.position, row.expression),
       });
       return;
     }

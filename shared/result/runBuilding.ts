@@ -29,6 +29,8 @@ export interface RunOptions {
   readonly now?: () => number;
   /** every expanded combination in `actions`, not only those that govern */
   readonly allActions?: boolean;
+  /** what was said when the files were read; it stands with the warnings */
+  readonly notices?: readonly Warning[];
   /** stories that carry an engineer's own cells */
   readonly pinned?: readonly PinnedBand[];
 }
@@ -56,7 +58,13 @@ export function runBuilding(input: BuildingInput, options: RunOptions = {}): Run
   const outcome = drive(input, set, options.pinned ?? [], now, timing);
   if (!outcome.ok) return outcome;
   const writing = now();
-  const answer = write(input, set, outcome, checked.notices, options.allActions ?? false);
+  const answer = write(
+    input,
+    set,
+    outcome,
+    [...(options.notices ?? []), ...checked.notices],
+    options.allActions ?? false,
+  );
   timing.write = now() - writing;
   timing.total = now() - start;
   return { ok: true, document: { ...answer.document, timing }, rows: answer.rows };

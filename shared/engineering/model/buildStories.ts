@@ -1,7 +1,7 @@
 import type { LevelRow, Settings } from '../input.ts';
 import { unitFactors } from '../units.ts';
 
-import { levelOrder } from './check-tables/levelOrder.ts';
+import { baseElevation, levelOrder } from './check-tables/levelOrder.ts';
 import type { Story, WallLine } from './model.ts';
 
 /** A story before its plan size is known: heights and elevations in inches. */
@@ -19,8 +19,7 @@ export interface StoryHeight {
 export function buildStoryHeights(levels: readonly LevelRow[], settings: Settings): StoryHeight[] {
   const toIn = unitFactors[settings.units].planLength;
   const ordered = levelOrder(levels).map((index) => levels[index] as LevelRow);
-  const lowest = ordered[0];
-  let bottom = lowest && lowest.elevation !== null ? lowest.elevation * toIn - lowest.height * toIn : 0;
+  let bottom = baseElevation(levels) * toIn;
   return ordered.map((row) => {
     const heightIn = row.height * toIn;
     const story = { row, heightIn, bottomElevationIn: bottom, elevationIn: bottom + heightIn };
