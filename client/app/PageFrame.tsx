@@ -21,21 +21,23 @@ export interface PageFrameProps {
 export function PageFrame({ title, sub, actions, stackTitle, stackSub, stack, keys = [], children }: PageFrameProps) {
   return (
     <>
-      <div className="gw-stack-head">
-        <p className="gw-page-name">{stackTitle}</p>
-        <p className="gw-sub">{stackSub}</p>
-      </div>
-      <div className="gw-head">
-        <div className="min-w-0">
-          <h1 className="gw-page-name">{title}</h1>
-          <div className="gw-sub">{sub}</div>
+      <aside className="contents" aria-label="Stories">
+        <div className="gw-stack-head">
+          <p className="gw-page-name">{stackTitle}</p>
+          <p className="gw-sub">{stackSub}</p>
         </div>
-        <div className="gw-acts">{actions}</div>
-      </div>
-      <aside className="gw-stack-column" aria-label="Stories">
-        {stack}
+        <div className="gw-stack-column">{stack}</div>
       </aside>
-      <main className="gw-sheet">{children}</main>
+      <main className="contents">
+        <div className="gw-head">
+          <div className="min-w-0">
+            <h1 className="gw-page-name">{title}</h1>
+            <div className="gw-sub">{sub}</div>
+          </div>
+          <div className="gw-acts">{actions}</div>
+        </div>
+        <div className="gw-sheet">{children}</div>
+      </main>
       <Foot keys={keys} />
     </>
   );

@@ -10,6 +10,8 @@ import { RequireSession } from './RequireSession.tsx';
 export const routeObjects: RouteObject[] = [
   {
     errorElement: <CrashPage />,
+    // while the first page loads: the bare ground
+    hydrateFallbackElement: <></>,
     children: [
       {
         path: paths.signIn,

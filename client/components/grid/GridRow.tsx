@@ -42,6 +42,7 @@ function classesOf<Row>(column: GridColumn<Row>, row: Row, readOnly: boolean, in
     isEditable(column, row) && !readOnly ? '' : 'gw-grid-fixed',
     state?.overwritten === true ? 'gw-grid-overwritten' : '',
     state?.over === true ? 'gw-grid-over' : '',
+    column.firm === true ? 'font-medium' : '',
     column.quiet?.(row) === true ? 'text-graphite' : '',
     inRange ? 'gw-grid-ranged' : '',
   ]

@@ -54,7 +54,7 @@ export function ReadingLine({
         role="gridcell"
         aria-colspan={columnCount}
         className={late ? 'justify-end' : ''}
-        style={{ gridColumn: late ? '1 / -1' : `${column + 1} / -1` }}
+        style={{ gridColumn: late ? `1 / ${column + 2}` : `${column + 1} / -1` }}
       >
         <div
           id={id}

@@ -21,6 +21,8 @@ export interface GridColumn<Row> {
   readonly state?: (row: Row) => { readonly overwritten?: boolean; readonly over?: boolean };
   /** the state in words, for the accessible description */
   readonly describe?: (row: Row) => string | null;
+  /** medium weight: the row's own name */
+  readonly firm?: boolean;
   /** graphite: worked out, or not given */
   readonly quiet?: (row: Row) => boolean;
   readonly parse: (text: string, row: Row) => Parsed;

@@ -21,10 +21,10 @@ export function StateNote({ art, place, title, children, actions, wholePage = fa
       <div className="flex w-[232px] justify-center">
         <StateArt name={art} />
       </div>
-      <div className="max-w-[46ch] min-w-[280px] flex-1">
+      <div className="min-w-[280px] flex-1">
         <div className="note">{place}</div>
         <Title className="mt-[2px] mb-2 text-[22px] leading-[28px] font-semibold tracking-[-0.01em]">{title}</Title>
-        <div className="flex flex-col gap-2">{children}</div>
+        <div className="flex max-w-[46ch] flex-col gap-2">{children}</div>
         {actions === undefined ? null : <div className="mt-4 flex flex-wrap gap-2">{actions}</div>}
       </div>
     </div>

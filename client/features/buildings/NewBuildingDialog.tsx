@@ -49,7 +49,15 @@ export function NewBuildingDialog({ onClose, onCreated }: NewBuildingDialogProps
       : (create.error.problems[0]?.message ?? sentenceOf(create.error));
 
   return (
-    <dialog ref={dialog} className="gw-dialog" aria-labelledby={titleId} onClose={onClose}>
+    <dialog
+      ref={dialog}
+      className="gw-dialog"
+      aria-labelledby={titleId}
+      onCancel={(event) => {
+        event.preventDefault();
+        onClose();
+      }}
+    >
       <form noValidate onSubmit={submit}>
         <h2 id={titleId} className="gw-section mb-4">
           New building

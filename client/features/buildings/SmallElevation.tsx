@@ -1,8 +1,8 @@
 import type { ElevationView } from '../../data/elevationView.ts';
 
 const boxWidth = 148;
-const boxHeight = 84;
-const maximum = 76;
+const leastHeight = 84;
+const maximum = 110;
 
 /** px a unit of length: one of a few round scales, so that most buildings of a list stand at the same one. */
 export function elevationScale(view: ElevationView, units: 'us' | 'si'): number {
@@ -21,7 +21,8 @@ function widthOf(view: ElevationView): number | null {
 /** The building seen along y, heights and widths to one scale; walls across the view as strokes, in the view as tints. */
 export function SmallElevation({ view, units }: { readonly view: ElevationView; readonly units: 'us' | 'si' }) {
   const scale = elevationScale(view, units);
-  const ground = boxHeight - 6;
+  const boxHeight = Math.max(leastHeight, Math.ceil(view.height * scale) + 20);
+  const ground = boxHeight - 8;
   const width = (widthOf(view) ?? view.height * 0.6) * scale;
   const left = (boxWidth - width) / 2;
   const low = view.walls.length === 0 ? 0 : Math.min(...view.walls.flatMap((wall) => [wall.x1, wall.x2]));

@@ -5,12 +5,13 @@ import type { ReadColumns } from './useUploadFlow.ts';
 export interface ColumnMatchingProps {
   readonly table: EditableTable;
   readonly columns: ReadColumns;
+  readonly samples: readonly string[];
   readonly disabled: boolean;
   readonly onMatch: (header: string, column: string | null) => void;
 }
 
 /** The file's own heads, each with the column that it was taken for; the person may say otherwise. */
-export function ColumnMatching({ table, columns, disabled, onMatch }: ColumnMatchingProps) {
+export function ColumnMatching({ table, columns, samples, disabled, onMatch }: ColumnMatchingProps) {
   const ours = tableColumns[table];
   const taken = new Set(columns.flatMap((one) => (one.column === null ? [] : [one.column])));
   const missing = ours.filter((column) => column.required && !taken.has(column.name));
@@ -39,7 +40,7 @@ export function ColumnMatching({ table, columns, disabled, onMatch }: ColumnMatc
                   ))}
                 </select>
               </td>
-              <td className="note">{column === null ? 'left out' : ''}</td>
+              <td className="note max-w-[128px] overflow-hidden text-ellipsis">{samples[index] ?? ''}</td>
             </tr>
           ))}
         </tbody>

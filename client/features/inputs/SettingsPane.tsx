@@ -187,17 +187,19 @@ export function SettingsPane({ building, canEdit, hasRows, cases }: SettingsPane
         {groups.map((group) => (
           <fieldset key={group.title} className="min-w-0">
             <legend className="gw-section mb-1 w-full text-head leading-[24px] font-semibold">{group.title}</legend>
-            {group.fields.map((field) => (
-              <Field
-                key={field.path}
-                field={field}
-                units={building.units}
-                draft={draftFor(field)}
-                disabled={!canEdit || (field.path === 'units' && hasRows)}
-                problem={wrong[field.path] ?? problemAt(problems, field.path)}
-                onDraft={(draft) => setDrafts((before) => ({ ...before, [field.path]: draft }))}
-              />
-            ))}
+            <div>
+              {group.fields.map((field) => (
+                <Field
+                  key={field.path}
+                  field={field}
+                  units={building.units}
+                  draft={draftFor(field)}
+                  disabled={!canEdit || (field.path === 'units' && hasRows)}
+                  problem={wrong[field.path] ?? problemAt(problems, field.path)}
+                  onDraft={(draft) => setDrafts((before) => ({ ...before, [field.path]: draft }))}
+                />
+              ))}
+            </div>
           </fieldset>
         ))}
       </div>

@@ -158,7 +158,13 @@ export function UploadPanel({ flow, units, onClose }: UploadPanelProps) {
         </div>
         <TableChoice table={state.table} onChoose={flow.setTable} />
         <UploadPreview table={state.table} answer={answer} units={units} />
-        <ColumnMatching table={state.table} columns={flow.columns} disabled={flow.busy} onMatch={flow.match} />
+        <ColumnMatching
+          table={state.table}
+          columns={flow.columns}
+          samples={flow.samples}
+          disabled={flow.busy}
+          onMatch={flow.match}
+        />
       </>
     );
   } else {
@@ -167,7 +173,7 @@ export function UploadPanel({ flow, units, onClose }: UploadPanelProps) {
       <>
         <p className="my-2" role="alert">
           {state.message ??
-            `${problems.length === 1 ? '1 problem' : `${count(problems.length)} problems`} in ${count(flow.rowCount)} rows. What is stored now stays as it is. Correct the file and upload it again, or match a column below.`}
+            `${problems.length === 1 ? '1 problem' : `${count(problems.length)} problems`}${flow.rowCount === 0 ? '' : ` in ${count(flow.rowCount)} rows`}. What is stored now stays as it is. Correct the file and upload it again, or match a column below.`}
         </p>
         <ProblemList problems={problems} />
         <div className="mt-3 flex items-center gap-2">
@@ -179,7 +185,13 @@ export function UploadPanel({ flow, units, onClose }: UploadPanelProps) {
         </div>
         <TableChoice table={state.table} onChoose={flow.setTable} />
         {flow.columns.length === 0 ? null : (
-          <ColumnMatching table={state.table} columns={flow.columns} disabled={flow.busy} onMatch={flow.match} />
+          <ColumnMatching
+            table={state.table}
+            columns={flow.columns}
+            samples={flow.samples}
+            disabled={flow.busy}
+            onMatch={flow.match}
+          />
         )}
       </>
     );

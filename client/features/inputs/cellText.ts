@@ -3,7 +3,7 @@ import { formatNumber } from '#shared/format/number';
 
 import type { CellValue } from '#shared/contracts/tables';
 
-/** Least decimals of a column: lengths in ft one, in m two, forces one; the rest as typed. */
+/** Least decimals of a column: lengths in ft one, in m two, forces one but none in a column above 100; the rest as typed. */
 const least: Readonly<Record<string, Readonly<Record<'us' | 'si', number>>>> = {
   length: { us: 1, si: 2 },
   force: { us: 1, si: 1 },
@@ -24,7 +24,8 @@ function decimalsOf(value: number): number {
 
 /** One number of decimals for a whole column, so that points stand under each other and nothing typed is hidden. */
 export function columnDecimals(column: Column, values: readonly CellValue[], units: 'us' | 'si'): number {
-  let decimals = least[column.quantity ?? 'plain']?.[units] ?? 0;
+  const large = values.some((value) => typeof value === 'number' && Math.abs(value) > 100);
+  let decimals = column.quantity === 'force' && large ? 0 : (least[column.quantity ?? 'plain']?.[units] ?? 0);
   for (const value of values) if (typeof value === 'number') decimals = Math.max(decimals, decimalsOf(value));
   return decimals;
 }

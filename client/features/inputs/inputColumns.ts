@@ -36,18 +36,26 @@ const widths: Readonly<Record<string, number>> = {
   expression: 480,
   name: 220,
   level: 84,
-  diaphragm: 84,
-  live_class: 96,
-  from_level: 88,
+  diaphragm: 96,
+  live_class: 108,
+  from_level: 100,
   to_level: 80,
-  flexure_factor: 92,
-  shear_factor: 84,
-  tributary_area: 96,
-  eccentricity: 92,
+  flexure_factor: 116,
+  shear_factor: 104,
+  tributary_area: 116,
+  eccentricity: 96,
+  thickness: 80,
+  kind: 88,
+  case: 72,
 };
 
-/** `height reads "x", expected a number above 0; write digits ...`: what follows `expected`. */
-const expectedOf = (message: string): string => message.split('expected ').slice(1).join('expected ') || message;
+/** `height reads "x", expected a number above 0; write digits ...`: what follows `expected`, less advice that is for files. */
+function expectedOf(message: string): string {
+  const expected = message.split('expected ').slice(1).join('expected ') || message;
+  return expected.includes('header') || expected.includes('fill the cell')
+    ? (expected.split(';')[0] ?? expected)
+    : expected;
+}
 
 /** A reference to a name that is not there, while the other table has rows. */
 function checkReference(value: CellValue, known: readonly string[], what: string): Parsed {
@@ -105,6 +113,7 @@ export function inputColumns(table: EditableTable, context: ColumnContext): read
       },
       editText: (row) => cellEditText(valueOf(row, column.name)),
       describe: (row) => (workedOut(row) === undefined ? null : 'worked out from the heights'),
+      ...(column === columns[0] ? { firm: true } : {}),
       quiet: (row) => valueOf(row, column.name) === null,
       parse: (text, row) => parseCell(table, column, context, text, row),
       ...(choices === undefined ? {} : { choices }),

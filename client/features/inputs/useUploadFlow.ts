@@ -7,6 +7,7 @@ import { readTable } from '#shared/csv/readTable';
 
 import { sentenceOf } from '../../app/errorSentences.ts';
 import { useUpload } from '../../data/mutations.ts';
+import { columnSamples } from './columnSamples.ts';
 import { guessTable, inTableOrder } from './guessTable.ts';
 
 export type ColumnChoices = Readonly<Record<string, string | null>>;
@@ -33,6 +34,8 @@ export type ReadColumns = UploadAnswer['columns'];
 export interface UploadFlow {
   readonly state: UploadState;
   readonly columns: ReadColumns;
+  /** a few values under each head of the file, in its order */
+  readonly samples: readonly string[];
   /** rows of the file as read here, for the count in the words of a refusal */
   readonly rowCount: number;
   readonly waiting: readonly File[];
@@ -56,12 +59,15 @@ export function useUploadFlow(
   const [waiting, setWaiting] = useState<readonly File[]>([]);
   const [columns, setColumns] = useState<ReadColumns>([]);
   const [choices, setChoices] = useState<ColumnChoices>({});
+  const [samples, setSamples] = useState<readonly string[]>([]);
   const [rowCount, setRowCount] = useState(0);
 
   const check = async (file: File, table: EditableTable, wanted: ColumnChoices) => {
     setState({ step: 'checking', file, table });
     setChoices(wanted);
-    const reading = readTable(table, new Uint8Array(await file.arrayBuffer()), file.name, units, wanted);
+    const bytes = new Uint8Array(await file.arrayBuffer());
+    const reading = readTable(table, bytes, file.name, units, wanted);
+    setSamples(columnSamples(bytes, reading.delimiter));
     setColumns(reading.columns);
     setRowCount(reading.lines.length);
     const matched = Object.keys(wanted).length === 0 ? {} : { columns: wanted };
@@ -92,6 +98,7 @@ export function useUploadFlow(
   return {
     state,
     columns,
+    samples,
     rowCount,
     waiting,
     busy: upload.isPending,
