@@ -3,7 +3,7 @@ import { boxAround, type LabelBox } from './labelBoxes.ts';
 import { drawCenters } from './planCenters.ts';
 import { drawPlanLegend, drawSlab } from './planFurniture.ts';
 import { drawPlanLabels } from './planLabels.ts';
-import { planScale } from './planScale.ts';
+import { planScale, type PlanScale } from './planScale.ts';
 import { drawPlanWall, move, placeWall, polygon, strip, type PlacedWall } from './planWall.ts';
 import type { PlanInput, PlanPoint } from './planTypes.ts';
 import { round2 } from './round2.ts';
@@ -66,6 +66,17 @@ export function placePlanWalls(input: PlanInput): {
   };
 }
 
+/** The four edges of the slab: a label stands on one side of them. */
+function slabEdges({ slab: { left, right, top, bottom } }: PlanScale): LabelBox[] {
+  const corners = [
+    { x: left, y: top },
+    { x: right, y: top },
+    { x: right, y: bottom },
+    { x: left, y: bottom },
+  ];
+  return corners.map((corner, index) => boxAround([corner, corners[(index + 1) % 4] ?? corner], 1));
+}
+
 /** The plan of a story: walls to scale, both centers with their distance, the applied force, what each wall takes. */
 export function drawPlan(input: PlanInput): Drawing {
   const scale = planScale(input);
@@ -89,7 +100,7 @@ export function drawPlan(input: PlanInput): Drawing {
   const page = { left: 2, right: scale.width - 2, top: 0, bottom: scale.height - (scale.legendBelow ? 56 : 34) };
   const labels = drawPlanLabels(
     placed.map((one, index) => ({ placed: one, arrowed: (arrows[index]?.boxes.length ?? 0) > 0 })),
-    [...centers.boxes, ...force.boxes, ...wallBoxes, ...arrowBoxes],
+    [...centers.boxes, ...force.boxes, ...wallBoxes, ...arrowBoxes, ...slabEdges(scale)],
     page,
   );
   return {

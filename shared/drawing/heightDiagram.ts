@@ -9,6 +9,7 @@ import {
 import { heightScale, type HeightScale } from './heightScale.ts';
 import { roundTicks } from './roundTicks.ts';
 import { round2 } from './round2.ts';
+import { textWidth } from './textWidth.ts';
 
 const left = 8;
 const usable = 150;
@@ -91,15 +92,20 @@ function drawMarks(
   return [{ shape: 'circle', cx: xOf(value), cy: round2(y), r: 3.5, fill: 'sheet', stroke: 'ink', strokeWidth: 1.5 }];
 }
 
-/** Legend in the upper right, with the values of the chosen story; ground behind it, so that no line runs through. */
-function drawLegend(input: HeightDiagramInput): DrawingElement[] {
+/** Where the legend has its room: in the upper right, or beside a zero line that stands inside. */
+function legendSpan(zero: number): { readonly x: number; readonly right: number } {
+  if (zero <= 72) return { x: 84, right: heightDiagramWidth - 4 };
+  if (zero <= heightDiagramWidth / 2) return { x: zero + 12, right: heightDiagramWidth - 4 };
+  return { x: 4, right: zero - 12 };
+}
+
+/** Legend with the values of the chosen story; sheet behind it, so that no line runs through. */
+function drawLegend(input: HeightDiagramInput, zero: number): DrawingElement[] {
   if (input.curves.length === 0) return [];
-  const x = 84;
+  const { x, right } = legendSpan(zero);
   const top = 28;
   const height = 16 * input.curves.length + (input.chosenNote === '' ? 4 : 20);
-  const elements: DrawingElement[] = [
-    { shape: 'rect', x: x - 4, y: top, width: heightDiagramWidth - x + 4, height, fill: 'sheet', fillOpacity: 0.94 },
-  ];
+  const elements: DrawingElement[] = [{ shape: 'rect', x: x - 4, y: top, width: right - x + 8, height, fill: 'sheet' }];
   let y = top + 14;
   if (input.chosenNote !== '') {
     elements.push({ shape: 'text', x, y, text: input.chosenNote, size: 12, fill: 'graphite' });
@@ -111,7 +117,7 @@ function drawLegend(input: HeightDiagramInput): DrawingElement[] {
       { shape: 'text', x: x + 26, y, text: curve.name, size: 12, fill: 'ink' },
       {
         shape: 'text',
-        x: heightDiagramWidth - 4,
+        x: right,
         y,
         text: curve.text,
         size: 12,
@@ -128,11 +134,15 @@ function drawLegend(input: HeightDiagramInput): DrawingElement[] {
 function drawAxis(input: HeightDiagramInput, scale: HeightScale, values: ValueScale): DrawingElement[] {
   const elements: DrawingElement[] = [];
   const larger = Math.max(values.most, -values.least);
-  const ticks = roundTicks(larger).flatMap((tick) => [tick, -tick]);
+  const ticks = [...roundTicks(larger)].reverse().flatMap((tick) => [tick, -tick]);
+  const printed: { readonly x: number; readonly half: number }[] = [];
   for (const tick of [0, ...ticks.filter((value) => value >= values.least && value <= values.most)]) {
     const x = Math.floor(values.xOf(tick)) + 0.5;
+    const half = textWidth(input.tickText(tick), 11) / 2;
     if (tick !== 0)
       elements.push({ shape: 'line', x1: x, y1: scale.top, x2: x, y2: scale.bottom, stroke: 'rule', strokeWidth: 1 });
+    if (printed.some((other) => Math.abs(other.x - x) < other.half + half + 6)) continue;
+    printed.push({ x, half });
     const anchor = x < 16 ? 'start' : 'middle';
     elements.push({
       shape: 'text',
@@ -192,7 +202,7 @@ export function drawHeightDiagram(input: HeightDiagramInput): Drawing {
       ...drawAxis(input, scale, values),
       { shape: 'line', x1: zero, y1: scale.top, x2: zero, y2: scale.bottom, stroke: 'ink', strokeWidth: 1.5 },
       ...drawEnvelope(input, scale, values.xOf),
-      ...drawLegend(input),
+      ...drawLegend(input, zero),
       ...input.curves.map((curve): DrawingElement => ({
         shape: 'path',
         d: polyline(corners(curve.values, input, scale, values.xOf)),

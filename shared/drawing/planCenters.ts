@@ -6,6 +6,9 @@ import { round2 } from './round2.ts';
 import { textWidth } from './textWidth.ts';
 
 const closest = 24;
+/** px from the farther center to the dimension, in the order they are tried; beside: negative is at the left */
+const belowOffsets = [44, 68, 80, 92, 104, 116, 128, 32];
+const besideOffsets = [40, -56, -40, -76, 76, -96, 96, -120, 120];
 const rigidityName = 'center of rigidity';
 
 export interface Centers {
@@ -92,7 +95,7 @@ export function drawCenters(
   let best = build(56);
   const cost = (texts: readonly TextElement[]): number =>
     texts.reduce((sum, text) => sum + overlapArea(around(text), walls), 0);
-  for (const off of [44, 68, 80, 92, 104, 116, 128, 32]) {
+  for (const off of alongX >= closest ? belowOffsets : besideOffsets) {
     if (cost(best.texts) === 0) break;
     const next = build(off);
     if (cost(next.texts) < cost(best.texts)) best = next;
@@ -125,23 +128,28 @@ function dimensionBelow(input: PlanInput, mass: PlanPoint, rigidity: PlanPoint, 
 }
 
 function dimensionBeside(input: PlanInput, mass: PlanPoint, rigidity: PlanPoint, off: number, distance: number) {
-  const x = Math.max(mass.x, rigidity.x) + off;
+  const right = off > 0;
+  const x = right ? Math.max(mass.x, rigidity.x) + off : Math.min(mass.x, rigidity.x) + off;
+  const toward = right ? 1 : -1;
+  const anchor = right ? 'start' : 'end';
   const rigidityAbove = rigidity.y < mass.y;
   const [top, bottom] = rigidityAbove ? [rigidity.y, mass.y] : [mass.y, rigidity.y];
   const [topName, bottomName] = rigidityAbove ? [rigidityName, input.massName] : [input.massName, rigidityName];
   const unit = input.units === 'us' ? 'ft' : 'm';
   return {
     lines: [
-      dim(mass.x + 12, mass.y, x + 5, mass.y),
-      dim(rigidity.x + 13, rigidity.y, x + 5, rigidity.y),
+      dim(mass.x + 12 * toward, mass.y, x + 5 * toward, mass.y),
+      dim(rigidity.x + 13 * toward, rigidity.y, x + 5 * toward, rigidity.y),
       dim(x, top, x, bottom),
       tick(x, top),
       tick(x, bottom),
     ],
     texts: [
-      strong(note(`${formatPlanLength(distance, input.units)} ${unit}`, x + 8, (top + bottom) / 2 + 4, 'start')),
-      note(topName, x + 8, top - 6, 'start'),
-      note(bottomName, x + 8, bottom + 14, 'start'),
+      strong(
+        note(`${formatPlanLength(distance, input.units)} ${unit}`, x + 8 * toward, (top + bottom) / 2 + 4, anchor),
+      ),
+      note(topName, x + 8 * toward, top - 6, anchor),
+      note(bottomName, x + 8 * toward, bottom + 14, anchor),
     ],
   };
 }

@@ -103,51 +103,53 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
         { keys: ['W'], does: 'next wall' },
       ]}
     >
-      <div className="flex flex-wrap gap-3">
-        <Segments
-          label="Case"
-          options={chosen.cases.map((name) => ({ value: name, text: name }))}
-          value={chosen.case}
-          onChoose={(name) => choose({ case: name })}
-        />
-        {chosen.variants.length > 1 ? (
-          <Segments
-            label="Accidental eccentricity"
-            options={chosen.variants.map((one) => ({ value: one, text: sayVariant(one, accidental) }))}
-            value={chosen.variant}
-            onChoose={(variant) => choose({ variant })}
-          />
-        ) : null}
-      </div>
       <div className="grid gap-x-5 gap-y-4 min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
-        <Plan
-          input={{
-            units,
-            width: planWidth,
-            extent: level.extent,
-            walls: shares.walls.map((one) => ({
-              ...one.geometry,
-              name: one.wall,
-              thickness: one.geometry.thickness * perThickness,
-              direct: one.direct,
-              torsional: one.torsional,
-              total: one.total,
-              share: one.share,
-            })),
-            mass: level.point,
-            massName,
-            rigidity: level.rigidity,
-            force: {
-              x: shares.vx,
-              y: shares.vy,
-              text: `${formatForce(shares.size)} ${force}`,
-              note: `story shear, ${chosen.case}`,
-            },
-            chosenWall: wall,
-          }}
-          sayWall={sayWall}
-          onChooseWall={chooseWall}
-        />
+        <div>
+          <div className="flex flex-wrap gap-3">
+            <Segments
+              label="Case"
+              options={chosen.cases.map((name) => ({ value: name, text: name }))}
+              value={chosen.case}
+              onChoose={(name) => choose({ case: name })}
+            />
+            {chosen.variants.length > 1 ? (
+              <Segments
+                label="Accidental eccentricity"
+                options={chosen.variants.map((one) => ({ value: one, text: sayVariant(one, accidental) }))}
+                value={chosen.variant}
+                onChoose={(variant) => choose({ variant })}
+              />
+            ) : null}
+          </div>
+          <Plan
+            input={{
+              units,
+              width: planWidth,
+              extent: level.extent,
+              walls: shares.walls.map((one) => ({
+                ...one.geometry,
+                name: one.wall,
+                thickness: one.geometry.thickness * perThickness,
+                direct: one.direct,
+                torsional: one.torsional,
+                total: one.total,
+                share: one.share,
+              })),
+              mass: level.point,
+              massName,
+              rigidity: level.rigidity,
+              force: {
+                x: shares.vx,
+                y: shares.vy,
+                text: `${formatForce(shares.size)} ${force}`,
+                note: `story shear, ${chosen.case}`,
+              },
+              chosenWall: wall,
+            }}
+            sayWall={sayWall}
+            onChooseWall={chooseWall}
+          />
+        </div>
         <ShareTable
           shares={shares}
           units={units}

@@ -39,7 +39,7 @@ export function ShareTable({
               Rigidity<span className="u">{stiffness}</span>
             </th>
             <th className="num">
-              k/Σk<span className="u">of the story</span>
+              k/Σk<span className="u">of story</span>
             </th>
             <th className="num">
               Direct<span className="u">{force}</span>
@@ -51,7 +51,7 @@ export function ShareTable({
               Total<span className="u">{force}</span>
             </th>
             <th className="num">
-              Share<span className="u">of the story shear</span>
+              Share<span className="u">of story</span>
             </th>
           </tr>
         </thead>
@@ -65,7 +65,7 @@ export function ShareTable({
               <th scope="row">
                 <button
                   type="button"
-                  className="min-h-[24px] min-w-[24px] px-2 text-left font-medium hover:underline"
+                  className="-my-[2px] min-h-[24px] min-w-[24px] px-2 text-left font-medium hover:underline"
                   aria-pressed={wall.wall === chosenWall}
                   onClick={(event) => {
                     event.stopPropagation();

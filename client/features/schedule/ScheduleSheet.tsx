@@ -1,4 +1,4 @@
-import { useCallback, useMemo, useState, type ReactElement } from 'react';
+import { useCallback, useMemo, useState, type CSSProperties, type ReactElement } from 'react';
 
 import type { ResultDocument } from '#shared/contracts/result';
 import type { ScheduleResource, ScheduleResourceRow } from '#shared/contracts/schedule';
@@ -36,6 +36,11 @@ export interface ScheduleSheetProps {
 
 const rowId = (row: ScheduleResourceRow): string => row.id;
 const wallOf = (row: ScheduleResourceRow): string => row.wall;
+
+/** The grid takes what strip, head, toolbar and foot leave of the window. */
+const gridHeight: CSSProperties & Record<'--gw-grid-height', string> = {
+  '--gw-grid-height': 'calc(100vh - var(--strip) - var(--head) - var(--foot) - 56px)',
+};
 
 /** Edits of one commit by row: parts of one cell that were edited together become one whole cell. */
 export function mergeEdits(edits: readonly GridEdit[]): ReadonlyMap<string, OwnCells> {
@@ -110,50 +115,52 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
           {filter === 'over' ? 'No band is over a limit.' : 'No cell is overwritten.'}
         </p>
       ) : (
-        <DataGrid
-          name="Wall schedule"
-          columns={columns}
-          rows={rows}
-          rowId={rowId}
-          groupOf={wallOf}
-          renderGroupHead={(wall) => <WallHead wall={wall} rows={walls.rows} units={units} />}
-          renderGroupFoot={(wall) => (
-            <WallFoot
-              rows={schedule.rows.filter((row) => row.wall === wall)}
-              quantities={document.quantities.walls.find((one) => one.wall === wall)}
-              units={units}
-            />
-          )}
-          rowHeight={40}
-          rowState={(row) => ({ over: !row.ok })}
-          onCommit={(committed) => {
-            for (const [row, own] of mergeEdits(committed)) edits.send({ rowId: row, own });
-          }}
-          onClear={release}
-          onUndo={() => undo.mutate()}
-          reading={(row, columnId, draft) =>
-            isEditedColumn(columnId) ? (
-              <ScheduleReading
-                column={columnId}
-                draft={draft}
-                row={row}
-                rows={schedule.rows}
-                checks={document.checks}
-                levels={levelsOf(row).map((level) => level.level)}
+        <div style={gridHeight}>
+          <DataGrid
+            name="Wall schedule"
+            columns={columns}
+            rows={rows}
+            rowId={rowId}
+            groupOf={wallOf}
+            renderGroupHead={(wall) => <WallHead wall={wall} rows={walls.rows} units={units} />}
+            renderGroupFoot={(wall) => (
+              <WallFoot
+                rows={schedule.rows.filter((row) => row.wall === wall)}
+                quantities={document.quantities.walls.find((one) => one.wall === wall)}
                 units={units}
-                band={bandOf(row)}
-                input={input}
               />
-            ) : null
-          }
-          onFocusCell={(row, columnId) => {
-            setCell({ rowId: row, columnId });
-            const next = schedule.rows.find((one) => one.id === row);
-            if (next) choice.chooseRow(next);
-          }}
-          focusRowId={choice.row?.id ?? null}
-          readOnly={!canEdit}
-        />
+            )}
+            rowHeight={40}
+            rowState={(row) => ({ over: !row.ok })}
+            onCommit={(committed) => {
+              for (const [row, own] of mergeEdits(committed)) edits.send({ rowId: row, own });
+            }}
+            onClear={release}
+            onUndo={() => undo.mutate()}
+            reading={(row, columnId, draft) =>
+              isEditedColumn(columnId) ? (
+                <ScheduleReading
+                  column={columnId}
+                  draft={draft}
+                  row={row}
+                  rows={schedule.rows}
+                  checks={document.checks}
+                  levels={levelsOf(row).map((level) => level.level)}
+                  units={units}
+                  band={bandOf(row)}
+                  input={input}
+                />
+              ) : null
+            }
+            onFocusCell={(row, columnId) => {
+              setCell({ rowId: row, columnId });
+              const next = schedule.rows.find((one) => one.id === row);
+              if (next) choice.chooseRow(next);
+            }}
+            focusRowId={choice.row?.id ?? null}
+            readOnly={!canEdit}
+          />
+        </div>
       )}
     </>
   );

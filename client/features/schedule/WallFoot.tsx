@@ -28,9 +28,9 @@ export function WallFoot({ rows, quantities, units }: WallFootProps): ReactEleme
     <div className="w-full min-w-0">
       <div className="flex min-h-[32px] items-start gap-4 py-[6px] text-data">
         <span className="flex-none text-graphite">Notes</span>
-        <ul className="flex flex-wrap gap-x-4">
+        <ul className="flex flex-wrap overflow-hidden">
           {wallNotes(rows).map((note) => (
-            <li key={note.text} className="border-l border-line pl-4 first:border-l-0 first:pl-0">
+            <li key={note.text} className="-ml-[17px] border-l border-line pr-[33px] pl-4">
               {note.text}
               {note.where === null ? null : <span className="text-graphite">, {note.where}</span>}
             </li>

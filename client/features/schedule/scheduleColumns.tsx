@@ -1,3 +1,5 @@
+import type { ReactElement } from 'react';
+
 import { unitLabels } from '#shared/contracts/quantities';
 import type { ScheduleResourceRow } from '#shared/contracts/schedule';
 import type { UnitSystem } from '#shared/engineering/input';
@@ -25,6 +27,12 @@ export const sayGoverns = (row: Pick<ScheduleResourceRow, 'governs'>): string =>
 const readOnlyText = 'an input of the wall; change it in Inputs, Walls';
 const noParse: Column['parse'] = () => ({ ok: false, expected: 'no typing here' });
 
+/** Bar notation is read at arm's length: 15 px, 14 on narrower screens; what is none or does not apply stays quiet. */
+function Notation({ text }: { text: string }): ReactElement {
+  const quiet = text === 'none' || text === '–';
+  return <span className={`text-body min-[1400px]:text-bar ${quiet ? 'text-graphite' : ''}`}>{text}</span>;
+}
+
 function fixed(id: string, column: Pick<Column, 'header' | 'text' | 'width'> & Partial<Column>): Column {
   return { id, align: 'left', editable: false, parse: noParse, ...column };
 }
@@ -43,6 +51,7 @@ function edited(
     mono: true,
     editable: true,
     text: (row) => columnText(id, row, units),
+    render: (row) => <Notation text={columnText(id, row, units)} />,
     secondLine: (row) => (marked(row) ? auto(row) : null),
     state: (row) => ({ overwritten: marked(row) }),
     describe: (row) => (marked(row) ? `overwritten, ${auto(row)}` : null),
@@ -72,6 +81,7 @@ export function scheduleColumns(setting: ColumnSetting): readonly Column[] {
       mono: true,
       width: 44,
       text: (row) => formatBarLength(row.thickness, units),
+      render: (row) => <Notation text={formatBarLength(row.thickness, units)} />,
       describe: () => readOnlyText,
     }),
     fixed('fc', {
@@ -82,6 +92,7 @@ export function scheduleColumns(setting: ColumnSetting): readonly Column[] {
       mono: true,
       width: 62,
       text: (row) => formatNumber(row.fc, 0),
+      render: (row) => <Notation text={formatNumber(row.fc, 0)} />,
       describe: () => readOnlyText,
     }),
     edited('vertical', setting, {

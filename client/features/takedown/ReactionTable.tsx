@@ -67,7 +67,7 @@ export function ReactionTable(props: ReactionTableProps): ReactElement {
               <th scope="row">
                 <button
                   type="button"
-                  className="min-h-[24px] min-w-[24px] px-2 text-left font-medium hover:underline"
+                  className="-my-[2px] min-h-[24px] min-w-[24px] px-2 text-left font-medium hover:underline"
                   aria-pressed={one.wall === chosenWall}
                   onClick={(event) => {
                     event.stopPropagation();

@@ -67,7 +67,7 @@ function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactE
   const accidental = useBuilding(id).data?.accidental ?? 0;
   const down = levelsDown(document);
   const stories = wallStories(document, down, wall, chosen);
-  const reactions = baseReactions(document, down, chosen);
+  const reactions = baseReactions(document, down, names, chosen);
   const chooseWall = (name: string): void => choose({ wall: name });
   useWallKey(names, wall, chooseWall);
   const cases = chosen.cases.map((name) => {

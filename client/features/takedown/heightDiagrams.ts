@@ -2,7 +2,7 @@ import { unitLabels } from '#shared/contracts/quantities';
 import type { ResultDocument, ResultLevel } from '#shared/contracts/result';
 import type { HeightDiagramInput } from '#shared/drawing/heightDiagramTypes';
 import { forceDecimals, formatForce, formatMoment } from '#shared/format/force';
-import { formatNumber } from '#shared/format/number';
+import { formatAsListed } from '#shared/format/number';
 
 import type { ResultChoice } from '../../components/drawing/resultChoice.ts';
 import { caseEnvelope, gravityCases, type Force, type WallStory } from './wallStories.ts';
@@ -13,7 +13,7 @@ interface Diagram {
   readonly input: HeightDiagramInput;
 }
 
-const tickText = (value: number): string => formatNumber(value, Math.abs(value) >= 10 || value === 0 ? 0 : 1);
+const tickText = (value: number): string => formatAsListed(value, 1);
 
 /** Axial (dead, and all gravity), shear and moment of the case in view with the envelope of its variants behind. */
 export function heightDiagrams(
@@ -52,7 +52,7 @@ export function heightDiagrams(
         curves: [
           { name: 'D', style: 'solid', values: dead, text: print(dead[at], (v) => formatForce(v, axialDecimals)) },
           {
-            name: 'D + L + Lr + S',
+            name: 'all gravity',
             style: 'dashed',
             values: all,
             text: print(all[at], (v) => formatForce(v, axialDecimals)),

@@ -9,10 +9,11 @@ import { gravityCases, wallBases, type GravityCase } from './wallStories.ts';
 export function baseReactions(
   document: ResultDocument,
   down: readonly ResultLevel[],
+  names: readonly string[],
   chosen: ResultChoice,
 ): readonly Reaction[] {
   const lowest = down.at(-1)?.level;
-  return wallBases(document, down).map(({ wall, level }) => {
+  return wallBases(document, down, names).map(({ wall, level }) => {
     const gravity = { D: 0, L: 0, Lr: 0, S: 0 } satisfies Record<GravityCase, number>;
     for (const one of document.gravity) {
       const name = gravityCases.find((candidate) => candidate === one.case);

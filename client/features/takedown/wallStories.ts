@@ -78,10 +78,11 @@ export function caseEnvelope(
   });
 }
 
-/** Walls in the order of the result, each with the lowest story that it stands in. */
+/** Walls in the order of their names, each with the lowest story that it stands in. */
 export function wallBases(
   document: ResultDocument,
   down: readonly ResultLevel[],
+  names: readonly string[],
 ): readonly { readonly wall: string; readonly level: string }[] {
   const place = new Map(down.map((level, index) => [level.level, index]));
   const lowest = new Map<string, string>();
@@ -89,5 +90,8 @@ export function wallBases(
     const before = lowest.get(wall);
     if (before === undefined || (place.get(level) ?? 0) > (place.get(before) ?? 0)) lowest.set(wall, level);
   }
-  return [...lowest].map(([wall, level]) => ({ wall, level }));
+  return names.flatMap((wall) => {
+    const level = lowest.get(wall);
+    return level === undefined ? [] : [{ wall, level }];
+  });
 }
