@@ -17,7 +17,11 @@ export function toHttpError(error: unknown): HttpError | null {
   const type = textOf(error, 'type');
   const code = textOf(error, 'code');
   if (type === 'entity.too.large' || code === 'LIMIT_FILE_SIZE') {
-    return new HttpError(413, 'too-large', 'The request is larger than 8 MB. Send the table in a smaller file.');
+    return new HttpError(
+      413,
+      'too-large',
+      'The request is too large. Expected: a file of at most 8 MB, JSON of at most 16 MB.',
+    );
   }
   const status = textOf(error, 'status') ?? textOf(error, 'statusCode');
   if (typeof status === 'number' && status >= 400 && status < 500) {

@@ -1,3 +1,4 @@
+import { checkExpression } from '#shared/combination-text/checkExpression';
 import type { ApiProblem } from '#shared/contracts/errors';
 import { tableColumns, type Column, type EditableTable } from '#shared/contracts/tableColumns';
 import type { CellValue } from '#shared/contracts/tables';
@@ -59,7 +60,7 @@ export function readRow(
   const cells: Record<string, CellValue> = {};
   const problems: ApiProblem[] = [];
   for (const column of columnsOf(table)) {
-    const reading = readCell(column, given[column.name] ?? null);
+    const reading = readOf(table, column, given[column.name] ?? null);
     if (reading.ok) cells[column.name] = reading.value;
     else problems.push({ table, row, column: column.name, message: reading.message });
   }
@@ -75,5 +76,13 @@ export function readRow(
 export function readNamedCell(table: EditableTable, name: string, value: CellValue): CellReading {
   const column = columnsOf(table).find((one) => one.name === name);
   if (column === undefined) return { ok: false, message: `${name} is no column of ${table}` };
-  return readCell(column, value);
+  return readOf(table, column, value);
+}
+
+/** Texts of combinations are read at once: a text that can't be read is a fault of its cell. */
+function readOf(table: EditableTable, column: Column, value: CellValue): CellReading {
+  const reading = readCell(column, value);
+  if (!reading.ok || table !== 'combinations' || column.name !== 'expression') return reading;
+  const fault = checkExpression(String(reading.value));
+  return fault === null ? reading : { ok: false, message: fault };
 }
