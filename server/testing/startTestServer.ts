@@ -22,6 +22,8 @@ export interface TestServer {
   as(key: TestKey): Agent;
   /** not signed in, sends the header */
   nobody(): Agent;
+  /** a new process on the same database, with nothing in memory; everybody signs in anew */
+  restart(): Promise<(key: TestKey) => Agent>;
   close(): Promise<void>;
 }
 
@@ -59,44 +61,52 @@ export async function startTestServer(options: TestServerOptions = {}): Promise<
     longestHoldMs: 1000,
   });
   await addPeople(gate);
-  const app = createApp({
-    gate,
-    now: () => new Date().toISOString(),
-    newId: () => newId(),
-    hasher,
-    sessionSecret: secret,
-    overTls: options.overTls ?? false,
-    signInLimit: options.signInLimit ?? { windowSeconds: 60, perAccount: 1000, perAddress: 1000 },
-    logger: pino({ level: 'silent' }),
-    runner: options.runner ?? inlineRunner(),
-    resultFolder: null,
-    engineBuild: 'tests',
-    pagesRoot: options.pagesRoot ?? null,
-  });
-  const agents = new Map<TestKey, Agent>();
-  const nobody = (): Agent => {
-    const agent = request.agent(app.express);
-    agent.set('X-Requested-With', 'groundward');
-    return agent;
+  const start = async (): Promise<{ app: App; nobody: () => Agent; agents: ReadonlyMap<TestKey, Agent> }> => {
+    const app = createApp({
+      gate,
+      now: () => new Date().toISOString(),
+      newId: () => newId(),
+      hasher,
+      sessionSecret: secret,
+      overTls: options.overTls ?? false,
+      signInLimit: options.signInLimit ?? { windowSeconds: 60, perAccount: 1000, perAddress: 1000 },
+      logger: pino({ level: 'silent' }),
+      runner: options.runner ?? inlineRunner(),
+      resultFolder: null,
+      engineBuild: 'tests',
+      pagesRoot: options.pagesRoot ?? null,
+    });
+    const nobody = (): Agent => {
+      const agent = request.agent(app.express);
+      agent.set('X-Requested-With', 'groundward');
+      return agent;
+    };
+    const agents = new Map<TestKey, Agent>();
+    for (const { key } of testPeople) {
+      const agent = nobody();
+      await agent
+        .post('/api/session')
+        .send({ email: addressOf(key), password: testPassword })
+        .expect(200);
+      agents.set(key, agent);
+    }
+    return { app, nobody, agents };
   };
-  for (const { key } of testPeople) {
-    const agent = nobody();
-    await agent
-      .post('/api/session')
-      .send({ email: addressOf(key), password: testPassword })
-      .expect(200);
-    agents.set(key, agent);
-  }
+  const pick =
+    (agents: ReadonlyMap<TestKey, Agent>) =>
+    (key: TestKey): Agent => {
+      const agent = agents.get(key);
+      if (agent === undefined) throw new Error(`nobody is called ${key}`);
+      return agent;
+    };
+  const { app, nobody, agents } = await start();
   return {
     app,
     database,
     gate,
     nobody,
-    as: (key) => {
-      const agent = agents.get(key);
-      if (agent === undefined) throw new Error(`nobody is called ${key}`);
-      return agent;
-    },
+    as: pick(agents),
+    restart: async () => pick((await start()).agents),
     close: async () => {
       await gate.close();
       await database.drop();
