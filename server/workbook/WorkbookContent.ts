@@ -7,6 +7,6 @@ export interface WorkbookContent {
   readonly document: ResultDocument;
   readonly settings: Settings;
   readonly rows: readonly ScheduleResourceRow[];
-  /** as it is to be printed, for example `2026-03-04 15:20 UTC` */
+  /** ISO time in UTC, or text that is printed as it is */
   readonly printedAt: string;
 }

@@ -1,6 +1,7 @@
 import type { Workbook, Worksheet } from 'exceljs';
 
 import { caution } from './caution.ts';
+import { printedTime } from './printedTime.ts';
 import { addPrintableSheet } from './pageSetup.ts';
 import { alignments, fonts, headFill, inkRule } from './workbookStyle.ts';
 import type { WorkbookContent } from './WorkbookContent.ts';
@@ -34,7 +35,12 @@ export function addDataSheet<Row>(
   });
 
   const { settings, printedAt } = content;
-  titleCell(sheet, 1, [name, settings.name, settings.number, printedAt].filter(Boolean).join('   '), fonts.mark);
+  titleCell(
+    sheet,
+    1,
+    [name, settings.name, settings.number, printedTime(printedAt)].filter(Boolean).join('   '),
+    fonts.mark,
+  );
   titleCell(sheet, 2, caution, fonts.caution);
   sheet.getRow(1).height = 20;
 

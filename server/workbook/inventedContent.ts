@@ -92,9 +92,7 @@ function inventedRow(
     splice: 'lap' as const,
   };
   const notes =
-    place === 0
-      ? ['Horizontals hooked 90 degrees at the ends', 'End zone stops at the upper limit of the next band']
-      : [];
+    place === 0 ? ['Horizontals hooked 90 degrees at the ends', `Base of ${wall}: see the footing plan`] : [];
   const ratio = over ? 1.00042 : 0.3 + 0.6180339887 / (place + 1.1 + wallIndex / 7);
   const automatic = { vertical, horizontal, ends, ties, laps, notes };
   return {
@@ -243,5 +241,5 @@ export function inventedContent(units: UnitSystem, walls = 5, levels = 8): Workb
       })),
     ),
   };
-  return { document, settings: settings(units), rows, printedAt: '2026-03-04 15:20 UTC' };
+  return { document, settings: settings(units), rows, printedAt: '2026-03-04T15:20:07.123Z' };
 }

@@ -6,7 +6,10 @@ import type { WorkbookContent } from './WorkbookContent.ts';
 /** Codes of the paper list of ECMA-376 18.3.1.63: 3 tabloid, 8 A3. */
 const paperSizes: Readonly<Record<'us' | 'si', number>> = { us: 3, si: 8 };
 
-/** `&` starts a code in a sheet's foot; doubled it prints as itself. Cut short: a foot holds 255 characters. */
+/**
+ * `&` starts a code in a sheet's foot; doubled it prints as itself. Cut short: a foot holds 255 characters. The space after a
+ * size keeps a number that begins with a digit apart from it.
+ */
 const inFoot = (text: string): string => text.slice(0, 20).replaceAll('&', '&&');
 
 /** A sheet that prints on tabloid or A3 landscape, one page wide, with frozen and repeated heads and the caution in its foot. */
@@ -31,7 +34,7 @@ export function addPrintableSheet(
       printTitlesRow: `${String(heads.repeatFrom)}:${String(heads.rows)}`,
     },
     headerFooter: {
-      oddFooter: `&L&8${caution}&R&8${[settings.number, name].map(inFoot).filter(Boolean).join('  ')}  &P / &N`,
+      oddFooter: `&L&8 ${caution}&R&8 ${[settings.number, name].map(inFoot).filter(Boolean).join('  ')}  &P / &N`,
     },
   });
 }

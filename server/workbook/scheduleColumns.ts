@@ -22,7 +22,7 @@ export interface ScheduleColumn {
 }
 
 /** Columns of the printed schedule, in the order in which a drafter reads a row. */
-export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
+export function scheduleColumns(units: UnitSystem, noteKey: ReadonlyMap<string, number>): readonly ScheduleColumn[] {
   const unit = resultUnits[units];
   const bars = units === 'us' ? 'size @ in' : 'size @ mm';
   return [
@@ -35,7 +35,7 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       look: 'text',
       value: (row) => printLevelRange(row.from, row.to),
     },
-    { group: '', head: 'Limits', unit: 'of the band', width: 16, look: 'quiet', value: (row) => row.levels },
+    { group: '', head: 'Limits', unit: 'of the band', width: 21, look: 'quiet', value: (row) => row.levels },
     {
       group: 'Wall',
       head: 't',
@@ -167,15 +167,15 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       look: 'notation',
       value: (row) => printDowels(row.dowels, units),
     },
-    { group: 'At the limits', head: 'Joint', unit: 'surface', width: 10, look: 'text', value: (row) => row.joint },
+    { group: 'At the limits', head: 'Joint', unit: 'surface', width: 15, look: 'text', value: (row) => row.joint },
     {
       group: '',
       head: 'Notes',
-      unit: 'drawing notes, overwritten cells',
-      width: 32,
+      unit: 'numbers: below the schedule',
+      width: 28,
       look: 'quiet',
       cell: 'notes',
-      value: (row) => printNotes(row, units),
+      value: (row) => printNotes(row, noteKey, units),
     },
     {
       group: 'Checks',
@@ -189,7 +189,7 @@ export function scheduleColumns(units: UnitSystem): readonly ScheduleColumn[] {
       group: 'Checks',
       head: 'Governs',
       unit: 'check, level, clause; combination',
-      width: 30,
+      width: 40,
       look: 'quiet',
       value: printGoverns,
     },

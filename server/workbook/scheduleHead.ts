@@ -1,6 +1,7 @@
 import type { Cell, Worksheet } from 'exceljs';
 
 import { caution } from './caution.ts';
+import { printedTime } from './printedTime.ts';
 import { codeNames, loadNames, unitSystemNames } from './resultUnits.ts';
 import type { ScheduleColumn } from './scheduleColumns.ts';
 import { scheduleLegend } from './scheduleLegend.ts';
@@ -20,7 +21,7 @@ const fields = (content: WorkbookContent): readonly (readonly [string, string, n
   ['Units', unitSystemNames[content.document.units], 11, 11],
   ['Bases of distribution', content.document.basis.join(', '), 12, 15],
   ['Engine', content.document.engine, 16, 18],
-  ['Printed', content.printedAt, 19, 20],
+  ['Printed', printedTime(content.printedAt), 19, 20],
 ];
 
 /** Writes title, title block, caution, legend and the repeated column heads. */

@@ -7,17 +7,20 @@ import { listedFormat } from './listedFormat.ts';
 import { addPrintableSheet } from './pageSetup.ts';
 import type { ScheduleColumn } from './scheduleColumns.ts';
 import { scheduleColumns } from './scheduleColumns.ts';
+import { numberNotes } from './scheduleText.ts';
 import { scheduleHeadRows, scheduleRepeatFrom, writeScheduleHead } from './scheduleHead.ts';
 import { ratioFormat } from './ratioFormat.ts';
 import { alignments, fonts, hairline, hatch, inkRule, ochreBar } from './workbookStyle.ts';
 import type { WorkbookContent } from './WorkbookContent.ts';
 
 const lineHeight = 12;
-const leastHeight = 18;
+const leastHeight = 20;
 
 /** The sheet that goes to the drafter: one row a band, the top band first, one block a wall. */
 export function addScheduleSheet(workbook: Workbook, content: WorkbookContent): Worksheet {
-  const columns = scheduleColumns(content.document.units);
+  const rows = inReadingOrder(content);
+  const noteKey = numberNotes(rows);
+  const columns = scheduleColumns(content.document.units, noteKey);
   const sheet = addPrintableSheet(workbook, content, 'Wall schedule', {
     rows: scheduleHeadRows,
     columns: 2,
@@ -30,7 +33,7 @@ export function addScheduleSheet(workbook: Workbook, content: WorkbookContent): 
 
   let position = scheduleHeadRows;
   let wall: string | null = null;
-  for (const row of inReadingOrder(content)) {
+  for (const row of rows) {
     position += 1;
     writeRow(sheet, position, columns, row, row.wall !== wall);
     wall = row.wall;
@@ -40,7 +43,23 @@ export function addScheduleSheet(workbook: Workbook, content: WorkbookContent): 
     const cell = sheet.getCell(position, column);
     cell.border = { ...cell.border, bottom: inkRule };
   }
+  writeNotes(sheet, position + 2, columns.length, noteKey);
   return sheet;
+}
+
+/** The numbered notes, after an empty row, so that whoever reads rows by their wall stops before them. */
+function writeNotes(sheet: Worksheet, from: number, columns: number, noteKey: ReadonlyMap<string, number>): void {
+  if (noteKey.size === 0) return;
+  const head = sheet.getCell(from, 2);
+  head.value = 'Notes';
+  head.font = fonts.head;
+  for (const [note, number] of noteKey) {
+    sheet.mergeCells(from + number, 2, from + number, columns);
+    const cell = sheet.getCell(from + number, 2);
+    cell.value = `${String(number)}  ${note}`;
+    cell.font = fonts.data;
+    cell.alignment = alignments.line;
+  }
 }
 
 /** Walls as they come, the bands of each from the top down. */
@@ -100,6 +119,6 @@ function dress(cell: Cell, column: ScheduleColumn, row: ScheduleResourceRow, fir
 
 /** Lines that a wrapped text takes in its column; a quiet character is narrower than the column's measure. */
 function countLines(text: string, column: ScheduleColumn): number {
-  const fit = Math.max(1, Math.floor(column.width * 1.05));
+  const fit = Math.max(1, Math.floor(column.width * 0.95));
   return text.split('\n').reduce((sum, part) => sum + Math.max(1, Math.ceil(part.length / fit)), 0);
 }

@@ -48,14 +48,27 @@ export function printAutomatic(row: ScheduleResourceRow, cell: OverwritableCell,
   return automatic.notes.length === 0 ? 'none' : automatic.notes.join('; ');
 }
 
-/** Drawing notes of a row, then what was not designed and what a person overwrote, one a line. */
-export function printNotes(row: ScheduleResourceRow, units: UnitSystem): string {
-  const lines = [...row.notes];
+/**
+ * Numbers of the notes that stand below the schedule, then what concerns this row alone: its own notes, what was not designed,
+ * what a person overwrote and why; one a line.
+ */
+export function printNotes(row: ScheduleResourceRow, key: ReadonlyMap<string, number>, units: UnitSystem): string {
+  const numbers = row.notes.flatMap((note) => key.get(note) ?? []);
+  const lines = numbers.length === 0 ? [] : [numbers.join(', ')];
+  lines.push(...row.notes.filter((note) => !key.has(note)));
   if (row.trim !== null) lines.push(`Trim: ${row.trim}`);
   if (row.notDesigned.length > 0) lines.push(`Not designed: ${row.notDesigned.join(', ')}`);
   for (const cell of row.overwritten) lines.push(`Overwritten: ${cell}, auto ${printAutomatic(row, cell, units)}`);
   if (row.reason !== null && row.reason !== '') lines.push(`Reason: ${row.reason}`);
   return lines.length === 0 ? dash : lines.join('\n');
+}
+
+/** Notes that more than one row carries, numbered in the order in which they first occur. */
+export function numberNotes(rows: readonly ScheduleResourceRow[]): ReadonlyMap<string, number> {
+  const counts = new Map<string, number>();
+  for (const note of rows.flatMap((row) => [...new Set(row.notes)])) counts.set(note, (counts.get(note) ?? 0) + 1);
+  const shared = [...counts].filter(([, count]) => count > 1);
+  return new Map(shared.map(([note], index) => [note, index + 1]));
 }
 
 /** `shear L5`, its clause and the combination below. */

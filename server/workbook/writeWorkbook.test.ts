@@ -23,7 +23,7 @@ const sheetOf = (workbook: ExcelJS.Workbook, name: string): Worksheet => {
 
 function cellsBelow(sheet: Worksheet, headRow: number, columns: number): Cells[] {
   const rows: Cells[] = [];
-  for (let row = headRow + 1; row <= sheet.rowCount; row += 1) {
+  for (let row = headRow + 1; row <= sheet.rowCount && sheet.getCell(row, 1).value !== null; row += 1) {
     const values = Array.from({ length: columns }, (_, index) => sheet.getCell(row, index + 1).value);
     rows.push(values.map((value) => (typeof value === 'object' ? JSON.stringify(value) : (value as string))));
   }
@@ -133,6 +133,15 @@ describe.each(['us', 'si'] as const)('writeWorkbook in %s', (units) => {
     expect(sheet.getCell(row, 21).value).toBe(1.00042);
     expect(sheet.getCell(row, 21).numFmt).toBe('0.0000');
     expect(sheet.getCell(row - 1, 23).fill).not.toMatchObject({ pattern: 'lightUp' });
+  });
+
+  it('numbers the notes that rows share and lists them below, and keeps a row’s own note with it', () => {
+    const sheet = sheetOf(workbook, 'Wall schedule');
+    expect(sheet.getCell(8 + 4, 20).value).toBe('1\nBase of W1: see the footing plan');
+    const below = 8 + content.rows.length + 2;
+    expect(sheet.getCell(below, 2).value).toBe('Notes');
+    expect(sheet.getCell(below + 1, 2).value).toBe('1  Horizontals hooked 90 degrees at the ends');
+    expect(sheet.headerFooter.oddFooter).toContain('&R&8 GW-0417');
   });
 
   it('carries shares and rigidities unrounded', () => {
