@@ -106,7 +106,7 @@ function drawChosen(input: StackInput, scale: HeightScale): { under: DrawingElem
   const height = round2(bottom - top);
   const under: DrawingElement = { shape: 'rect', x: 0, y: top, width: stackWidth, height, fill: 'choose' };
   const over: DrawingElement = input.range
-    ? { shape: 'path', d: `M7 ${top + 1.25}H1.25V${bottom - 1.25}H7`, fill: 'none', stroke: 'ink', strokeWidth: 2.5 }
+    ? { shape: 'path', d: `M1 ${top + 1.25}H-4.75V${bottom - 1.25}H1`, fill: 'none', stroke: 'ink', strokeWidth: 2.5 }
     : {
         shape: 'rect',
         x: 0.75,

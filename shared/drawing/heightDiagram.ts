@@ -131,10 +131,20 @@ function drawLegend(input: HeightDiagramInput, zero: number): DrawingElement[] {
   return elements;
 }
 
+/** Round ticks, every other one where their figures would touch. */
+function ticksWithRoom(input: HeightDiagramInput, larger: number, values: ValueScale): readonly number[] {
+  const ticks = roundTicks(larger);
+  const [first, last] = [ticks[0], ticks.at(-1)];
+  if (first === undefined || last === undefined) return [];
+  const apart = values.xOf(first) - values.xOf(0);
+  const widest = textWidth(input.tickText(last), 11) + 8;
+  return apart >= widest ? ticks : ticks.filter((_, index) => index % 2 === 1);
+}
+
 function drawAxis(input: HeightDiagramInput, scale: HeightScale, values: ValueScale): DrawingElement[] {
   const elements: DrawingElement[] = [];
   const larger = Math.max(values.most, -values.least);
-  const ticks = [...roundTicks(larger)].reverse().flatMap((tick) => [tick, -tick]);
+  const ticks = ticksWithRoom(input, larger, values).flatMap((tick) => [tick, -tick]);
   const printed: { readonly x: number; readonly half: number }[] = [];
   for (const tick of [0, ...ticks.filter((value) => value >= values.least && value <= values.most)]) {
     const x = Math.floor(values.xOf(tick)) + 0.5;

@@ -16,7 +16,7 @@ export function DrawingSvg({ drawing }: { drawing: Drawing }): ReactElement {
       height={height}
       viewBox={`0 0 ${width} ${height}`}
       aria-hidden="true"
-      className="block max-w-none"
+      className="block max-w-none overflow-visible"
     >
       <defs>
         <HatchPattern id={`${id}hatch-ink`} color="var(--ink)" size={4} stripe={1.5} />

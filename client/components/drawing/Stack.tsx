@@ -64,31 +64,33 @@ export function Stack(props: StackProps): ReactElement {
         <span>{caption}</span>
         <span>{limit === undefined ? unit : `limit ${limit.toFixed(2)}`}</span>
       </figcaption>
-      <div ref={field} className="relative overflow-x-hidden overflow-y-auto" style={{ maxHeight: columnHeight }}>
-        <DrawingSvg drawing={drawing} />
-        <div
-          role="listbox"
-          aria-label="Stories"
-          tabIndex={0}
-          aria-activedescendant={at < 0 ? undefined : `${id}-${at}`}
-          onKeyDown={onKeyDown}
-          onMouseLeave={() => setHovered(null)}
-          className="absolute inset-x-0 outline-offset-2 outline-ink focus-visible:outline-2"
-          style={{ top: scale.top, height: scale.bottom - scale.top }}
-        >
-          {stories.map((story, index) => (
-            <div
-              key={story.level}
-              id={`${id}-${index}`}
-              role="option"
-              aria-selected={story.level === chosen}
-              aria-label={sayStory(story, unit)}
-              className="absolute inset-x-0 cursor-pointer"
-              style={boxStyle(scale.boxes[index], scale.top)}
-              onClick={() => onChoose(story.level)}
-              onMouseEnter={() => setHovered(story.level)}
-            />
-          ))}
+      <div ref={field} className="-ml-2 overflow-x-hidden overflow-y-auto pl-2" style={{ maxHeight: columnHeight }}>
+        <div className="relative">
+          <DrawingSvg drawing={drawing} />
+          <div
+            role="listbox"
+            aria-label="Stories"
+            tabIndex={0}
+            aria-activedescendant={at < 0 ? undefined : `${id}-${at}`}
+            onKeyDown={onKeyDown}
+            onMouseLeave={() => setHovered(null)}
+            className="absolute inset-x-0 outline-offset-2 outline-ink focus-visible:outline-2"
+            style={{ top: scale.top, height: scale.bottom - scale.top }}
+          >
+            {stories.map((story, index) => (
+              <div
+                key={story.level}
+                id={`${id}-${index}`}
+                role="option"
+                aria-selected={story.level === chosen}
+                aria-label={sayStory(story, unit)}
+                className="absolute inset-x-0 cursor-pointer"
+                style={boxStyle(scale.boxes[index], scale.top)}
+                onClick={() => onChoose(story.level)}
+                onMouseEnter={() => setHovered(story.level)}
+              />
+            ))}
+          </div>
         </div>
       </div>
     </figure>

@@ -11,10 +11,12 @@ export function DriftNote({ warnings }: { warnings: readonly Warning[] }): React
     <Section title="Drift">
       <p className="mt-2 font-medium">Drift: not available</p>
       <p className="mt-1 max-w-[68ch] text-data text-graphite">
-        Drift, torsion ratio and stability come only from the solution over the whole height of the building. A basis
-        that shares each story by relative rigidity gives shares of force and no displacement.
+        {warning?.message ??
+          'Drift, torsion ratio and stability come only from the solution over the whole height of the building.'}
       </p>
-      {warning ? <p className="mt-1 max-w-[68ch] text-data text-graphite">{warning.message}</p> : null}
+      <p className="mt-1 max-w-[68ch] text-data text-graphite">
+        Sharing each story by relative rigidity gives shares of force and no displacement.
+      </p>
     </Section>
   );
 }

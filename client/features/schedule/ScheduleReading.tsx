@@ -51,7 +51,8 @@ export function ScheduleReading(props: ScheduleReadingProps): ReactElement | nul
       )}
       <span data-preview={preview === null ? 'waiting' : 'computed'}>
         <b>{sayGoverns(row)}</b>
-        {row.ratio === null ? '–' : formatRatio(row.ratio)} → {preview === null ? '…' : sayAfter(preview)}
+        {row.ratio === null ? '–' : formatRatio(row.ratio)} →{' '}
+        {preview === null ? '…' : preview === 'not computed' ? preview : sayAfter(preview)}
       </span>
       <span>
         <b>auto</b>

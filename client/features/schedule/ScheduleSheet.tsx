@@ -1,10 +1,11 @@
-import { useCallback, useMemo, useState, type CSSProperties, type ReactElement } from 'react';
+import { useCallback, useMemo, useRef, useState, type CSSProperties, type ReactElement } from 'react';
 
 import type { ResultDocument } from '#shared/contracts/result';
 import type { ScheduleResource, ScheduleResourceRow } from '#shared/contracts/schedule';
 import type { TableResource } from '#shared/contracts/tables';
 import type { OwnCells } from '#shared/engineering/wall-design/designTypes';
 import { printLevelRange } from '#shared/format/levelRange';
+import { formatRatio } from '#shared/format/ratio';
 
 import { sentenceOf } from '../../app/errorSentences.ts';
 import { useCanEdit } from '../../app/useCanEdit.ts';
@@ -14,6 +15,7 @@ import { useUndo } from '../../data/mutations.ts';
 import { useBuildingInput } from '../../engine/useBuildingInput.ts';
 import { editedColumns, isEditedColumn } from './cellText.ts';
 import { ConflictNote } from './ConflictNote.tsx';
+import { Leaders } from './Leaders.tsx';
 import { OrphanNotes } from './OrphanNotes.tsx';
 import type { BandElevations } from './parseColumn.ts';
 import { scheduleColumns } from './scheduleColumns.tsx';
@@ -68,6 +70,7 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
     [down],
   );
   const columns = useMemo(() => scheduleColumns({ units, bandOf }), [units, bandOf]);
+  const host = useRef<HTMLDivElement>(null);
   const focused = cell === null ? null : (schedule.rows.find((row) => row.id === cell.rowId) ?? null);
   const release = (row: string, columnId: string): void => {
     const stored = schedule.rows.find((one) => one.id === row);
@@ -94,7 +97,7 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
       ) : null}
       {edits.alsoChanged.length > 0 ? (
         <p role="status" className="mb-2 text-data">
-          Verdicts that changed with this edit: {edits.alsoChanged.map(sayRow).join('; ')}.
+          Changed with this edit: {edits.alsoChanged.map(sayRow).join('; ')}.
         </p>
       ) : null}
       {edits.conflict ? (
@@ -115,7 +118,8 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
           {filter === 'over' ? 'No band is over a limit.' : 'No cell is overwritten.'}
         </p>
       ) : (
-        <div style={gridHeight}>
+        <div ref={host} className="relative" style={gridHeight}>
+          <Leaders host={host} rows={rows} wall={choice.wall} chosenRowId={choice.row?.id ?? null} down={down} />
           <DataGrid
             name="Wall schedule"
             columns={columns}
@@ -167,4 +171,4 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
 }
 
 const sayRow = (row: ScheduleResourceRow): string =>
-  `${row.wall} ${printLevelRange(row.from, row.to)} ${row.ok ? 'within' : 'over'}`;
+  `${row.wall} ${printLevelRange(row.from, row.to)}, ${row.ratio === null ? '–' : formatRatio(row.ratio)}${row.ok ? '' : ' over'}`;

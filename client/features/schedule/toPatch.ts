@@ -1,6 +1,6 @@
 import type { SchedulePatch } from '#shared/contracts/schedule';
 
-import type { ScheduleChange } from './useScheduleEdits.ts';
+import type { ScheduleChange } from './scheduleChange.ts';
 
 /** Whole cells, never text; arrays copied, since the contract's types are writable. */
 export function toPatch({ own = {}, release }: ScheduleChange, version: number): SchedulePatch {

@@ -21,17 +21,21 @@ export function usePreview(
   rows: readonly ScheduleResourceRow[],
   row: ScheduleResourceRow,
   own: OwnCells | null,
-): Preview | null {
+): Preview | 'not computed' | null {
   // the text stands for the cells: it stays the same while they do
   const text = own === null ? null : canonicalText(own);
-  const [answer, setAnswer] = useState<{ text: string; rowId: string; preview: Preview } | null>(null);
+  const [answer, setAnswer] = useState<{ text: string; rowId: string; preview: Preview | 'not computed' } | null>(null);
   useEffect(() => {
     const client = text === null || !input ? null : engine('preview');
     if (!client || !input || text === null) return undefined;
     let current = true;
     const typed = JSON.parse(text) as OwnCells;
     void client.run(input, { pinned: pinnedWith(rows, row.id, typed) }).then((outcome) => {
-      if (!current || outcome.kind !== 'computed') return;
+      if (!current || outcome.kind === 'superseded') return;
+      if (outcome.kind !== 'computed') {
+        setAnswer({ text, rowId: row.id, preview: 'not computed' });
+        return;
+      }
       const after = outcome.document.schedule.find(
         (one) => one.wall === row.wall && one.from === row.from && one.to === row.to,
       );

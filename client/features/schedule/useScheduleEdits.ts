@@ -2,19 +2,13 @@ import { useQueryClient } from '@tanstack/react-query';
 import { useCallback, useRef, useState } from 'react';
 
 import type { ScheduleResource, ScheduleResourceRow } from '#shared/contracts/schedule';
-import type { OverwritableCell, OwnCells } from '#shared/engineering/wall-design/designTypes';
 
 import { ApiError } from '../../data/ApiError.ts';
 import { keys } from '../../data/keys.ts';
 import { usePatchSchedule } from '../../data/mutations.ts';
 import { mergeRows } from './mergeRows.ts';
+import type { ScheduleChange } from './scheduleChange.ts';
 import { toPatch } from './toPatch.ts';
-
-export interface ScheduleChange {
-  readonly rowId: string;
-  readonly own?: OwnCells;
-  readonly release?: readonly OverwritableCell[];
-}
 
 /** Both values of a row that someone else changed meanwhile. */
 export interface ScheduleConflict {
@@ -76,6 +70,7 @@ export function useScheduleEdits(id: string): ScheduleEdits {
     (change: ScheduleChange, version: number | null) => {
       setOpen((count) => count + 1);
       setError(null);
+      setAlsoChanged([]);
       queue.current = queue.current.then(async () => {
         const { rows = [], orphans = [] } = client.getQueryData<ScheduleResource>(keys.schedule(id)) ?? {};
         const stored = version ?? [...rows, ...orphans].find((row) => row.id === change.rowId)?.version;

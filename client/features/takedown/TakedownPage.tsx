@@ -22,6 +22,8 @@ import { useBuilding } from '../../data/queries.ts';
 import { heightDiagrams } from './heightDiagrams.ts';
 import { ReactionTable } from './ReactionTable.tsx';
 import { baseReactions, baseShearSum } from './reactions.ts';
+import { ShareSteps } from './ShareSteps.tsx';
+import { shareSteps } from './shareSteps.ts';
 import { StoryTable } from './StoryTable.tsx';
 import { variantOf, wallStories } from './wallStories.ts';
 
@@ -77,6 +79,7 @@ function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactE
   const force = unitLabels.force[units];
   const shears = stories.map((story) => story.lateral.get(chosen.case)?.shear ?? null);
   const decimals = forceDecimals(shears.map((shear) => shear ?? 0));
+  const steps = shareSteps(document, wall, chosen, accidental);
   const unit = units === 'us' ? 'ft' : 'm';
   return (
     <PageFrame
@@ -148,6 +151,9 @@ function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactE
             chosenWall={wall}
             onChooseWall={chooseWall}
           />
+          {steps.length > 0 ? (
+            <ShareSteps title={`${wall} at ${chosen.level.level}, its share`} steps={steps} units={units} />
+          ) : null}
         </div>
       </div>
       <div className="mt-4">
