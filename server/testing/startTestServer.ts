@@ -24,6 +24,8 @@ export interface TestServer {
   nobody(): Agent;
   /** a new process on the same database, with nothing in memory; everybody signs in anew */
   restart(): Promise<(key: TestKey) => Agent>;
+  /** on PostgreSQL another process with its own connections; null on SQLite, which has one */
+  secondProcess(): Promise<((key: TestKey) => Agent) | null>;
   close(): Promise<void>;
 }
 
@@ -55,15 +57,18 @@ async function addPeople(gate: Gate): Promise<void> {
 export async function startTestServer(options: TestServerOptions = {}): Promise<TestServer> {
   const database = await openTestDatabase();
   const longHolds: string[] = [];
+  const others: Gate[] = [];
   const gate = createGate(database.dataSource, {
     onLongHold: (milliseconds, kind) => longHolds.push(`${kind} ${Math.round(milliseconds)} ms`),
     // the machine of the tests is shared: the limit is that of production times four
     longestHoldMs: 1000,
   });
   await addPeople(gate);
-  const start = async (): Promise<{ app: App; nobody: () => Agent; agents: ReadonlyMap<TestKey, Agent> }> => {
+  const start = async (
+    through: Gate,
+  ): Promise<{ app: App; nobody: () => Agent; agents: ReadonlyMap<TestKey, Agent> }> => {
     const app = createApp({
-      gate,
+      gate: through,
       now: () => new Date().toISOString(),
       newId: () => newId(),
       hasher,
@@ -99,15 +104,22 @@ export async function startTestServer(options: TestServerOptions = {}): Promise<
       if (agent === undefined) throw new Error(`nobody is called ${key}`);
       return agent;
     };
-  const { app, nobody, agents } = await start();
+  const { app, nobody, agents } = await start(gate);
   return {
     app,
     database,
     gate,
     nobody,
     as: pick(agents),
-    restart: async () => pick((await start()).agents),
+    restart: async () => pick((await start(gate)).agents),
+    secondProcess: async () => {
+      if (!database.url.startsWith('postgres')) return null;
+      const other = createGate(await database.reopen(), { onLongHold: () => undefined });
+      others.push(other);
+      return pick((await start(other)).agents);
+    },
     close: async () => {
+      for (const other of others) await other.close();
       await gate.close();
       await database.drop();
       if (longHolds.length > 0) throw new Error(`the connection was held for long: ${longHolds.join(', ')}`);
