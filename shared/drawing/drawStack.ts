@@ -47,7 +47,7 @@ function drawLabel(input: StackInput, story: StackStory, box: StoryBox, density:
     shape: 'text',
     x: labelRight,
     y: round2(roomy ? middle - 2 : middle + (size === 13 ? 4.5 : 4)),
-    text: fitText(story.level, labelRight - 1, size, 500),
+    text: fitText(story.level, labelRight + 4, size, 500),
     size,
     weight: emphasis ? 600 : density === 'sparse' && !inTag ? 400 : 500,
     anchor: 'end',

@@ -15,7 +15,12 @@ const lineHeight = 16;
 interface Candidate {
   readonly box: LabelBox;
   readonly texts: readonly TextElement[];
-  readonly leaderFrom: PlanPoint | null;
+  readonly leader: Leader | null;
+}
+
+interface Leader {
+  readonly from: PlanPoint;
+  readonly to: PlanPoint;
 }
 
 const halo = (element: Omit<TextElement, 'shape' | 'fill' | 'halo'>): TextElement => ({
@@ -32,7 +37,7 @@ function setLabel(
   stacked: boolean,
   at: PlanPoint,
   side: 'left' | 'right',
-): Omit<Candidate, 'leaderFrom'> {
+): Omit<Candidate, 'leader'> {
   const markWidth = textWidth(name, markSize, 500);
   const shareWidth = share === null ? 0 : textWidth(share, shareSize);
   const width = stacked ? Math.max(markWidth, shareWidth) : markWidth + (share === null ? 0 : gap + shareWidth);
@@ -52,7 +57,17 @@ function setLabel(
   return { box, texts: [mark, halo({ x, y: y + lineHeight, text: share, size: shareSize, anchor })] };
 }
 
-/** Places where a label may stand, the best first: beyond the arrow at the upper third, along the wall, farther with a leader. */
+/** From the face of the wall to the nearest edge of the label. */
+function leaderTo(box: LabelBox, from: PlanPoint): Leader {
+  const x = from.x < box.left ? box.left - 3 : from.x > box.right ? box.right + 3 : from.x;
+  const y = from.y < box.top ? box.top : from.y > box.bottom ? box.bottom : box.top + 8;
+  return { from, to: { x, y } };
+}
+
+/**
+ * Places where a label may stand, the best first: beyond the arrow at the upper third, along the wall, on its other side, past its
+ * ends, farther off with a leader.
+ */
 function candidates(placed: PlacedWall, share: string | null, arrowed: boolean): Candidate[] {
   const { end1, end2, outward, length, thickness, wall } = placed;
   const inY = Math.abs(placed.along.y) > Math.abs(placed.along.x);
@@ -60,40 +75,63 @@ function candidates(placed: PlacedWall, share: string | null, arrowed: boolean):
   const other = start === end1 ? end2 : end1;
   const down = { x: (other.x - start.x) / length, y: (other.y - start.y) / length };
   const found: Candidate[] = [];
-  const put = (along: number, sideSign: 1 | -1, off: number, leader: boolean): void => {
+  const put = (along: number, sideSign: 1 | -1, off: number, leads: boolean): void => {
     const normal = { x: outward.x * sideSign, y: outward.y * sideSign };
     const foot = move(start, down, along);
     const anchor = move(foot, normal, thickness / 2 + off);
     const at = inY ? { x: anchor.x, y: anchor.y + 4 } : { x: anchor.x, y: normal.y < 0 ? anchor.y + 1 : anchor.y + 10 };
     const side = inY && normal.x < 0 ? 'left' : 'right';
     const set = setLabel(wall.name, share, inY, at, side);
-    found.push({ ...set, leaderFrom: leader ? move(foot, normal, thickness / 2) : null });
+    found.push({ ...set, leader: leads ? leaderTo(set.box, move(foot, normal, thickness / 2 + 3)) : null });
   };
-  const near = arrowed ? 18 : 9;
+  const past = (end: PlanPoint, sense: 1 | -1): void => {
+    const at = move(end, down, sense * 8);
+    const beside = { x: at.x, y: at.y + (inY ? (sense > 0 ? 12 : 0) : 4) };
+    const set = setLabel(wall.name, share, false, beside, inY || sense > 0 ? 'right' : 'left');
+    const shift = inY ? (set.box.left - set.box.right) / 2 : 0;
+    found.push({
+      box: { ...set.box, left: set.box.left + shift, right: set.box.right + shift },
+      texts: set.texts.map((text) => ({ ...text, x: round2(text.x + shift) })),
+      leader: null,
+    });
+  };
+  const near = arrowed ? (inY ? 18 : 20) : 9;
   const steps = inY
     ? [Math.min(length / 3, 18), 4, length * 0.5, length * 0.7, length - 22]
     : [0, length / 4, length / 2, length * 0.7, length - 60];
   for (const step of steps) put(Math.max(0, step), 1, near, false);
-  for (const step of steps) put(Math.max(0, step), -1, 9, false);
+  for (const step of steps) put(Math.max(0, step), -1, 8, false);
+  past(other, 1);
+  past(start, -1);
   for (const off of [34, 50, 66, 82]) for (const sign of [1, -1] as const) put(length / 2, sign, off, true);
   return found;
 }
 
-/** The label with the least overlap that comes first; a share is dropped rather than written over, the mark never. */
+const sharelessCost = 80;
+
+/** px2 written over by a label and its leader; a place outside of the page costs more than any other. */
+function overlapCost({ box, leader }: Candidate, taken: readonly LabelBox[], page: LabelBox): number {
+  const outside = box.left < page.left || box.right > page.right || box.top < page.top || box.bottom > page.bottom;
+  const crossed = leader ? overlapArea(boxAround([leader.from, leader.to], 0.5), taken) : 0;
+  return overlapArea(box, taken) + crossed + (outside ? 1e4 : 0);
+}
+
+/** The first label with the least overlap; a share is dropped rather than written over, the mark never. */
 function placeLabel(placed: PlacedWall, arrowed: boolean, taken: readonly LabelBox[], page: LabelBox): Candidate {
   const { share } = placed.wall;
   const shareText = share !== null && Math.abs(share) >= leastShare ? formatShare(Math.abs(share)) : null;
-  const off = ({ box }: Candidate): number =>
-    overlapArea(box, taken) +
-    (box.left < page.left || box.right > page.right || box.top < page.top || box.bottom > page.bottom ? 1e4 : 0);
-  const [first, ...others] = candidates(placed, shareText, arrowed);
-  if (!first) throw new Error(`no place for the mark of ${placed.wall.name}`);
-  let best = first;
-  for (const candidate of [...others, ...candidates(placed, null, arrowed)]) {
-    if (off(best) === 0) break;
-    if (off(candidate) < off(best)) best = candidate;
+  const all = [
+    ...candidates(placed, shareText, arrowed).map((candidate) => ({ candidate, extra: 0 })),
+    ...candidates(placed, null, arrowed).map((candidate) => ({ candidate, extra: sharelessCost })),
+  ];
+  let best: { candidate: Candidate; cost: number } | null = null;
+  for (const { candidate, extra } of all) {
+    const cost = overlapCost(candidate, taken, page) + extra;
+    if (best === null || cost < best.cost) best = { candidate, cost };
+    if (best.cost === 0) break;
   }
-  return best;
+  if (best === null) throw new Error(`no place for the mark of ${placed.wall.name}`);
+  return best.candidate;
 }
 
 /** Labels in the order of their shares, each kept apart from what is taken before it. */
@@ -108,7 +146,7 @@ export function drawPlanLabels(
   );
   const elements: DrawingElement[] = [];
   for (const { placed, arrowed } of order) {
-    const { box, texts, leaderFrom } = placeLabel(placed, arrowed, taken, page);
+    const { box, texts, leader } = placeLabel(placed, arrowed, taken, page);
     taken.push(
       boxAround(
         [
@@ -118,15 +156,13 @@ export function drawPlanLabels(
         1,
       ),
     );
-    if (leaderFrom) {
-      const toX = leaderFrom.x < box.left ? box.left - 3 : leaderFrom.x > box.right ? box.right + 3 : leaderFrom.x;
-      const toY = leaderFrom.y < box.top ? box.top : leaderFrom.y > box.bottom ? box.bottom : box.top + 8;
+    if (leader) {
       elements.push({
         shape: 'line',
-        x1: round2(leaderFrom.x),
-        y1: round2(leaderFrom.y),
-        x2: round2(toX),
-        y2: round2(toY),
+        x1: round2(leader.from.x),
+        y1: round2(leader.from.y),
+        x2: round2(leader.to.x),
+        y2: round2(leader.to.y),
         stroke: 'graphite',
         strokeWidth: 0.75,
       });
