@@ -119,7 +119,7 @@ export function InputsPage() {
         <SettingsPane
           building={building.data}
           canEdit={canEdit}
-          hasRows={editableTables.some((one) => (queries[one].data?.rows.length ?? 0) > 0)}
+          hasRows={editableTables.some((one) => queries[one].data?.rows.length !== 0)}
           cases={[...new Set(allRows.forces.map((row) => row.case))]}
         />
       )

@@ -13,7 +13,7 @@ import { fieldUnit, settingGroups, type SettingField } from './settingFields.ts'
 export interface SettingsPaneProps {
   readonly building: BuildingResource;
   readonly canEdit: boolean;
-  /** units can't change any more */
+  /** or not known yet: units can't change then */
   readonly hasRows: boolean;
   /** cases of the forces table, for the base shears expected */
   readonly cases: readonly string[];
