@@ -6,17 +6,7 @@
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 
-/** A small multiply-with-carry style generator: the same seed gives the same building on every machine. */
-function makeRandom(seed) {
-  let state = (seed * 2654435761 + 1013904223) >>> 0;
-  return () => {
-    state = (Math.imul(state, 1664525) + 1013904223) >>> 0;
-    let mixed = state;
-    mixed = Math.imul(mixed ^ (mixed >>> 15), 2246822519) >>> 0;
-    mixed = (mixed ^ (mixed >>> 13)) >>> 0;
-    return mixed / 4294967296;
-  };
-}
+import { makeRandom } from './makeRandom.mjs';
 
 export function generateBuilding(seed) {
   const random = makeRandom(seed);
@@ -188,6 +178,7 @@ function makeForces({ chance, length, force, pick, us, count, names }) {
       if (withPoint)
         row.push(...(chance(0.7) ? [length(30, 50), length(20, 40)] : ['', '']), chance(0.4) ? force(-900, 900) : '');
       rows.push(row);
+      if (chance(0.05)) rows.push(row); // the same level and case again: adds up
     }
   }
   if (rows.length === 0)

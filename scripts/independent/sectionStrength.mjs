@@ -32,14 +32,18 @@ export function layBars(row, segment, system, edge) {
   return { bars, webSpacing: run / spaces };
 }
 
+/** beta1 of 22.2.2.4.3. */
+const blockFactor = ({ fc }) => Math.min(0.85, Math.max(0.65, 0.85 - 0.05 * (fc / psi / 1000 - 4)));
+
 /**
- * phi Pn and phi Mn of a section at neutral-axis depth c: rectangular block, bars one by one, moments about mid-length.
- * `compressed.end` and `.web` false: such bars carry nothing in compression.
+ * Force and moment of a section at neutral-axis depth c, and phi by the farthest bar: rectangular block, bars one by one,
+ * moments about mid-length. `compressed.end` and `.web` false: such bars carry nothing in compression. Bars act up to `fy`,
+ * phi goes by `gradeFy`, the specified strength (318-19: 0.65 at yield to 0.90 at yield + 0.003).
  */
-function atDepth(section, c) {
-  const { segment, bars, fy, compressed } = section;
+export function atDepth(section, c) {
+  const { segment, bars, fy, compressed, gradeFy = fy } = section;
   const { length, thickness, fc } = segment;
-  const beta = Math.min(0.85, Math.max(0.65, 0.85 - 0.05 * (fc / psi / 1000 - 4)));
+  const beta = blockFactor(segment);
   const block = Math.min(length, beta * c);
   let force = 0.85 * fc * thickness * block;
   let moment = force * (length / 2 - block / 2);
@@ -54,42 +58,73 @@ function atDepth(section, c) {
     moment += stress * area * (length / 2 - at);
   }
   const tension = (crushing * (farthest - c)) / c;
-  const yieldStrain = fy / steelModulus;
+  const yieldStrain = gradeFy / steelModulus;
   const phi = Math.min(0.9, Math.max(0.65, 0.65 + (0.25 * (tension - yieldStrain)) / 0.003));
-  return { force: phi * force, moment: phi * moment };
+  return { c, phi, force, moment };
 }
 
-/** The smallest phi Mn at Pu among all depths that carry it; null outside the axial range. */
-export function makeFlexure(section) {
-  const { segment, bars, fy, compressed } = section;
-  const gross = segment.length * segment.thickness;
-  const steel = bars.reduce((sum, { area }) => sum + area, 0);
-  const counted = bars.reduce((sum, { area, end }) => ((end ? compressed.end : compressed.web) ? sum + area : sum), 0);
-  const squash = 0.85 * segment.fc * (gross - counted) + fy * counted;
-  const largest = 0.65 * 0.8 * squash;
-  const least = -0.9 * steel * fy;
+/**
+ * All depths at which the section carries an axial force, reduced by phi (`design`) or not. The force falls by a step where
+ * the block reaches a bar, which then loses 0.85 f'c: both sides of each step are scanned, and the step itself is no solution.
+ */
+export function makeDepths(section, design) {
+  const { segment } = section;
   const steps = 3000;
-  const depths = Array.from({ length: steps + 1 }, (_, i) => segment.length * 1e-5 * 10 ** ((6.3 * i) / steps));
-  const forces = depths.map((c) => atDepth(section, c).force);
-  const known = new Map();
+  const forceAt = (c) => {
+    const { phi, force } = atDepth(section, c);
+    return design ? phi * force : force;
+  };
+  const even = Array.from({ length: steps + 1 }, (_, i) => segment.length * 1e-5 * 10 ** ((6.3 * i) / steps));
+  const sides = section.bars.flatMap(({ at }) =>
+    [at * (1 - 1e-12), at * (1 + 1e-12)].map((a) => a / blockFactor(segment)),
+  );
+  const depths = [...even, ...sides].sort((a, b) => a - b);
+  const forces = depths.map(forceAt);
+  const largest = forces.reduce((most, force) => Math.max(most, Math.abs(force)), 0);
   return (axial) => {
-    if (axial > largest || axial < least) return null;
-    if (known.has(axial)) return known.get(axial);
-    let smallest = null;
-    for (let i = 0; i < steps; i += 1) {
+    const found = [];
+    for (let i = 0; i + 1 < depths.length; i += 1) {
       if (forces[i] > axial === forces[i + 1] > axial) continue;
       let [low, high] = [depths[i], depths[i + 1]];
       const rising = forces[i + 1] > forces[i];
       for (let pass = 0; pass < 60; pass += 1) {
         const middle = (low + high) / 2;
-        if (atDepth(section, middle).force > axial === rising) high = middle;
+        if (forceAt(middle) > axial === rising) high = middle;
         else low = middle;
       }
-      const { moment } = atDepth(section, (low + high) / 2);
-      if (smallest === null || moment < smallest) smallest = moment;
+      const middle = (low + high) / 2;
+      if (Math.abs(forceAt(middle) - axial) <= 1e-7 * largest) found.push(atDepth(section, middle));
     }
-    known.set(axial, smallest);
-    return smallest;
+    return found;
+  };
+}
+
+/** The point of smallest phi Mn at Pu among all depths that carry it; null outside the axial range. */
+export function makeFlexurePoint(section) {
+  const { segment, bars, fy, compressed } = section;
+  const gross = segment.length * segment.thickness;
+  const steel = bars.reduce((sum, { area }) => sum + area, 0);
+  const counted = bars.reduce((sum, { area, end }) => ((end ? compressed.end : compressed.web) ? sum + area : sum), 0);
+  const largest = 0.65 * 0.8 * (0.85 * segment.fc * (gross - counted) + fy * counted);
+  const least = -0.9 * steel * fy;
+  const depthsOf = makeDepths(section, true);
+  const known = new Map();
+  return (axial) => {
+    if (axial > largest || axial < least) return null;
+    if (!known.has(axial)) {
+      const points = depthsOf(axial).sort((a, b) => a.phi * a.moment - b.phi * b.moment);
+      known.set(axial, points[0] ?? null);
+    }
+    return known.get(axial);
+  };
+}
+
+/** phi Mn at Pu alone. */
+export function makeFlexure(section) {
+  const pointOf = makeFlexurePoint(section);
+  return (axial) => {
+    const point = pointOf(axial);
+    return point === null ? null : point.phi * point.moment;
   };
 }
 
