@@ -13,6 +13,7 @@ import type { Runner } from './compute/Runner.ts';
 import { ApiRouter } from './http/ApiRouter.ts';
 import { errorHandler } from './http/errorHandler.ts';
 import { notFound } from './http/HttpError.ts';
+import { refuseNullCharacters } from './http/refuseNullCharacters.ts';
 import { requestLog } from './http/requestLog.ts';
 import { securityHeaders } from './http/securityHeaders.ts';
 import { servePages } from './http/servePages.ts';
@@ -75,10 +76,14 @@ export function createApp(dependencies: AppDependencies): App {
   app.use(securityHeaders(overTls));
   app.use(compression());
   app.use(cookieParser());
-  app.use('/api', express.json({ limit: '16mb', strict: false }), (_request, response, next) => {
-    response.setHeader('Cache-Control', 'no-store');
-    next();
-  });
+  app.use(
+    '/api',
+    express.json({ limit: '16mb', strict: false, verify: refuseNullCharacters }),
+    (_request, response, next) => {
+      response.setHeader('Cache-Control', 'no-store');
+      next();
+    },
+  );
   app.use(api.router);
   app.use('/api', () => {
     throw notFound();

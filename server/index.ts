@@ -51,7 +51,9 @@ async function start(): Promise<void> {
     }
   }
   const server = app.express.listen(environment.port, environment.host, () => {
-    logger.info({ port: environment.port, host: environment.host }, 'listening');
+    const address = server.address();
+    const port = typeof address === 'object' && address !== null ? address.port : environment.port;
+    logger.info({ port, host: environment.host }, 'listening');
   });
   server.on('error', (error) => {
     logger.fatal({ err: errorForLog(error) }, 'the address can not be listened on');

@@ -104,11 +104,13 @@ function dress(cell: Cell, column: ScheduleColumn, row: ScheduleResourceRow, fir
         ? fonts.quiet
         : marksOver
           ? fonts.over
-          : own
-            ? fonts.overwritten
-            : column.look === 'notation'
-              ? fonts.notation
-              : fonts.data;
+          : column.head === 'State' && row.state !== 'ok'
+            ? fonts.firm
+            : own
+              ? fonts.overwritten
+              : column.look === 'notation'
+                ? fonts.notation
+                : fonts.data;
   cell.alignment =
     column.look === 'number' ? alignments.number : column.look === 'quiet' ? alignments.text : alignments.line;
   cell.border = { top: first ? inkRule : hairline, ...(own ? { left: ochreBar } : {}) };

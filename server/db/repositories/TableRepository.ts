@@ -29,13 +29,33 @@ const columnsOf = (table: TableName): string[] => tableColumns[table].map((colum
 export class TableRepository {
   constructor(private readonly manager: EntityManager) {}
 
-  async rows(buildingId: string, table: TableName): Promise<RowRecord[]> {
+  rows(buildingId: string, table: TableName): Promise<RowRecord[]> {
+    return this.find(buildingId, table, '', []);
+  }
+
+  /** Some rows by id, in the order of the table; unknown ids are passed over. */
+  async rowsByIds(buildingId: string, table: TableName, ids: readonly string[]): Promise<RowRecord[]> {
+    if (ids.length === 0) return [];
+    if (ids.length > 1000) {
+      const wanted = new Set(ids);
+      return (await this.rows(buildingId, table)).filter((row) => wanted.has(row.id));
+    }
+    return this.find(buildingId, table, `AND "id" IN (${ids.map(() => '?').join(', ')})`, ids);
+  }
+
+  private async find(
+    buildingId: string,
+    table: TableName,
+    where: string,
+    values: readonly string[],
+  ): Promise<RowRecord[]> {
     const columns = columnsOf(table);
     const names = columns.map((name) => `"${name}"`).join(', ');
     const found = await select<Record<string, CellValue>>(
       this.manager,
-      `SELECT "id", "version", "position", ${names} FROM "${sqlTables[table]}" WHERE "buildingId" = ? ORDER BY "position", "id"`,
-      [buildingId],
+      `SELECT "id", "version", "position", ${names} FROM "${sqlTables[table]}"
+       WHERE "buildingId" = ? ${where} ORDER BY "position", "id"`,
+      [buildingId, ...values],
     );
     return found.map((row) => {
       const cells: Record<string, CellValue> = {};

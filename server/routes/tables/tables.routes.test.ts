@@ -110,8 +110,10 @@ describe('PATCH of cells', () => {
       .error;
     expect(problems.map((problem) => problem.column)).toEqual(['thickness', 'wall', 'color', 'opening']);
     expect(problems.every((problem) => problem.rowId === row.id)).toBe(true);
-    expect(problems[0]?.message).toBe('thickness reads "-1", expected a number above 0');
-    expect(problems[3]?.message).toBe('opening reads "1.5", expected a number not below 0 and not above 1');
+    expect(problems[0]?.message).toBe('thickness reads "-1", expected a number above 0; correct the cell');
+    expect(problems[3]?.message).toBe(
+      'opening reads "1.5", expected a number not below 0 and not above 1; correct the cell',
+    );
   });
 
   it('lets a half-finished building stand', async () => {

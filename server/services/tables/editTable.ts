@@ -64,6 +64,15 @@ function checkMoved(byId: ReadonlyMap<string, RowRecord>, read: ReadPatch, patch
   }
 }
 
+/** New rows need their neighbors, names of levels and walls all rows that could bear them. */
+const needsWholeTable = (table: EditableTable, patch: TablePatch): boolean =>
+  patch.inserts.length > 0 || table === 'levels' || table === 'walls';
+
+/** No id of ours is longer, and some texts are more than a database takes. */
+const namedRows = (patch: TablePatch): string[] => [
+  ...new Set([...patch.edits, ...patch.deletes].map(({ id }) => id).filter((id) => /^[0-9a-f-]{36}$/.test(id))),
+];
+
 /**
  * {edits, inserts, deletes} of one table in one transaction. Two people in one table meet only in one cell: an edit conflicts
  * where its `was` is no longer stored. The building may pass through states that do not compute.
@@ -79,7 +88,9 @@ export async function editTable(
   return context.gate.write(
     async (store) => {
       const seq = await store.buildings.nextSeq(buildingId, true);
-      const stored = await store.tables.rows(buildingId, table);
+      const stored = needsWholeTable(table, patch)
+        ? await store.tables.rows(buildingId, table)
+        : await store.tables.rowsByIds(buildingId, table, namedRows(patch));
       const byId = new Map(stored.map((row) => [row.id, row]));
       checkMoved(byId, read, patch);
 
@@ -131,10 +142,10 @@ export async function editTable(
           after: { tables: { ...cascade.after, [table]: after }, renames },
         },
       });
-      const shown = new Set([...update.map(({ next: row }) => row.id), ...insert.map((row) => row.id)]);
-      const rows = shown.size === 0 ? [] : await store.tables.rows(buildingId, table);
+      const shown = [...update.map(({ next: row }) => row.id), ...insert.map((row) => row.id)];
+      const rows = await store.tables.rowsByIds(buildingId, table, shown);
       return {
-        rows: rows.filter((row) => shown.has(row.id)).map(storedRow),
+        rows: rows.map(storedRow),
         deleted: remove,
         version: await store.tables.version(buildingId, table),
         seq,

@@ -3,6 +3,10 @@ import type { ApiProblem } from '#shared/contracts/errors';
 import { tableColumns, type Column, type EditableTable } from '#shared/contracts/tableColumns';
 import type { CellValue } from '#shared/contracts/tables';
 
+import { cleanText } from '#shared/csv/cleanText';
+import { largestNumber } from '#shared/csv/parseNumber';
+import { longestText } from '#shared/csv/readCell';
+
 export type CellReading =
   { readonly ok: true; readonly value: CellValue } | { readonly ok: false; readonly message: string };
 
@@ -23,12 +27,12 @@ export function readCell(column: Column, value: CellValue): CellReading {
   const blank = value === null || (typeof value === 'string' && value.trim() === '');
   const refuse = (expected: string): CellReading => ({
     ok: false,
-    message: `${column.name} reads ${shown(value)}, expected ${expected}`,
+    message: `${column.name} reads ${shown(value)}, expected ${expected}; correct the cell`,
   });
   if (blank)
     return column.required ? refuse(column.type === 'number' ? rangeOf(column) : 'a value') : { ok: true, value: null };
   if (column.type === 'number') {
-    if (typeof value !== 'number' || !Number.isFinite(value)) return refuse(rangeOf(column));
+    if (typeof value !== 'number' || !(Math.abs(value) <= largestNumber)) return refuse(rangeOf(column));
     const { above, min, max } = column;
     const inRange =
       (above === undefined || value > above) &&
@@ -37,7 +41,10 @@ export function readCell(column: Column, value: CellValue): CellReading {
     // 0 for -0: the two are equal to everybody and differ as text
     return inRange ? { ok: true, value: value === 0 ? 0 : value } : refuse(rangeOf(column));
   }
-  const text = String(value).trim();
+  const text = cleanText(String(value));
+  if (text === null || text === '' || text.length > longestText) {
+    return refuse(`text of 1 to ${longestText} characters that can be shown`);
+  }
   if (column.type === 'choice' && !(column.choices ?? []).includes(text)) {
     return refuse(`one of ${(column.choices ?? []).join(', ')}`);
   }

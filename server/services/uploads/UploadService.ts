@@ -1,7 +1,8 @@
-import { editableTables, tableColumns, type EditableTable } from '#shared/contracts/tableColumns';
+import { editableTables, type EditableTable } from '#shared/contracts/tableColumns';
 import type { CellValue, UploadAnswer } from '#shared/contracts/tables';
 import { limitProblems, problemLimit, type FileProblem } from '#shared/csv/fileProblem';
 import { readTable } from '#shared/csv/readTable';
+import { byRowAndColumn } from '#shared/csv/sortProblems';
 
 import type { BuildingRecord } from '../../db/repositories/BuildingRepository.ts';
 import type { Caller } from '../../db/repositories/PersonRepository.ts';
@@ -71,12 +72,7 @@ export class UploadService {
 }
 
 function refused(table: EditableTable, fileName: string, problems: readonly FileProblem[], total: number): HttpError {
-  const names: readonly string[] = tableColumns[table].map((column) => column.name);
-  const place = (column: string | null): number => {
-    const at = column === null ? -1 : names.indexOf(column);
-    return at === -1 ? names.length : at;
-  };
-  const sorted = [...problems].sort((a, b) => (a.row ?? 0) - (b.row ?? 0) || place(a.column) - place(b.column));
+  const sorted = [...problems].sort(byRowAndColumn(table));
   return new HttpError(422, 'problems', `${fileName} has problems; nothing of it was taken.`, {
     problems: limitProblems(sorted, total, fileName).map((problem) => ({ ...problem, table })),
   });
