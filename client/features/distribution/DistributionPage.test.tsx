@@ -1,0 +1,87 @@
+import { screen, within } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { describe, expect, it } from 'vitest';
+
+import { fakeServer, refusal } from '../../app/testing/fakeServer.ts';
+import { renderAt } from '../../app/testing/renderAt.tsx';
+import { sampleTable } from '../../engine/testing/sampleBuilding.ts';
+import { computedAnswers } from '../../engine/testing/sampleServer.ts';
+
+const address = '/buildings/b1/distribution?case=EY&level=L2';
+
+describe('DistributionPage', () => {
+  it('shows plan, shares and balance of the story in the address', async () => {
+    fakeServer(computedAnswers());
+    renderAt(address);
+    expect(await screen.findByRole('figure', { name: 'Plan' })).toBeInTheDocument();
+    const shares = screen.getByRole('region', { name: 'Shares, L2, EY' });
+    const row = within(shares).getByRole('button', { name: 'P1' }).closest('tr');
+    expect(row).toHaveTextContent('67.5');
+    expect(row).toHaveTextContent('50.0 %');
+    const balance = screen.getByRole('region', { name: 'Balance, L2, EY' });
+    expect(within(balance).getByRole('rowheader', { name: 'Force y' }).closest('tr')).toHaveTextContent('135.0');
+    expect(within(balance).getByText('closed')).toBeInTheDocument();
+  });
+
+  it('says plainly that drift is not available', async () => {
+    fakeServer(computedAnswers());
+    renderAt(address);
+    expect(await screen.findByText('Drift: not available')).toBeInTheDocument();
+  });
+
+  it('walks the stories with the stack and keeps the choice in the address', async () => {
+    fakeServer(computedAnswers());
+    const { router } = renderAt(address);
+    (await screen.findByRole('listbox', { name: 'Stories' })).focus();
+    await userEvent.keyboard('{ArrowUp}');
+    expect(await screen.findByRole('region', { name: 'Shares, L3, EY' })).toBeInTheDocument();
+    expect(router.state.location.search).toContain('level=L3');
+  });
+
+  it('switches case and variant, and chooses a wall on the plan', async () => {
+    fakeServer(computedAnswers());
+    const { router } = renderAt(address);
+    await userEvent.click(await screen.findByRole('button', { name: 'EX' }));
+    await userEvent.click(screen.getByRole('button', { name: '+5 %' }));
+    await userEvent.click(within(screen.getByRole('figure', { name: 'Plan' })).getByRole('option', { name: /^Q2/ }));
+    const search = new URLSearchParams(router.state.location.search);
+    expect([search.get('case'), search.get('variant'), search.get('wall')]).toEqual(['EX', '+', 'Q2']);
+    expect(screen.getByRole('option', { name: /^Q2/ })).toHaveAttribute('aria-selected', 'true');
+  });
+
+  it('goes to the next wall with W', async () => {
+    fakeServer(computedAnswers());
+    const { router } = renderAt(`${address}&wall=Q2`);
+    await screen.findByRole('figure', { name: 'Plan' });
+    await userEvent.keyboard('w');
+    expect(new URLSearchParams(router.state.location.search).get('wall')).toBe('P1');
+  });
+
+  it('says what to bring first where there are no levels', async () => {
+    const empty = { ...sampleTable('levels'), rows: [] };
+    fakeServer({
+      ...computedAnswers(),
+      'GET /api/buildings/b1/levels': { body: empty },
+      'GET /api/buildings/b1/results': refusal(422, 'does-not-compute'),
+    });
+    renderAt(address);
+    expect(await screen.findByRole('heading', { name: 'No levels yet' })).toBeInTheDocument();
+    expect(screen.getByRole('link', { name: 'Go to levels' })).toHaveAttribute('href', '/buildings/b1/inputs/levels');
+  });
+
+  it('lists the problems of tables that do not fit together, each with the way there', async () => {
+    const problems = [
+      { table: 'walls', row: 2, column: 'to_level', rowId: 'walls-2', message: 'read L9, expected a level.' },
+    ];
+    fakeServer({
+      ...computedAnswers(),
+      'GET /api/buildings/b1/results': refusal(422, 'does-not-compute', { problems }),
+    });
+    renderAt(address);
+    expect(await screen.findByText('read L9, expected a level.')).toBeInTheDocument();
+    expect(screen.getByRole('link', { name: /walls, row 2/ })).toHaveAttribute(
+      'href',
+      '/buildings/b1/inputs/walls?row=walls-2',
+    );
+  });
+});
