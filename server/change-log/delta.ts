@@ -12,7 +12,7 @@ export interface ScheduleState {
 }
 
 export interface Rename {
-  readonly kind: 'level' | 'wall';
+  readonly kind: 'level' | 'wall' | 'case';
   readonly from: string;
   readonly to: string;
 }

@@ -179,6 +179,25 @@ describe('renaming', () => {
     await server.as('engineer').get(path('results')).expect(200);
   });
 
+  it('of a case in all its rows goes through to the base shear expected of it, and undo takes both back', async () => {
+    const engineer = server.as('engineer');
+    const expected = async (): Promise<unknown> =>
+      ((await engineer.get(`/api/buildings/${id}`)).body as { expectedBaseShear: unknown }).expectedBaseShear;
+    await engineer
+      .patch(`/api/buildings/${id}`)
+      .send({ version: 1, expectedBaseShear: { WX: 50 } })
+      .expect(200);
+    const rows = (await get('forces')).rows.filter((row) => row.case === 'WX');
+    const edit = (row: StoredRow<'forces'> | undefined) => ({ id: row?.id, column: 'case', was: 'WX', to: 'West' });
+    await patch('forces', { edits: [edit(rows[0])] }).expect(200);
+    expect(await expected()).toEqual({ WX: 50 });
+    await patch('forces', { edits: [edit(rows[1])] }).expect(200);
+    expect(await expected()).toEqual({ West: 50 });
+    await engineer.post(path('undo')).send({}).expect(200);
+    expect(await expected()).toEqual({ WX: 50 });
+    expect((await get('forces')).rows.map((row) => row.case)).toEqual(['West', 'WX', 'WY', 'WY']);
+  });
+
   it('of a wall goes through gravity; a second band that keeps the old name stops it', async () => {
     const wall = first((await get('walls')).rows);
     await patch('walls', { edits: [{ id: wall.id, column: 'wall', was: 'A', to: 'W1' }] }).expect(200);

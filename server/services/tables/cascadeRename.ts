@@ -1,7 +1,9 @@
+import { typedSettings } from '#shared/contracts/settings';
 import type { EditableTable } from '#shared/contracts/tableColumns';
 import type { CellValue } from '#shared/contracts/tables';
+import type { Settings } from '#shared/engineering/input';
 
-import type { Rename, RowState, TableState } from '../../change-log/delta.ts';
+import type { DeltaSide, Rename, RowState, TableState } from '../../change-log/delta.ts';
 import { writeRows } from '../../change-log/writeRows.ts';
 import type { RowRecord } from '../../db/repositories/TableRepository.ts';
 import type { Store } from '../../db/Store.ts';
@@ -10,6 +12,7 @@ import { HttpError } from '../../http/HttpError.ts';
 const ownNames: Readonly<Partial<Record<EditableTable, { kind: Rename['kind']; column: string }>>> = {
   levels: { kind: 'level', column: 'level' },
   walls: { kind: 'wall', column: 'wall' },
+  forces: { kind: 'case', column: 'case' },
 };
 
 const references: Readonly<Record<Rename['kind'], readonly (readonly [EditableTable, readonly string[]])[]>> = {
@@ -19,6 +22,7 @@ const references: Readonly<Record<Rename['kind'], readonly (readonly [EditableTa
     ['gravity', ['level']],
   ],
   wall: [['gravity', ['wall']]],
+  case: [],
 };
 
 /**
@@ -41,12 +45,15 @@ export function renamesOf(table: EditableTable, stored: readonly RowRecord[], ne
   return [...found].flatMap(([from, to]) => (to.size === 1 ? [...to].map((name) => ({ kind, from, to: name })) : []));
 }
 
+export interface Cascade {
+  readonly before: Partial<Record<EditableTable, TableState>>;
+  readonly after: Partial<Record<EditableTable, TableState>>;
+  /** building.json before and after, where a setting named what was renamed */
+  readonly settings: { readonly before: DeltaSide['settings']; readonly after: DeltaSide['settings'] } | null;
+}
+
 /** Lets renames through to every table and schedule row that refers to the names; gives the rows' states for the change log. */
-export async function cascadeRename(
-  store: Store,
-  buildingId: string,
-  renames: readonly Rename[],
-): Promise<{ before: Partial<Record<EditableTable, TableState>>; after: Partial<Record<EditableTable, TableState>> }> {
+export async function cascadeRename(store: Store, buildingId: string, renames: readonly Rename[]): Promise<Cascade> {
   const before: Partial<Record<EditableTable, TableState>> = {};
   const after: Partial<Record<EditableTable, TableState>> = {};
   for (const table of ['walls', 'forces', 'gravity'] as const) {
@@ -75,7 +82,22 @@ export async function cascadeRename(
     after[table] = sides.after;
   }
   await renameSchedule(store, buildingId, renames);
-  return { before, after };
+  return { before, after, settings: await renameCases(store, buildingId, renames) };
+}
+
+/** `expectedBaseShear` is by case. */
+async function renameCases(store: Store, buildingId: string, renames: readonly Rename[]): Promise<Cascade['settings']> {
+  const cases = new Map(renames.flatMap(({ kind, from, to }) => (kind === 'case' ? [[from, to] as const] : [])));
+  if (cases.size === 0) return null;
+  const { settings, version } = await store.buildings.get(buildingId);
+  const named = Object.entries(settings.expectedBaseShear);
+  if (!named.some(([name]) => cases.has(name))) return null;
+  const expectedBaseShear = Object.fromEntries(named.map(([name, value]) => [cases.get(name) ?? name, value]));
+  const next: Settings = { ...settings, expectedBaseShear };
+  if (!(await store.buildings.setSettings(buildingId, version, next))) {
+    throw new HttpError(409, 'version', 'The settings have been changed at the same moment.');
+  }
+  return { before: typedSettings(settings), after: typedSettings(next) };
 }
 
 export async function renameSchedule(store: Store, buildingId: string, renames: readonly Rename[]): Promise<void> {

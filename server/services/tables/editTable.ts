@@ -64,9 +64,12 @@ function checkMoved(byId: ReadonlyMap<string, RowRecord>, read: ReadPatch, patch
   }
 }
 
-/** New rows need their neighbors, names of levels and walls all rows that could bear them. */
+/** New rows need their neighbors, names of levels, walls and cases all rows that could bear them. */
 const needsWholeTable = (table: EditableTable, patch: TablePatch): boolean =>
-  patch.inserts.length > 0 || table === 'levels' || table === 'walls';
+  patch.inserts.length > 0 ||
+  table === 'levels' ||
+  table === 'walls' ||
+  patch.edits.some((edit) => table === 'forces' && edit.column === 'case');
 
 /** No id of ours is longer, and some texts are more than a database takes. */
 const namedRows = (patch: TablePatch): string[] => [
@@ -138,8 +141,16 @@ export async function editTable(
         seq,
         kind: 'edit',
         delta: {
-          before: { tables: { ...cascade.before, [table]: before }, renames: renames.map(turned) },
-          after: { tables: { ...cascade.after, [table]: after }, renames },
+          before: {
+            tables: { ...cascade.before, [table]: before },
+            ...(cascade.settings === null ? {} : { settings: cascade.settings.before }),
+            renames: renames.map(turned),
+          },
+          after: {
+            tables: { ...cascade.after, [table]: after },
+            ...(cascade.settings === null ? {} : { settings: cascade.settings.after }),
+            renames,
+          },
         },
       });
       const shown = [...update.map(({ next: row }) => row.id), ...insert.map((row) => row.id)];
