@@ -7,6 +7,7 @@ import { readFileSync } from 'node:fs';
 import { compareActions, compareResult } from './compareResult.mjs';
 import { residuals } from './equilibrium.mjs';
 import { judgeSchedule } from './judgeSchedule.mjs';
+import { judgeRows } from './judgeRows.mjs';
 import { readBuilding } from './readBuilding.mjs';
 import { ownUnits } from './siUnits.mjs';
 import { solveBuilding } from './solveBuilding.mjs';
@@ -63,7 +64,7 @@ say(`untied bars in compression carry ${judged === readings[0] ? 'nothing' : 'th
 say(
   `sections judged again: ${String(judged.sections)}, flexure within ${judged.worstFlexure.toExponential(2)}, shear within ${judged.worstShear.toExponential(2)}`,
 );
-lines.push(...judged.lines);
+lines.push(...judged.lines, ...judgeRows(building, result));
 
 for (const line of lines.slice(0, shown)) say(`differs: ${line}`);
 if (lines.length > shown) say(`and ${String(lines.length - shown)} more`);
