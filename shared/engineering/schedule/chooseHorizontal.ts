@@ -5,7 +5,6 @@ import { findBar } from '../wall-design/bars.ts';
 import type { DesignContext } from '../wall-design/designContext.ts';
 import type { ScheduleCells } from '../wall-design/designTypes.ts';
 import { horizontalRatio } from '../wall-design/detailChecks.ts';
-import { horizontalBars } from '../wall-design/reinforcement.ts';
 import { lapNeeded } from '../wall-design/rowLaps.ts';
 import { leastRatios, spacingLimits } from '../wall-design/steelNeeded.ts';
 
@@ -34,43 +33,37 @@ export function chooseHorizontal(question: {
   const { units, limits } = context;
   const spacingLimitIn = spacingLimits(needs.shear.low, lengthIn, thicknessIn, context).horizontalIn;
   const aboveSteel = above && { ...above, areaIn2: findBar(units, above.bar).areaIn2 };
-  const cells = lists.horizontal.sizes.flatMap((bar) =>
-    lists.horizontal.spacings.map((spacing): HorizontalCell => ({
-      curtains: bars.curtains,
-      bar,
-      spacing,
-      end: 'hook',
-    })),
-  );
-  if (above) cells.push({ ...above, curtains: bars.curtains });
-
+  const { curtains } = bars;
   let best: HorizontalCell | null = null;
   let bestScore = Infinity;
   let strongest: HorizontalCell | null = null;
   let strongestRatio = -Infinity;
-  for (const cell of cells) {
-    const horizontal = horizontalBars(cell, context);
-    if (aboveSteel && !notLighter(cell.curtains, cell.spacing, horizontal.bar.areaIn2, aboveSteel)) continue;
+  const consider = (size: number, spacing: number, end: HorizontalCell['end']): void => {
+    const bar = findBar(units, size);
+    if (aboveSteel && !notLighter(curtains, spacing, bar.areaIn2, aboveSteel)) return;
+    const horizontal = { curtains, bar, spacingIn: spacing * limits.toIn };
     const ratio = horizontalRatio(horizontal, thicknessIn);
-    const least = leastRatios(needs.shear, bars.web, horizontal.bar, ratio, context).horizontal;
-    const enough = ratio >= Math.max(least, needs.shear.horizontalForStrength) * (1 - 1e-9);
     const spaced = horizontal.spacingIn <= spacingLimitIn * (1 + 1e-9);
-    if (enough && spaced) {
-      const lapIn = lapNeeded('horizontal', bars, horizontal, needs.fcPsi, context);
-      const value = score(horizontalMass(horizontal, lengthIn, heightsIn, lapIn, limits), [cell.bar], used);
-      const fit = barFit(bars, thicknessIn, context.coverIn, horizontal.bar.diameterIn, limits);
-      if (value < bestScore && fit.clearIn >= fit.neededIn * (1 - 1e-9)) {
-        best = cell;
-        bestScore = value;
-      }
-    }
     const rank = ratio + (spaced ? 1 : 0);
     if (rank > strongestRatio) {
-      strongest = cell;
+      strongest = { curtains, bar: size, spacing, end };
       strongestRatio = rank;
     }
+    const least = leastRatios(needs.shear, bars.web, bar, ratio, context).horizontal;
+    if (!spaced || ratio < Math.max(least, needs.shear.horizontalForStrength) * (1 - 1e-9)) return;
+    const lapIn = lapNeeded('horizontal', bars, horizontal, needs.fcPsi, context);
+    const value = score(horizontalMass(horizontal, lengthIn, heightsIn, lapIn, limits), [size], used);
+    if (value >= bestScore) return;
+    const fit = barFit(bars, thicknessIn, context.coverIn, bar.diameterIn, limits);
+    if (fit.clearIn < fit.neededIn * (1 - 1e-9)) return;
+    best = { curtains, bar: size, spacing, end };
+    bestScore = value;
+  };
+  for (const size of lists.horizontal.sizes) {
+    for (const spacing of lists.horizontal.spacings) consider(size, spacing, 'hook');
   }
-  const chosen = best ?? strongest;
+  if (above) consider(above.bar, above.spacing, above.end);
+  const chosen = (best ?? strongest) as HorizontalCell | null;
   if (!chosen) throw new Error('no horizontal bars to choose from: the bar lists are empty');
   return chosen;
 }

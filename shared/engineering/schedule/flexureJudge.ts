@@ -2,7 +2,7 @@ import type { DesignContext } from '../wall-design/designContext.ts';
 import type { WallBars } from '../wall-design/barLayers.ts';
 import { compressionZones, sectionOf } from '../wall-design/reinforcement.ts';
 import { designStrength } from '../wall-design/flexuralStrength.ts';
-import { sectionCurve } from '../wall-design/sectionCurve.ts';
+import { CurveStore, sectionCurve } from '../wall-design/sectionCurve.ts';
 import { passes, ratioOf } from '../wall-design/plainCheck.ts';
 
 import type { AxialMoment, BandNeeds } from './bandNeeds.ts';
@@ -16,9 +16,10 @@ export interface FlexureJudge {
 
 export function flexureJudge(needs: BandNeeds, context: DesignContext): FlexureJudge {
   const pairs: AxialMoment[] = [...needs.pairs];
+  const store = new CurveStore();
   const solver = (bars: WallBars, tied: boolean): ((pair: AxialMoment) => number | null) => {
     const zones = compressionZones(bars, needs.thicknessIn, tied, context);
-    const curve = sectionCurve(sectionOf(bars, needs, zones, context), context.rules);
+    const curve = sectionCurve(sectionOf(bars, needs, zones, context), context.rules, 1, store);
     return ({ axialKip, momentKipIn }) => ratioOf(momentKipIn, designStrength(curve, axialKip)?.phiMnKipIn ?? null);
   };
   const known = new Map<string, boolean>();

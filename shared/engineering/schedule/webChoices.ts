@@ -46,32 +46,31 @@ export function webLadders(
   const rhoT = horizontalRatio(horizontal, thicknessIn);
   const spacingLimitIn = spacingLimits(needs.shear.low, lengthIn, thicknessIn, context).verticalIn;
   const aboveSteel = above && { ...above, areaIn2: findBar(units, above.bar).areaIn2 };
-  const sizes = lists.web.sizes.map((size) => ({ size, spacings: [...lists.web.spacings] }));
-  if (above) {
-    const own = sizes.find(({ size }) => size === above.bar);
-    if (!own) sizes.push({ size: above.bar, spacings: [above.spacing] });
-    else if (!own.spacings.includes(above.spacing)) own.spacings.push(above.spacing);
-  }
+  const lightFirst = [...lists.web.spacings].sort((a, b) => b - a);
+  const spacingsOf = (size: number): readonly number[] => {
+    if (size !== above?.bar || lightFirst.includes(above.spacing)) return lightFirst;
+    return [...lightFirst, above.spacing].sort((a, b) => b - a);
+  };
+  const listed = lists.web.sizes;
+  const sizes = above && !listed.includes(above.bar) ? [...listed, above.bar] : listed;
   const ladders: VerticalCell[][] = [];
   for (const curtains of [1, 2] as const) {
     if (curtains < curtainsNeeded(thicknessIn, context)) continue;
-    for (const { size, spacings } of sizes) {
+    for (const size of sizes) {
       const bar = findBar(units, size);
-      const least = leastRatios(needs.shear, bar, horizontal.bar, rhoT, context).vertical;
-      const clearIn = neededClear(bar, limits) * slack;
-      const acrossFits = acrossFit(curtains, bar, thicknessIn, context.coverIn, horizontal.bar.diameterIn, limits);
-      const ladder = [...spacings]
-        .sort((a, b) => b - a)
-        .map((spacing): VerticalCell => ({ curtains, bar: size, spacing }))
-        .filter((cell) => {
-          if (aboveSteel && !notLighter(curtains, cell.spacing, bar.areaIn2, aboveSteel)) return false;
-          if (relaxed) return true;
-          const spacingIn = cell.spacing * limits.toIn;
-          const rho = webRatio(curtains, bar, spacingIn, thicknessIn);
-          if (spacingIn > spacingLimitIn * (1 + 1e-9) || rho < least * slack) return false;
-          if (rho > rules.tiesAboveRatio * (1 + 1e-9)) return false;
-          return spacingIn - 2 * bar.diameterIn >= clearIn && acrossFits;
-        });
+      const least = leastRatios(needs.shear, bar, horizontal.bar, rhoT, context).vertical * slack;
+      const clearIn = neededClear(bar, limits) * slack + 2 * bar.diameterIn;
+      const across = acrossFit(curtains, bar, thicknessIn, context.coverIn, horizontal.bar.diameterIn, limits);
+      if (!across && !relaxed) continue;
+      const ladder: VerticalCell[] = [];
+      for (const spacing of size === above?.bar && !listed.includes(size) ? [above.spacing] : spacingsOf(size)) {
+        if (aboveSteel && !notLighter(curtains, spacing, bar.areaIn2, aboveSteel)) continue;
+        const spacingIn = spacing * limits.toIn;
+        const rho = webRatio(curtains, bar, spacingIn, thicknessIn);
+        const stands = spacingIn <= spacingLimitIn * (1 + 1e-9) && spacingIn >= clearIn;
+        const inRange = rho >= least && rho <= rules.tiesAboveRatio * (1 + 1e-9);
+        if (relaxed || (stands && inRange)) ladder.push({ curtains, bar: size, spacing });
+      }
       if (ladder.length > 0) ladders.push(ladder);
     }
   }

@@ -60,20 +60,18 @@ export function webPlaces(bars: WallBars, lengthIn: number): number[] {
 
 /** The bars of a row as layers along the wall, both ends alike, in order from the compression face. */
 export function barLayers(bars: WallBars, lengthIn: number, zones: CompressionZones): SectionLayer[] {
-  const layers: SectionLayer[] = webPlaces(bars, lengthIn).map((positionIn) => ({
-    positionIn,
-    areaIn2: bars.curtains * bars.web.areaIn2,
-    compression: zones.web,
-  }));
-  if (bars.ends) {
-    const columns = endColumns(bars.ends.count, bars.ends.lengthIn, bars.edgeIn);
-    const areaIn2 = (bars.ends.count * bars.ends.bar.areaIn2) / columns.length;
-    for (const positionIn of columns) {
-      layers.push({ positionIn, areaIn2, compression: zones.ends });
-      layers.push({ positionIn: lengthIn - positionIn, areaIn2, compression: zones.ends });
-    }
+  const layers: SectionLayer[] = [];
+  const columns = bars.ends ? endColumns(bars.ends.count, bars.ends.lengthIn, bars.edgeIn) : [];
+  const endAreaIn2 = bars.ends ? (bars.ends.count * bars.ends.bar.areaIn2) / columns.length : 0;
+  const webAreaIn2 = bars.curtains * bars.web.areaIn2;
+  for (const positionIn of columns) layers.push({ positionIn, areaIn2: endAreaIn2, compression: zones.ends });
+  for (const positionIn of webPlaces(bars, lengthIn)) {
+    layers.push({ positionIn, areaIn2: webAreaIn2, compression: zones.web });
   }
-  return layers.sort((a, b) => a.positionIn - b.positionIn);
+  for (const positionIn of columns.reverse()) {
+    layers.push({ positionIn: lengthIn - positionIn, areaIn2: endAreaIn2, compression: zones.ends });
+  }
+  return layers;
 }
 
 /** Steel over concrete of the web: curtains x bar area / (spacing x thickness). End-zone bars do not count. */

@@ -138,14 +138,12 @@ describe('designStrength', () => {
       ]),
     };
     const leanCurve = sectionCurve(lean, aci31819);
-    const { pieces, count } = leanCurve;
     let turns = 0;
     for (let step = 1; step < 4000; step += 1) {
       const [a, b] = [stateAt(leanCurve, step * 0.05), stateAt(leanCurve, (step + 1) * 0.05)];
       if (b.phi * b.axialKip < a.phi * a.axialKip - 1e-9) turns += 1;
     }
     expect(turns).toBeGreaterThan(0);
-    expect(pieces.length).toBe(count * 11);
     for (const axialKip of [1000, 1100, 1200, 1250]) {
       const expected = naiveStrength(lean, axialKip, 1);
       expect(Math.abs((designStrength(leanCurve, axialKip)?.phiMnKipIn ?? 0) - expected)).toBeLessThan(1e-7 * expected);

@@ -42,6 +42,22 @@ export interface SectionCurve {
 
 export const pieceWidth = 11;
 
+/** Room in which curves are made one after another without new arrays; a curve made in it lives until the next one. */
+export class CurveStore {
+  depths = new Float64Array(0);
+  pieces = new Float64Array(0);
+
+  /** Grows to the room that so many layers need. */
+  reserve(layers: number): this {
+    const depths = 5 + 3 * layers;
+    if (this.depths.length < depths) {
+      this.depths = new Float64Array(depths);
+      this.pieces = new Float64Array(depths * pieceWidth);
+    }
+    return this;
+  }
+}
+
 /** Where some bar, the block or phi changes its rule: sorted depths of the neutral axis, in, from 0 to far outside the section. */
 function breakpoints(
   section: WallSection,
@@ -49,10 +65,11 @@ function breakpoints(
   rules: CodeRules,
   beta1: number,
   farIn: number,
+  found: Float64Array,
 ): Float64Array {
   const ecu = rules.crushingStrain;
   const { layers, lengthIn } = section;
-  const found = new Float64Array(5 + 3 * layers.length);
+  found[0] = 0;
   let count = 1;
   const add = (c: number): void => {
     found[count] = c;
@@ -85,7 +102,12 @@ function breakpoints(
  * Makes the curve of a section. `steelFactor` multiplies fy (1; 1.25 for the probable strength Mpr); fy above the edition's cap for
  * flexure counts as the cap before that. A section without bars has no farthest bar: phi is that of compression throughout.
  */
-export function sectionCurve(section: WallSection, rules: CodeRules, steelFactor = 1): SectionCurve {
+export function sectionCurve(
+  section: WallSection,
+  rules: CodeRules,
+  steelFactor = 1,
+  store = new CurveStore(),
+): SectionCurve {
   const { lengthIn, thicknessIn, layers } = section;
   const fyKsi = Math.min(section.fyKsi, rules.caps.fyFlexureKsi) * steelFactor;
   const yieldStrain = fyKsi / steelModulusKsi;
@@ -102,9 +124,10 @@ export function sectionCurve(section: WallSection, rules: CodeRules, steelFactor
     steelIn2 += layer.areaIn2;
     if (layer.compression) squashKip += layer.areaIn2 * (axialFyKsi - blockKsi);
   }
-  const depths = breakpoints(section, yieldStrain, rules, beta1, farIn);
+  store.reserve(layers.length);
+  const depths = breakpoints(section, yieldStrain, rules, beta1, farIn, store.depths);
   const count = depths.length - 1;
-  const pieces = new Float64Array(count * pieceWidth);
+  const { pieces } = store;
   const compressionDepthIn = (farIn * ecu) / (ecu + yieldStrain);
   const tensionControlled = rules.tensionControlledStrain(yieldStrain);
   const tensionDepthIn = (farIn * ecu) / (ecu + tensionControlled);
