@@ -14,11 +14,23 @@ export interface PageFrameProps {
   readonly stack?: ReactNode;
   /** up to four key hints in the foot */
   readonly keys?: readonly KeyHint[];
+  /** false as long as levels, walls or forces are missing: then there is no balance to ask for */
+  readonly computes?: boolean;
   readonly children: ReactNode;
 }
 
 /** The frame of a building page: head and drawing field beside the stack column, the balance and the caution in the foot. */
-export function PageFrame({ title, sub, actions, stackTitle, stackSub, stack, keys = [], children }: PageFrameProps) {
+export function PageFrame({
+  title,
+  sub,
+  actions,
+  stackTitle,
+  stackSub,
+  stack,
+  keys = [],
+  computes = true,
+  children,
+}: PageFrameProps) {
   return (
     <>
       <aside className="contents" aria-label="Stories">
@@ -38,7 +50,7 @@ export function PageFrame({ title, sub, actions, stackTitle, stackSub, stack, ke
         </div>
         <div className="gw-sheet">{children}</div>
       </main>
-      <Foot keys={keys} />
+      <Foot keys={keys} balance={computes ? 'ask' : 'wait'} />
     </>
   );
 }

@@ -167,11 +167,21 @@ export function InputsPage() {
     <PageFrame
       title="Inputs"
       sub={tabLines[tab]}
-      stackTitle={storyCount === 0 ? 'No stories' : storyCount === 1 ? '1 story' : `${storyCount} stories`}
+      stackTitle={
+        queries.levels.isPending
+          ? ''
+          : storyCount === 0
+            ? 'No stories'
+            : storyCount === 1
+              ? '1 story'
+              : `${storyCount} stories`
+      }
       stackSub={
-        storyCount === 0
-          ? 'they come with levels.csv'
-          : `${view.height.toFixed(units === 'us' ? 1 : 2)} ${units === 'us' ? 'ft' : 'm'} above the base`
+        queries.levels.isPending
+          ? ''
+          : storyCount === 0
+            ? 'they come with levels.csv'
+            : `${view.height.toFixed(units === 'us' ? 1 : 2)} ${units === 'us' ? 'ft' : 'm'} above the base`
       }
       stack={
         storyCount === 0 ? null : (
@@ -186,6 +196,7 @@ export function InputsPage() {
           />
         )
       }
+      computes={allRows.levels.length > 0 && allRows.walls.length > 0 && allRows.forces.length > 0}
       keys={tab === 'settings' ? [] : hints}
       actions={
         canEdit ? (
