@@ -1,4 +1,4 @@
-import { mkdtempSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdtempSync, readdirSync, rmSync, utimesSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 
@@ -11,7 +11,7 @@ import { Computing } from './Computing.ts';
 import { contentKey } from './contentKey.ts';
 import { Lru } from './Lru.ts';
 import { ResultFiles } from './ResultFiles.ts';
-import type { RunAnswer, Runner } from './Runner.ts';
+import type { Computed, RunAnswer, Runner } from './Runner.ts';
 
 const input: BuildingInput = {
   settings: { ...settingsDefaults('us'), name: 'B' },
@@ -60,6 +60,16 @@ describe('Computing', () => {
     rmSync(folder, { recursive: true });
     await new Computing(runner, new ResultFiles(folder)).compute('k', input, []);
     expect(runs).toBe(3);
+  });
+
+  it('lets the oldest files go when the folder holds more than it may', async () => {
+    for (const [nth, key] of ['old', 'older'].entries()) {
+      const file = join(folder, `${key}.result.json.gz`);
+      writeFileSync(file, Buffer.alloc(1000));
+      utimesSync(file, 1000 - nth, 1000 - nth);
+    }
+    await new ResultFiles(folder, 1500).write('new', answer as Computed);
+    expect(readdirSync(folder).sort()).toEqual(['new.result.json.gz', 'new.schedule.json.gz', 'old.result.json.gz']);
   });
 
   it('keeps refusals in memory and writes no file of them', async () => {

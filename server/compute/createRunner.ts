@@ -16,20 +16,25 @@ export function inlineRunner(): Runner {
   };
 }
 
-/** Waiting computations beyond this many are turned away with 503. */
-const longestQueue = 64;
+export interface PoolLimits {
+  readonly threads: number;
+  /** waiting computations beyond this many are turned away with 503 */
+  readonly longestQueue: number;
+}
+
+const productionLimits = (): PoolLimits => ({ threads: Math.max(1, availableParallelism() - 1), longestQueue: 64 });
 
 /** In threads, so that one large building does not stop everybody else. */
-export function pooledRunner(workerFile: string): Runner {
+export function pooledRunner(workerFile: string, limits: PoolLimits = productionLimits()): Runner {
   const pool = new Piscina({
     filename: workerFile,
     minThreads: 1,
-    maxThreads: Math.max(1, availableParallelism() - 1),
-    maxQueue: longestQueue,
+    maxThreads: limits.threads,
+    maxQueue: limits.longestQueue,
     idleTimeout: 600_000,
   });
   const inPool = async <T>(task: unknown): Promise<T> => {
-    if (pool.queueSize >= longestQueue) {
+    if (pool.queueSize >= limits.longestQueue) {
       throw new HttpError(503, 'busy', 'Too many computations are waiting.', { retryAfterSeconds: 2 });
     }
     const answer: T = await pool.run(task);
