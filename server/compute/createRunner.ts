@@ -22,7 +22,8 @@ export interface PoolLimits {
   readonly longestQueue: number;
 }
 
-const productionLimits = (): PoolLimits => ({ threads: Math.max(1, availableParallelism() - 1), longestQueue: 64 });
+/** Two at least: a long workbook must not stand in the way of a short check. */
+const productionLimits = (): PoolLimits => ({ threads: Math.max(2, availableParallelism() - 1), longestQueue: 64 });
 
 /** In threads, so that one large building does not stop everybody else. */
 export function pooledRunner(workerFile: string, limits: PoolLimits = productionLimits()): Runner {
