@@ -1,5 +1,5 @@
 /** Met by choosing from a list, often exactly: they enter a row's ratio only where they are not met. */
-const detailing = new Set(['curtains', 'splice', 'spacing', 'fit', 'thickness']);
+const detailing = new Set(['curtains', 'splice', 'spacing', 'fit', 'thickness', 'ties']);
 
 /** Rows against the checks behind them, and quantities against their parts: lines for all that does not hold. */
 export function judgeRows(building, result) {

@@ -5,6 +5,7 @@ import a02 from '../../../fixtures/published/A02-Taly-7-2-fixed.json';
 import a03 from '../../../fixtures/published/A03-Taly-E7-7.json';
 import a04 from '../../../fixtures/published/A04-Taly-7-8-solid-and-piers.json';
 import a08 from '../../../fixtures/published/A08-closedform-uniform.json';
+import k03 from '../../../fixtures/published/K03-Ec-table.json';
 import { settingsDefaults } from '../../contracts/settingsDefaults.ts';
 import { runBuilding } from '../../result/runBuilding.ts';
 import { handPlan } from '../properties/handPlan.ts';
@@ -15,6 +16,7 @@ import { withinTolerance } from '../properties/withinTolerance.ts';
  * A01 UFC 3-310-03A / TI 809-04, Seismic Design for Buildings, US Army Corps of Engineers, 2005 reissue, Problem H1, p. H1-19.
  * A02 Taly, Design of Reinforced Masonry Structures, 2nd ed., McGraw-Hill, sec. 7.4.3, p. 7.17.
  * A03 the same, Example 7.7, Table E7.7, p. 7.35. A04 the same, Example 7.8, pp. 7.38 and 7.39.
+ * K03 McCormac and Brown, Design of Reinforced Concrete, 9th ed., Wiley, Table A.1 (33 wc^1.5 sqrt(f'c) at 145 pcf).
  * A08 handbook closed form (identity, partly from memory).
  * The sources' walls are masonry or unit walls; rigidity is linear in E t, so the engine's k is scaled by E t alone.
  */
@@ -22,11 +24,16 @@ type End = 'cantilever' | 'fixed';
 
 /** k of a solid uncracked wall over E t, where G = 0.4 E and the shear factor is 1.2: a function of h/d and the end alone. */
 function rigidityOverEt(height: number, length: number, end: End): number {
+  return rigidity(height, length, end, 5000, null) / (((57_000 * Math.sqrt(5000)) / 1000) * 10);
+}
+
+/** k of a solid uncracked wall 10 in thick, kip/in. */
+function rigidity(height: number, length: number, end: End, fc: number, unitWeight: number | null): number {
   const settings = {
     ...settingsDefaults('us'),
     name: 'Pier',
-    fc: 5000,
-    stiffness: { flexure: 1, shear: 1, end, unitWeight: null },
+    fc,
+    stiffness: { flexure: 1, shear: 1, end, unitWeight },
   };
   const outcome = runBuilding(
     handPlan(
@@ -45,8 +52,7 @@ function rigidityOverEt(height: number, length: number, end: End): number {
     ),
   );
   if (!outcome.ok) throw new Error(JSON.stringify(outcome.problems));
-  const k = outcome.document.rigidities.find(({ wall }) => wall === 'T')?.k ?? NaN;
-  return k / (((57_000 * Math.sqrt(5000)) / 1000) * 10);
+  return outcome.document.rigidities.find(({ wall }) => wall === 'T')?.k ?? NaN;
 }
 
 describe('UFC 3-310-03A, Problem H1, p. H1-19: solid wall less strip plus piers, kip and in', () => {
@@ -109,4 +115,17 @@ describe('closed form for a load at the top', () => {
     expect(load / rigidityOverEt(30, 6, 'cantilever')).toBeCloseTo(outputs.delta_point_m, 11);
     expect(load / rigidityOverEt(30, 6, 'fixed')).toBeCloseTo(outputs.delta_fixed_top_m, 11);
   });
+});
+
+describe('McCormac and Brown, 9th ed., Table A.1: modulus of concrete of 145 pcf', () => {
+  it.each(k03.inputs["f'c_psi"].map((fc, i) => [fc, k03.outputs.Ec_psi[i] ?? NaN] as const))(
+    "f'c %d psi: Ec %d psi",
+    (fc, printed) => {
+      const modulusKsi = rigidity(12, 20, 'cantilever', fc, 145) / (rigidityOverEt(12, 20, 'cantilever') * 10);
+      expect(withinTolerance(modulusKsi * 1000, printed, k03.tolerance)).toBe(true);
+      // 57,000 sqrt(f'c) lies about 1 % below, as 19.2.2.1 b gives it
+      const plainKsi = rigidity(12, 20, 'cantilever', fc, null) / (rigidityOverEt(12, 20, 'cantilever') * 10);
+      expect(plainKsi * 1000).toBeCloseTo(57_000 * Math.sqrt(fc), 4);
+    },
+  );
 });
