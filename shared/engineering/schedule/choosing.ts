@@ -3,10 +3,13 @@ import type { ScheduleCells } from '../wall-design/designTypes.ts';
 /** 2 % of score for each bar size that a wall does not have yet (engineering.md section 7). */
 export const extraSizeShare = 0.02;
 
-/** Mass with 2 % for every size that is new to the wall. */
+/** Mass with 2 % for every size that is new to the wall; the wall's first size is no extra. */
 export function score(massLb: number, sizes: readonly number[], used: ReadonlySet<number>): number {
-  const fresh = new Set(sizes.filter((size) => !used.has(size)));
-  return massLb * (1 + extraSizeShare * Math.max(0, fresh.size - (used.size === 0 ? 1 : 0)));
+  let fresh = used.size === 0 ? -1 : 0;
+  sizes.forEach((size, index) => {
+    if (!used.has(size) && sizes.indexOf(size) === index) fresh += 1;
+  });
+  return massLb * (1 + extraSizeShare * Math.max(0, fresh));
 }
 
 /** The cells of the band above that nothing below may undercut. */

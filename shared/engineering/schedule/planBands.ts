@@ -67,7 +67,18 @@ function firstHorizontal(lists: BarLists): HorizontalCell {
   return { curtains: 1, bar: size, spacing, end: 'hook' };
 }
 
-const same = (a: readonly BandPlan[], b: readonly BandPlan[]): boolean => JSON.stringify(a) === JSON.stringify(b);
+function samePlan(a: BandPlan, b: BandPlan): boolean {
+  const ends =
+    a.ends === null || b.ends === null
+      ? a.ends === b.ends
+      : a.ends.bar === b.ends.bar && a.ends.count === b.ends.count && a.ends.length === b.ends.length;
+  const grid = (one: BandPlan['vertical'], other: BandPlan['vertical']): boolean =>
+    one.curtains === other.curtains && one.bar === other.bar && one.spacing === other.spacing;
+  return ends && a.tied === b.tied && grid(a.vertical, b.vertical) && grid(a.horizontal, b.horizontal);
+}
+
+const same = (a: readonly BandPlan[], b: readonly BandPlan[]): boolean =>
+  a.length === b.length && a.every((plan, index) => samePlan(plan, b[index] as BandPlan));
 
 /**
  * Bars of all bands of a wall, given and returned from the top band down: vertical steel of all bands, then horizontal steel, in

@@ -4,7 +4,18 @@ import type { Bar } from '../wall-design/bars.ts';
 import type { DetailLimits } from '../wall-design/detailLimits.ts';
 import type { HorizontalBars, LapsInInches } from '../wall-design/reinforcement.ts';
 
-const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
+function sum(values: readonly number[]): number {
+  let total = 0;
+  for (const value of values) total += value;
+  return total;
+}
+
+/** Rows of bars at a spacing over every story: ceil(h/s), a sliver of 1e-9 adding none. */
+function rowsOf(heightsIn: readonly number[], spacingIn: number): number {
+  let rows = 0;
+  for (const heightIn of heightsIn) rows += Math.ceil(heightIn / spacingIn - 1e-9);
+  return rows;
+}
 
 /**
  * Mass of a band's vertical bars in lb: every bar runs the story and is lapped once a story (common practice), so its length is
@@ -34,7 +45,7 @@ export function horizontalMass(
   lapIn: number,
   limits: DetailLimits,
 ): number {
-  const rows = sum(heightsIn.map((heightIn) => Math.ceil(heightIn / horizontal.spacingIn - 1e-9)));
+  const rows = rowsOf(heightsIn, horizontal.spacingIn);
   const laps = Math.ceil(lengthIn / limits.stockIn - 1e-9) - 1;
   const barIn = lengthIn + laps * lapIn + 24 * horizontal.bar.diameterIn;
   return rows * horizontal.curtains * barIn * horizontal.bar.massLbPerIn;
@@ -48,7 +59,7 @@ export function tieMass(
   coverIn: number,
   heightsIn: readonly number[],
 ): number {
-  const sets = 2 * sum(heightsIn.map((heightIn) => Math.ceil(heightIn / ties.spacingIn - 1e-9)));
+  const sets = 2 * rowsOf(heightsIn, ties.spacingIn);
   const hooksIn = 2 * Math.max(3, 6 * ties.bar.diameterIn);
   const acrossIn = thicknessIn - 2 * coverIn;
   const hoopIn = 2 * (zoneLengthIn - coverIn + acrossIn) + hooksIn;

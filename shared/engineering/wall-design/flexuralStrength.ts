@@ -98,18 +98,13 @@ function turningDepths(pieces: Float64Array, at: number, from: number, to: numbe
   return turns.length === 0 ? noTurns : turns;
 }
 
-/**
- * Calls `found` with every c at which the curve carries the target. Pieces meet with jumps where the block reaches a bar, so each
- * piece is searched by itself, and between its turns.
- */
-function eachRoot(
-  curve: SectionCurve,
-  targetKip: number,
-  reduced: boolean,
-  found: (at: number, c: number) => void,
-): void {
-  const { pieces, count } = curve;
+/** Stretches of a curve in which phi Pn (or Pn) only grows or only falls: piece, from, to and the values at both, five numbers a run. */
+const runWidth = 5;
+type Runs = readonly number[];
+
+function monotoneRuns({ pieces, count }: SectionCurve, reduced: boolean): Runs {
   const value = reduced ? reducedAt : axialAt;
+  const runs: number[] = [];
   for (let piece = 0; piece < count; piece += 1) {
     const at = piece * pieceWidth;
     const from = pieces[at] as number;
@@ -120,14 +115,49 @@ function eachRoot(
     for (let index = 0; index <= turns.length; index += 1) {
       const high = index < turns.length ? (turns[index] as number) : to;
       const highValue = value(pieces, at, high);
-      if (lowValue === targetKip) found(at, low);
-      else if (highValue === targetKip) found(at, high);
-      else if (lowValue < targetKip !== highValue < targetKip) {
-        found(at, bisect(value, pieces, at, low, high, targetKip));
-      }
+      runs.push(at, low, high, lowValue, highValue);
       low = high;
       lowValue = highValue;
     }
+  }
+  return runs;
+}
+
+const knownRuns = { reduced: new WeakMap<SectionCurve, Runs>(), nominal: new WeakMap<SectionCurve, Runs>() };
+
+function runsOf(curve: SectionCurve, reduced: boolean): Runs {
+  const known = reduced ? knownRuns.reduced : knownRuns.nominal;
+  let runs = known.get(curve);
+  if (!runs) {
+    runs = monotoneRuns(curve, reduced);
+    known.set(curve, runs);
+  }
+  return runs;
+}
+
+/**
+ * Calls `found` with every c at which the curve carries the target. Pieces meet with jumps where the block reaches a bar, so each
+ * piece is searched by itself, and between its turns.
+ */
+function eachRoot(
+  curve: SectionCurve,
+  targetKip: number,
+  reduced: boolean,
+  found: (at: number, c: number) => void,
+): void {
+  const { pieces } = curve;
+  const value = reduced ? reducedAt : axialAt;
+  const runs = runsOf(curve, reduced);
+  for (let run = 0; run < runs.length; run += runWidth) {
+    const lowValue = runs[run + 3] as number;
+    const highValue = runs[run + 4] as number;
+    if (lowValue < targetKip ? highValue < targetKip : highValue > targetKip && lowValue > targetKip) continue;
+    const at = runs[run] as number;
+    const low = runs[run + 1] as number;
+    const high = runs[run + 2] as number;
+    if (lowValue === targetKip) found(at, low);
+    else if (highValue === targetKip) found(at, high);
+    else found(at, bisect(value, pieces, at, low, high, targetKip));
   }
 }
 
