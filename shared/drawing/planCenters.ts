@@ -77,16 +77,8 @@ export function drawCenters(
   const alongX = Math.abs(mass.x - rigidity.x);
   const alongY = Math.abs(mass.y - rigidity.y);
   if (alongX < closest && alongY < closest) {
-    const left = rigidity.x <= mass.x;
-    const names = [
-      note(rigidityName, rigidity.x + (left ? -34 : 34), rigidity.y + 26, left ? 'end' : 'start'),
-      note(input.massName, mass.x + (left ? 34 : -34), mass.y + 26, left ? 'start' : 'end'),
-    ];
-    const leaders = [
-      dim(rigidity.x + (left ? -6 : 6), rigidity.y + 6, rigidity.x + (left ? -30 : 30), rigidity.y + 22),
-      dim(mass.x + (left ? 6 : -6), mass.y + 6, mass.x + (left ? 30 : -30), mass.y + 22),
-    ];
-    return { under: [...leaders, ...names], over, boxes: [...marks, ...names.map(around)] };
+    const { lines, texts } = nameWithLeaders(input, mass, rigidity, walls);
+    return { under: [...lines, ...texts], over, boxes: [...marks, ...texts.map(around)] };
   }
   const build = (off: number): { lines: DrawingElement[]; texts: TextElement[] } =>
     alongX >= closest
@@ -101,6 +93,45 @@ export function drawCenters(
     if (cost(next.texts) < cost(best.texts)) best = next;
   }
   return { under: [...best.lines, ...best.texts], over, boxes: [...marks, ...best.texts.map(around)] };
+}
+
+/** px from a center to where its name begins, in the order they are tried; the two names go to opposite sides */
+const nameOffsets: readonly (readonly [across: number, down: number])[] = [
+  [34, 26],
+  [34, -26],
+  [34, 50],
+  [34, -50],
+  [34, 74],
+  [56, 98],
+  [56, -74],
+];
+
+/** Names of two centers that nearly meet: each with a leader to its own side, where it is written over the least. */
+function nameWithLeaders(
+  input: PlanInput,
+  mass: PlanPoint,
+  rigidity: PlanPoint,
+  walls: readonly LabelBox[],
+): { lines: DrawingElement[]; texts: TextElement[] } {
+  const rigidityLeft = rigidity.x <= mass.x;
+  const lines: DrawingElement[] = [];
+  const texts: TextElement[] = [];
+  for (const [name, center, side] of [
+    [rigidityName, rigidity, rigidityLeft ? -1 : 1],
+    [input.massName, mass, rigidityLeft ? 1 : -1],
+  ] as const) {
+    const anchor = side < 0 ? 'end' : 'start';
+    const tries = nameOffsets.map(([across, down]) => {
+      const text = note(name, center.x + side * across, center.y + down, anchor);
+      return { text, across, down, cost: overlapArea(around(text), walls) };
+    });
+    const best = tries.reduce((before, next) => (next.cost < before.cost ? next : before));
+    const toY = center.y + best.down - 4;
+    const startY = center.y + (best.down < 0 ? -7 : 7);
+    lines.push(dim(center.x + side * 6, startY, center.x + side * (best.across - 4), toY));
+    texts.push(best.text);
+  }
+  return { lines, texts };
 }
 
 const strong = (text: TextElement): TextElement => ({ ...text, weight: 500, fill: 'ink' });

@@ -21,7 +21,7 @@ export function drawSlab(input: PlanInput, scale: PlanScale): DrawingElement[] {
   const { left, right, top, bottom } = scale.slab;
   const unit = input.units === 'us' ? 'ft' : 'm';
   const above = planMargin.top - 22;
-  const beside = left - 22;
+  const beside = left - 30;
   const text = (x: number, y: number, words: string): DrawingElement => ({
     shape: 'text',
     x: round2(x),

@@ -100,7 +100,7 @@ export function StoryTable({ wall, stories, cases, units, chosenLevel, onChooseL
 
 function GroupHead({ span, text }: { span: number; text: string }): ReactElement {
   return (
-    <th colSpan={span} className="num">
+    <th colSpan={span} className="border-b-0! pl-3!">
       <span className="block border-b border-line text-note font-normal text-graphite">{text}</span>
     </th>
   );
