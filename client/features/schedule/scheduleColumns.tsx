@@ -90,7 +90,7 @@ export function scheduleColumns(setting: ColumnSetting): readonly Column[] {
       group: 'Wall, inputs',
       align: 'right',
       mono: true,
-      width: 54,
+      width: 60,
       text: (row) => formatNumber(row.fc, 0),
       render: (row) => <Notation text={formatNumber(row.fc, 0)} />,
       describe: () => readOnlyText,
