@@ -1,6 +1,6 @@
 import { AsyncLocalStorage } from 'node:async_hooks';
 
-import type { DataSource } from 'typeorm';
+import type { DataSource, EntityManager } from 'typeorm';
 
 import { readiness, type Readiness } from './readiness.ts';
 import { Store } from './Store.ts';
@@ -66,20 +66,15 @@ export function createGate(dataSource: DataSource, options: GateOptions): Gate {
   };
 
   const gate: Gate = {
-    read(work) {
+    read<T>(work: (store: Store) => Promise<T>): Promise<T> {
       const open = current.getStore();
       if (open !== undefined) return work(open.store);
+      const reading = (manager: EntityManager): Promise<T> => {
+        const store = new Store(manager);
+        return timed('read', false, () => current.run({ store, kind: 'read' }, () => work(store)));
+      };
       return inTurn(() =>
-        timed('read', false, () => {
-          if (postgres) {
-            return dataSource.transaction('REPEATABLE READ', (manager) => {
-              const store = new Store(manager);
-              return current.run({ store, kind: 'read' }, () => work(store));
-            });
-          }
-          const store = new Store(dataSource.manager);
-          return current.run({ store, kind: 'read' }, () => work(store));
-        }),
+        postgres ? dataSource.transaction('REPEATABLE READ', reading) : reading(dataSource.manager),
       );
     },
     async write(work, { long = false } = {}) {
@@ -90,12 +85,10 @@ export function createGate(dataSource: DataSource, options: GateOptions): Gate {
       }
       const once = () =>
         inTurn(() =>
-          timed('write', long, () =>
-            dataSource.transaction((manager) => {
-              const store = new Store(manager);
-              return current.run({ store, kind: 'write' }, () => work(store));
-            }),
-          ),
+          dataSource.transaction((manager) => {
+            const store = new Store(manager);
+            return timed('write', long, () => current.run({ store, kind: 'write' }, () => work(store)));
+          }),
         );
       try {
         return await once();
