@@ -129,14 +129,18 @@ export function chooseVertical(question: VerticalQuestion): VerticalChoice {
   );
 }
 
-/** The last rung of each ladder is its strongest; the one least over wins, the lighter at equal ratios. */
+/**
+ * The last rung of each ladder is its strongest; the one least over wins, the lighter at equal ratios. Where an axial force is outside
+ * of every arrangement's limits no ratio tells them apart, and the heaviest wins.
+ */
 function strongest(ladders: readonly (readonly Candidate[])[], ratioOf: (candidate: Candidate) => number): Candidate {
   let best: Candidate | null = null;
   let bestRatio = Infinity;
   for (const ladder of ladders) {
     const last = ladder[ladder.length - 1] as Candidate;
     const ratio = ratioOf(last);
-    if (best === null || ratio < bestRatio || (ratio === bestRatio && last.score < best.score)) {
+    const lighter = best !== null && last.score < best.score;
+    if (best === null || ratio < bestRatio || (ratio === bestRatio && lighter === ratio < Infinity)) {
       best = last;
       bestRatio = ratio;
     }

@@ -106,6 +106,16 @@ describe('automatic choice', () => {
     expect(base?.cells.ends).not.toBeNull();
   });
 
+  it('gives the heaviest where the axial force is outside every arrangement`s limits', () => {
+    const { rows } = design({ deadKip: 1500, windKip: 1 });
+    const base = rows[rows.length - 1];
+    expect(base?.ok).toBe(false);
+    expect(base?.ratio).toBeNull();
+    expect(base?.governs).toMatchObject({ check: 'flexure' });
+    // 24 No. 10 (30.5 in2 in 64 in); of No. 11 only 18 stay within 4 % and 0.6 of the length (28.1 in2)
+    expect(base?.cells.ends).toMatchObject({ bar: 10, count: 24 });
+  });
+
   it('says where the out-of-plane aid fails', () => {
     const { rows } = design({ windKip: 50 });
     expect(rows[rows.length - 1]?.notDesigned).toEqual(['out-of-plane slenderness to 11.4/11.8 needed']);

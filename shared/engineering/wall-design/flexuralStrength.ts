@@ -50,9 +50,11 @@ type PieceFunction = (pieces: Float64Array, at: number, c: number) => number;
 const reducedAt: PieceFunction = (pieces, at, c) => valueAt(pieces, at, true, c);
 
 /**
- * Halves [low, high] until no number lies between; the function takes the target between its ends. Throws where it does not close.
+ * Closes on the target between low and high, where the function takes it: false position with the Illinois halving of the end that stays,
+ * always inside the bracket, and plain halving where that stalls. Ends where the value meets the target to its last bits (1e-15 of the
+ * magnitudes involved) or no number lies between. Throws where it does not close.
  */
-function bisect(
+function close(
   value: PieceFunction,
   pieces: Float64Array,
   at: number,
@@ -60,17 +62,26 @@ function bisect(
   high: number,
   target: number,
 ): number {
-  const rising = value(pieces, at, high) >= value(pieces, at, low);
-  let from = low;
-  let to = high;
+  let [from, to] = [low, high];
+  let fromGap = value(pieces, at, from) - target;
+  let toGap = value(pieces, at, to) - target;
+  const enough = 1e-15 * (Math.abs(fromGap) + Math.abs(toGap) + Math.abs(target));
   for (let step = 0; step < 2200; step += 1) {
     const middle = from + (to - from) / 2;
-    if (middle <= from || middle >= to) {
-      const fromError = Math.abs(value(pieces, at, from) - target);
-      return fromError <= Math.abs(value(pieces, at, to) - target) ? from : to;
+    if (middle <= from || middle >= to) return Math.abs(fromGap) <= Math.abs(toGap) ? from : to;
+    const secant = from - (fromGap * (to - from)) / (toGap - fromGap);
+    const c = step < 40 && secant > from && secant < to ? secant : middle;
+    const gap = value(pieces, at, c) - target;
+    if (Math.abs(gap) <= enough) return c;
+    if (gap < 0 === fromGap < 0) {
+      from = c;
+      fromGap = gap;
+      toGap /= step < 40 ? 2 : 1;
+    } else {
+      to = c;
+      toGap = gap;
+      fromGap /= step < 40 ? 2 : 1;
     }
-    if (value(pieces, at, middle) < target === rising) from = middle;
-    else to = middle;
   }
   throw new Error(`neutral axis did not close between ${String(low)} and ${String(high)} in`);
 }
@@ -90,7 +101,7 @@ function turningDepths(pieces: Float64Array, at: number, from: number, to: numbe
   const turns: number[] = [];
   const search = (low: number, high: number): void => {
     if (slopeAt(pieces, at, low) * slopeAt(pieces, at, high) < 0) {
-      turns.push(bisect(slopeAt, pieces, at, low, high, 0));
+      turns.push(close(slopeAt, pieces, at, low, high, 0));
     }
   };
   if (star > from) search(from, star);
@@ -157,7 +168,7 @@ function eachRoot(
     const high = runs[run + 2] as number;
     if (lowValue === targetKip) found(at, low);
     else if (highValue === targetKip) found(at, high);
-    else found(at, bisect(value, pieces, at, low, high, targetKip));
+    else found(at, close(value, pieces, at, low, high, targetKip));
   }
 }
 
@@ -173,7 +184,7 @@ function smallest(curve: SectionCurve, targetKip: number, reduced: boolean): Fle
 }
 
 /**
- * Design strength at a factored axial force: phi Pn(c) = Pu solved for c by exact pieces and bisection to the last bit; where several
+ * Design strength at a factored axial force: phi Pn(c) = Pu solved for c by exact pieces, bracketed to the last bits; where several
  * c do, the smallest phi Mn (22.4, 21.2.2). Pu in kip, compression positive. Null outside phi Pn,max (22.4.2.1) and 0.90 As fy in tension.
  */
 export function designStrength(curve: SectionCurve, axialKip: number): FlexuralState | null {
