@@ -153,6 +153,26 @@ describe('SchedulePage', () => {
     expect(screen.queryByRole('alert', { name: 'Conflict' })).toBeNull();
   });
 
+  it('edits the notes of the focused row', async () => {
+    const server = fakeServer({
+      ...computedAnswers(),
+      [patchRoute]: { body: { row: { ...row, version: 2 }, alsoChanged: [], seq: 8 } },
+    });
+    renderAt(address);
+    await userEvent.click(await cellOf(1, /^#4@18 EF/));
+    await userEvent.click(screen.getByRole('button', { name: 'Edit notes' }));
+    const field = screen.getByRole('textbox', { name: /Notes, P1, L2 – L3/ });
+    await userEvent.clear(field);
+    await userEvent.type(field, 'Verify at opening.{Enter}Pour break at L3.');
+    await userEvent.click(screen.getByRole('button', { name: 'Keep these notes' }));
+    await waitFor(() =>
+      expect(server.of(patchRoute)[0]?.body).toEqual({
+        version: 1,
+        notes: ['Verify at opening.', 'Pour break at L3.'],
+      }),
+    );
+  });
+
   it('undoes with Ctrl+Z', async () => {
     const server = fakeServer({ ...computedAnswers(), 'POST /api/buildings/b1/undo': refusal(409, 'nothing-to-undo') });
     renderAt(address);

@@ -16,6 +16,7 @@ import { useBuildingInput } from '../../engine/useBuildingInput.ts';
 import { editedColumns, isEditedColumn } from './cellText.ts';
 import { ConflictNote } from './ConflictNote.tsx';
 import { Leaders } from './Leaders.tsx';
+import { NotesEditor } from './NotesEditor.tsx';
 import { OrphanNotes } from './OrphanNotes.tsx';
 import type { BandElevations } from './parseColumn.ts';
 import { scheduleColumns } from './scheduleColumns.tsx';
@@ -59,6 +60,7 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
   const undo = useUndo(id);
   const input = useBuildingInput(id);
   const [cell, setCell] = useState<{ rowId: string; columnId: string } | null>(null);
+  const [notesOf, setNotesOf] = useState<string | null>(null);
   const rows = useMemo(() => filterRows(schedule.rows, filter), [schedule.rows, filter]);
   const { down, levelsOf } = choice;
   const bandOf = useCallback(
@@ -72,6 +74,7 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
   const columns = useMemo(() => scheduleColumns({ units, bandOf }), [units, bandOf]);
   const host = useRef<HTMLDivElement>(null);
   const focused = cell === null ? null : (schedule.rows.find((row) => row.id === cell.rowId) ?? null);
+  const noted = schedule.rows.find((row) => row.id === notesOf);
   const release = (row: string, columnId: string): void => {
     const stored = schedule.rows.find((one) => one.id === row);
     if (!isEditedColumn(columnId) || !stored?.overwritten.includes(editedColumns[columnId])) return;
@@ -89,7 +92,23 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
         onTakeAuto={() => {
           if (cell) release(cell.rowId, cell.columnId);
         }}
+        onEditNotes={() => setNotesOf(focused?.id ?? null)}
       />
+      {noted ? (
+        <NotesEditor
+          key={noted.id}
+          row={noted}
+          onKeep={(notes) => {
+            edits.send({ rowId: noted.id, own: { notes } });
+            setNotesOf(null);
+          }}
+          onTakeAuto={() => {
+            edits.send({ rowId: noted.id, release: ['notes'] });
+            setNotesOf(null);
+          }}
+          onLeave={() => setNotesOf(null)}
+        />
+      ) : null}
       {error ? (
         <p role="alert" className="gw-problem mb-2 text-data">
           {sentenceOf(error)}

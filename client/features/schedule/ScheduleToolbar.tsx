@@ -15,6 +15,7 @@ export interface ScheduleToolbarProps {
   canEdit: boolean;
   saving: boolean;
   onTakeAuto: () => void;
+  onEditNotes: () => void;
 }
 
 /** The focused cell beside its automatic choice, and the marks of the grid in words. */
@@ -25,21 +26,33 @@ export function ScheduleToolbar({
   canEdit,
   saving,
   onTakeAuto,
+  onEditNotes,
 }: ScheduleToolbarProps): ReactElement {
   const column = columnId !== null && isEditedColumn(columnId) ? columnId : null;
   const releasable = row !== null && column !== null && row.overwritten.includes(editedColumns[column]);
   return (
     <div className="flex h-[32px] items-center gap-3 text-note text-graphite">
       {canEdit ? (
-        <Button
-          className="h-[24px] text-note"
-          aria-disabled={!releasable}
-          onClick={() => {
-            if (releasable) onTakeAuto();
-          }}
-        >
-          Take auto selection
-        </Button>
+        <>
+          <Button
+            className="h-[24px] text-note"
+            aria-disabled={!releasable}
+            onClick={() => {
+              if (releasable) onTakeAuto();
+            }}
+          >
+            Take auto selection
+          </Button>
+          <Button
+            className="h-[24px] text-note"
+            aria-disabled={row === null}
+            onClick={() => {
+              if (row !== null) onEditNotes();
+            }}
+          >
+            Edit notes
+          </Button>
+        </>
       ) : (
         <span>Your role reads the schedule; engineers edit it.</span>
       )}

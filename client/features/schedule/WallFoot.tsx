@@ -31,7 +31,16 @@ export function WallFoot({ rows, quantities, units }: WallFootProps): ReactEleme
         <ul className="flex flex-wrap overflow-hidden">
           {wallNotes(rows).map((note) => (
             <li key={note.text} className="-ml-[17px] border-l border-line pr-[33px] pl-4">
-              {note.text}
+              <span
+                className={
+                  note.own
+                    ? 'border-l-[3px] border-ochre pl-2 underline decoration-ochre decoration-2 underline-offset-[3px]'
+                    : ''
+                }
+              >
+                {note.text}
+              </span>
+              {note.own ? <span className="sr-only">, overwritten</span> : null}
               {note.where === null ? null : <span className="text-graphite">, {note.where}</span>}
             </li>
           ))}

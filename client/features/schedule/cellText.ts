@@ -42,7 +42,7 @@ export function columnText(column: EditedColumn, cells: Cells, units: UnitSystem
     case 'lapWeb':
       return lap(cells.laps.web, units);
     case 'lapEnds':
-      return lap(cells.laps.ends, units);
+      return cells.laps.splice === 'coupler' ? 'coupler' : lap(cells.laps.ends, units);
     case 'lapHorizontal':
       return lap(cells.laps.horizontal, units);
   }

@@ -81,6 +81,18 @@ describe('parseColumn', () => {
     });
   });
 
+  it('couples end bars, and laps them again', () => {
+    const coupled = { ...withEnds, laps: { ...laps, ends: null, splice: 'coupler' as const } };
+    expect(parseColumn('lapEnds', 'Coupler', withEnds, 'us', band)).toEqual({
+      ok: true,
+      value: { laps: coupled.laps },
+    });
+    expect(columnText('lapEnds', coupled, 'us')).toBe('coupler');
+    expect(parseColumn('lapEnds', '44', coupled, 'us', band)).toMatchObject({
+      value: { laps: { ends: 44, splice: 'lap' } },
+    });
+  });
+
   it('says what it expected', () => {
     expect(parseColumn('lapWeb', 'long', withEnds, 'us', band)).toEqual({
       ok: false,

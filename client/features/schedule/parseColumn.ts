@@ -79,10 +79,14 @@ export function parseColumn(
     case 'lapWeb':
     case 'lapEnds':
     case 'lapHorizontal': {
+      if (column === 'lapEnds' && /^couplers?$/i.test(text.trim())) {
+        return { ok: true, value: { laps: { ...row.laps, ends: null, splice: 'coupler' } } };
+      }
       const read = readLength(text, units, units === 'us' ? 240 : 6_000, true);
       if (!read.ok) return read;
       const part = column === 'lapWeb' ? 'web' : column === 'lapEnds' ? 'ends' : 'horizontal';
-      return { ok: true, value: { laps: { ...row.laps, [part]: read.value } } };
+      const splice = part === 'ends' ? 'lap' : row.laps.splice;
+      return { ok: true, value: { laps: { ...row.laps, [part]: read.value, splice } } };
     }
   }
 }

@@ -1,7 +1,9 @@
 import { expect, it } from 'vitest';
 
 import { sample } from '../../engine/testing/sampleBuilding.ts';
+import { applyChange } from './applyChange.ts';
 import { mergeRows } from './mergeRows.ts';
+import { readNotes } from './readNotes.ts';
 import { filterRows, summarize } from './scheduleFilter.ts';
 import { toPatch } from './toPatch.ts';
 import { wallNotes } from './wallNotes.ts';
@@ -48,7 +50,26 @@ it('says each note once, with its rows where not all carry it', () => {
     notDesigned: [],
   }));
   expect(wallNotes(two)).toEqual([
-    { text: 'Lap above each floor', where: null },
-    { text: 'Dowels as bars', where: 'L2 – L3' },
+    { text: 'Lap above each floor', where: null, own: false },
+    { text: 'Dowels as bars', where: 'L2 – L3', own: false },
   ]);
+});
+
+it('shows a change before it is answered: cells, marks and what is given back', () => {
+  const [first] = rows;
+  if (!first) throw new Error('no rows');
+  const vertical = { curtains: 2, bar: 6, spacing: 12 } as const;
+  const after = applyChange(first, { rowId: first.id, own: { vertical } });
+  expect(after).toMatchObject({ vertical, overwritten: ['vertical'], ratio: first.ratio });
+  const back = applyChange(after, { rowId: first.id, release: ['vertical'] });
+  expect(back).toMatchObject({ vertical: first.automatic.vertical, overwritten: [] });
+});
+
+it('reads notes a line each within the limits of the contract', () => {
+  expect(readNotes(' Verify at opening. \n\n Pour break at L3. ')).toEqual({
+    ok: true,
+    value: ['Verify at opening.', 'Pour break at L3.'],
+  });
+  expect(readNotes('x'.repeat(301)).ok).toBe(false);
+  expect(readNotes(Array.from({ length: 21 }, () => 'n').join('\n')).ok).toBe(false);
 });

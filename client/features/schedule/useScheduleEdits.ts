@@ -6,6 +6,7 @@ import type { ScheduleResource, ScheduleResourceRow } from '#shared/contracts/sc
 import { ApiError } from '../../data/ApiError.ts';
 import { keys } from '../../data/keys.ts';
 import { usePatchSchedule } from '../../data/mutations.ts';
+import { applyChange } from './applyChange.ts';
 import { mergeRows } from './mergeRows.ts';
 import type { ScheduleChange } from './scheduleChange.ts';
 import { toPatch } from './toPatch.ts';
@@ -51,16 +52,17 @@ export function useScheduleEdits(id: string): ScheduleEdits {
   );
 
   const sendNow = useCallback(
-    async (change: ScheduleChange, version: number): Promise<void> => {
+    async (change: ScheduleChange, version: number, before: ScheduleResourceRow | undefined): Promise<void> => {
       try {
         const answer = await mutateAsync({ rowId: change.rowId, patch: toPatch(change, version) });
         store(answer.row === null ? answer.alsoChanged : [answer.row, ...answer.alsoChanged]);
         setAlsoChanged(answer.alsoChanged);
       } catch (failure) {
-        if (!(failure instanceof ApiError)) throw failure;
-        const { code, current } = failure;
+        const refusal = failure instanceof ApiError ? failure : new ApiError('internal', 0, 'The edit was not sent.');
+        const { code, current } = refusal;
         if (code === 'version' && isRow(current)) setConflict({ change, stored: current });
-        else setError(failure);
+        else setError(refusal);
+        if (before) store([isRow(current) ? current : before]);
       }
     },
     [mutateAsync, store],
@@ -74,11 +76,14 @@ export function useScheduleEdits(id: string): ScheduleEdits {
       queue.current = queue.current.then(async () => {
         const { rows = [], orphans = [] } = client.getQueryData<ScheduleResource>(keys.schedule(id)) ?? {};
         const stored = version ?? [...rows, ...orphans].find((row) => row.id === change.rowId)?.version;
-        if (stored !== undefined) await sendNow(change, stored);
+        const before = rows.find((row) => row.id === change.rowId);
+        // the cell shows the edit at once; its ratio follows with the answer
+        if (before) store([applyChange(before, change)]);
+        if (stored !== undefined) await sendNow(change, stored, before);
         setOpen((count) => count - 1);
       });
     },
-    [client, id, sendNow],
+    [client, id, sendNow, store],
   );
 
   return {

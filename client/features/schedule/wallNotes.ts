@@ -5,6 +5,8 @@ export interface WallNote {
   readonly text: string;
   /** rows that carry it, null where all do */
   readonly where: string | null;
+  /** written by a person in one of its rows */
+  readonly own: boolean;
 }
 
 const withoutStop = (note: string): string => note.replace(/\.$/, '');
@@ -20,6 +22,7 @@ export function wallNotes(rows: readonly ScheduleResourceRow[]): readonly WallNo
   }
   return [...places].map(([text, own]) => ({
     text,
+    own: own.some((row) => row.overwritten.includes('notes') && !row.automatic.notes.map(withoutStop).includes(text)),
     where: own.length === rows.length ? null : own.map((row) => printLevelRange(row.from, row.to)).join(', '),
   }));
 }
