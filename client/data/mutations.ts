@@ -4,7 +4,7 @@ import type { BuildingResource } from '#shared/contracts/buildings';
 import type { SchedulePatch, SchedulePatchAnswer } from '#shared/contracts/schedule';
 import type { Session, SignIn } from '#shared/contracts/session';
 import type { EditableTable } from '#shared/contracts/tableColumns';
-import type { CellValue, TablePatch, TableResource, UploadAnswer } from '#shared/contracts/tables';
+import type { CellValue, TablePatch, TablePatchAnswer, TableResource, UploadAnswer } from '#shared/contracts/tables';
 
 import type { ApiError } from './ApiError.ts';
 import { api } from './api.ts';
@@ -70,11 +70,11 @@ export function usePatchBuilding(id: string): UseMutationResult<BuildingResource
 export function usePatchTable<T extends EditableTable>(
   id: string,
   table: T,
-): UseMutationResult<unknown, ApiError, Partial<TablePatch>, { before: TableResource<T> | undefined }> {
+): UseMutationResult<TablePatchAnswer<T>, ApiError, Partial<TablePatch>, { before: TableResource<T> | undefined }> {
   const client = useQueryClient();
   const key = keys.table(id, table);
-  return useMutation<unknown, ApiError, Partial<TablePatch>, { before: TableResource<T> | undefined }>({
-    mutationFn: (body) => api<unknown>('PATCH', routes.table(id, table), { body }),
+  return useMutation<TablePatchAnswer<T>, ApiError, Partial<TablePatch>, { before: TableResource<T> | undefined }>({
+    mutationFn: (body) => api<TablePatchAnswer<T>>('PATCH', routes.table(id, table), { body }),
     // one after the other, in the order they were typed
     scope: { id: `table-${id}` },
     onMutate: async (patch) => {

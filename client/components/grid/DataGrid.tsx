@@ -52,8 +52,8 @@ export function DataGrid<Row extends object>({
   );
   const place = locate(state, shape);
   const pageRow = focusRowId === null ? -1 : rowIds.indexOf(focusRowId);
-  // before anyone is in the grid, the tab stop stands in the row that the page has chosen
-  const stop = state.rowId === null && pageRow >= 0 ? { row: pageRow, column: 0 } : place;
+  // while nobody is in the grid, the tab stop stands in the row that the page has chosen
+  const stop = !active && pageRow >= 0 ? { row: pageRow, column: place.column } : place;
   const range = chosenRange(state, shape);
   const ranged = state.anchor !== null;
   const lineOf = useCallback(
@@ -105,7 +105,7 @@ export function DataGrid<Row extends object>({
     const cell = cellAt(stop.row, stop.column);
     if (cell === null || !cell.editable) return;
     setNotice(null);
-    if (state.rowId === null) dispatch({ type: 'to', row: stop.row, column: stop.column });
+    dispatch({ type: 'to', row: stop.row, column: stop.column });
     dispatch({ type: 'edit', draft: draft ?? editTextOf(cell.column, cell.row) });
   };
 
@@ -233,7 +233,14 @@ export function DataGrid<Row extends object>({
         aria-multiselectable
         className={`gw-grid ${readOnly ? 'gw-grid-read' : ''}`}
         style={style}
-        onFocus={() => setActive(true)}
+        onFocus={(event) => {
+          setActive(true);
+          const row = Number(event.target.dataset.row ?? NaN);
+          const column = Number(event.target.dataset.column ?? NaN);
+          if (row >= 0 && column >= 0 && (row !== place.row || column !== place.column)) {
+            dispatch({ type: 'to', row, column });
+          }
+        }}
         onBlur={(event) => {
           if (!event.currentTarget.contains(event.relatedTarget)) setActive(false);
         }}

@@ -38,6 +38,7 @@ export function TablePane({ buildingId, table, context, canEdit, focusRowId, onF
   const undo = useUndo(buildingId);
   const [notice, setNotice] = useState<string | null>(null);
   const [focusedId, setFocusedId] = useState<string | null>(null);
+  const [addedId, setAddedId] = useState<string | null>(null);
   const { rows } = context;
   const columns = useMemo(() => inputColumns(table, context), [table, context]);
   const byId = useMemo(() => new Map(rows.map((row) => [row.id, row])), [rows]);
@@ -45,7 +46,16 @@ export function TablePane({ buildingId, table, context, canEdit, focusRowId, onF
 
   const send = (patch: Partial<TablePatch>) => {
     setNotice(null);
-    patchTable.mutate(patch, { onError: (error) => setNotice(`${wordsOf(error)} What is stored stays as it is.`) });
+    patchTable.mutate(patch, {
+      onSuccess: (answer) => {
+        // the first new row is the chosen one, ready to be typed over
+        const added = patch.inserts === undefined ? undefined : answer.rows.find((row) => !byId.has(row.id));
+        if (added === undefined) return;
+        setAddedId(added.id);
+        setFocusedId(added.id);
+      },
+      onError: (error) => setNotice(`${wordsOf(error)} What is stored stays as it is.`),
+    });
   };
   const commit = (edits: readonly GridEdit[]) => {
     send({
@@ -86,6 +96,7 @@ export function TablePane({ buildingId, table, context, canEdit, focusRowId, onF
   const onFocusCell = useCallback(
     (id: string) => {
       setFocusedId(id);
+      setAddedId(null);
       const row = byId.get(id);
       if (row !== undefined) onFocusRow(row);
     },
@@ -104,7 +115,7 @@ export function TablePane({ buildingId, table, context, canEdit, focusRowId, onF
         rowId={rowId}
         rowHeight={rowHeight}
         readOnly={!canEdit}
-        focusRowId={focusRowId}
+        focusRowId={addedId ?? focusRowId}
         onCommit={commit}
         onClear={clear}
         onUndo={() => {
