@@ -6,10 +6,14 @@ import { elevationView } from './elevationView.ts';
 
 const level = (name: string, height: number, elevation: number | null = null) =>
   ({ level: name, height, elevation }) as LevelRow;
-const wall = (from: string, to: string) => ({ wall: 'W1', x1: 0, y1: 0, x2: 10, y2: 0, from_level: from, to_level: to }) as WallRow;
+const wall = (from: string, to: string) =>
+  ({ wall: 'W1', x1: 0, y1: 0, x2: 10, y2: 0, from_level: from, to_level: to }) as WallRow;
 
 it('adds heights up from the base, and gives walls their feet and tops', () => {
-  const view = elevationView([level('Roof', 12), level('L3', 11), level('L2', 15)], [wall('L3', 'Roof'), wall('L2', 'L2')]);
+  const view = elevationView(
+    [level('Roof', 12), level('L3', 11), level('L2', 15)],
+    [wall('L3', 'Roof'), wall('L2', 'L2')],
+  );
   expect(view.stories.map((story) => [story.level, story.elevation])).toEqual([
     ['Roof', 38],
     ['L3', 26],

@@ -134,8 +134,7 @@ export type ScheduleEdit = { readonly rowId: string; readonly patch: SchedulePat
 export function usePatchSchedule(id: string): UseMutationResult<SchedulePatchAnswer, ApiError, ScheduleEdit> {
   const client = useQueryClient();
   return useMutation<SchedulePatchAnswer, ApiError, ScheduleEdit>({
-    mutationFn: ({ rowId, patch }) =>
-      api<SchedulePatchAnswer>('PATCH', routes.scheduleRow(id, rowId), { body: patch }),
+    mutationFn: ({ rowId, patch }) => api<SchedulePatchAnswer>('PATCH', routes.scheduleRow(id, rowId), { body: patch }),
     scope: { id: `schedule-${id}` },
     onSettled: () => invalidateBuilding(client, id),
   });

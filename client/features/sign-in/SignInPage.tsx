@@ -85,7 +85,7 @@ export function SignInPage() {
         <div id={problemId} role="alert" className="min-h-[16px] pt-3">
           {problem === null ? null : <p className="gw-problem">{problem}</p>}
         </div>
-        <div className="mt-2">
+        <div className="mt-3">
           <Button look="primary" type="submit" className="h-[40px]! px-5!" aria-disabled={signIn.isPending}>
             Sign in
           </Button>
