@@ -21,15 +21,23 @@ const names: Readonly<Record<Line, string>> = {
 };
 
 export interface BalanceTableProps {
-  balance: ResultBalance;
+  /** of the case in view, and of every gravity case: the four lines of a story */
+  balances: readonly ResultBalance[];
   title: string;
   units: UnitSystem;
   children?: ReactNode;
 }
 
-/** Applied against resisted at the story, line by line, with the residual of the whole. */
-export function BalanceTable({ balance, title, units, children }: BalanceTableProps): ReactElement {
-  const closed = Math.abs(balance.residual) <= closedResidual;
+/** Applied against resisted at the story: force, torque, overturning and vertical, with the residual of the whole. */
+export function BalanceTable({ balances, title, units, children }: BalanceTableProps): ReactElement {
+  const residual = balances.reduce((worst, one) => Math.max(worst, Math.abs(one.residual)), 0);
+  const closed = residual <= closedResidual;
+  const lines = balances.flatMap((balance) =>
+    balance.lines.map((one) => ({
+      ...one,
+      name: one.line === 'vertical' ? `Vertical, ${balance.case}` : names[one.line],
+    })),
+  );
   return (
     <Section title={title} aside="applied against the sum over the walls">
       <table className="gw-table">
@@ -43,12 +51,14 @@ export function BalanceTable({ balance, title, units, children }: BalanceTablePr
           </tr>
         </thead>
         <tbody>
-          {balance.lines.map(({ line, applied, resisted }) => {
+          {lines.map(({ name, line, applied, resisted }) => {
             const isMoment = line === 'torque' || line.startsWith('overturning');
             const print = isMoment ? formatMoment : formatForce;
             return (
-              <tr key={line}>
-                <th scope="row">{names[line]}</th>
+              <tr key={name}>
+                <th scope="row" className="font-normal">
+                  {name}
+                </th>
                 <td className="num">{print(applied)}</td>
                 <td className="num">{print(resisted)}</td>
                 <td className="num">{sayResidual(resisted - applied)}</td>
@@ -62,7 +72,7 @@ export function BalanceTable({ balance, title, units, children }: BalanceTablePr
             <th scope="row" colSpan={3}>
               Residual
             </th>
-            <td className={`num ${closed ? '' : 'gw-problem text-oxide'}`}>{sayResidual(balance.residual)}</td>
+            <td className={`num ${closed ? '' : 'gw-problem text-oxide'}`}>{sayResidual(residual)}</td>
             <td className="pl-3 font-normal text-graphite">{closed ? 'closed' : 'broken'}</td>
           </tr>
         </tfoot>

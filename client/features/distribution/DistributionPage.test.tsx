@@ -20,6 +20,10 @@ describe('DistributionPage', () => {
     expect(row).toHaveTextContent('50.0 %');
     const balance = screen.getByRole('region', { name: 'Balance, L2, EY' });
     expect(within(balance).getByRole('rowheader', { name: 'Force y' }).closest('tr')).toHaveTextContent('135.0');
+    // 12 x 40 kip typed and 24 + 24 + 24 + 20 ft of wall, 1 ft thick and 39 ft high, at 0.15 kcf
+    expect(within(balance).getByRole('rowheader', { name: 'Vertical, D' }).closest('tr')).toHaveTextContent('1,018.2');
+    expect(within(balance).getByRole('rowheader', { name: 'Vertical, L' }).closest('tr')).toHaveTextContent('120.0');
+    expect(within(balance).queryByRole('rowheader', { name: 'Vertical, S' })).toBeNull();
     expect(within(balance).getByText('closed')).toBeInTheDocument();
   });
 

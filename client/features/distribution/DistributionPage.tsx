@@ -24,6 +24,7 @@ import { DriftNote } from './DriftNote.tsx';
 import { RecomputeLine } from './RecomputeLine.tsx';
 import { sayCenters } from './sayCenters.ts';
 import { ShareTable } from './ShareTable.tsx';
+import { storyBalances } from './storyBalances.ts';
 import { storyShares } from './storyShares.ts';
 
 const planWidth = 690;
@@ -79,13 +80,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
   );
   const force = unitLabels.force[units];
   const perThickness = units === 'us' ? 1 / 12 : 1 / 1000;
-  const balance = document.balance.find(
-    (one) =>
-      one.basis === chosen.basis &&
-      one.case === chosen.case &&
-      one.variant === chosen.variant &&
-      one.level === level.level,
-  );
+  const balances = storyBalances(document, chosen);
   const sayWall = (name: string): string => {
     const share = shares.walls.find((one) => one.wall === name);
     if (!share) return name;
@@ -160,8 +155,8 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
         />
       </div>
       <div className="mt-4 grid gap-5 min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
-        {balance ? (
-          <BalanceTable balance={balance} title={`Balance, ${level.level}, ${chosen.case}`} units={units}>
+        {balances.length > 0 ? (
+          <BalanceTable balances={balances} title={`Balance, ${level.level}, ${chosen.case}`} units={units}>
             <RecomputeLine comparison={comparison} />
           </BalanceTable>
         ) : null}

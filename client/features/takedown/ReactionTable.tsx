@@ -22,6 +22,8 @@ export interface ReactionTableProps {
   /** sum of the shears along the story shear of the case */
   shearSum: number;
   caseText: string;
+  /** gravity brought in against the sum over the walls */
+  balanceText: string;
   units: UnitSystem;
   chosenWall: string;
   onChooseWall: (wall: string) => void;
@@ -29,7 +31,7 @@ export interface ReactionTableProps {
 
 /** What stands at the foot of every wall. */
 export function ReactionTable(props: ReactionTableProps): ReactElement {
-  const { reactions, shearSum, caseText, units, chosenWall, onChooseWall } = props;
+  const { reactions, shearSum, caseText, balanceText, units, chosenWall, onChooseWall } = props;
   const force = unitLabels.force[units];
   const shown = gravityCases.filter((name) => name === 'D' || reactions.some((one) => one.gravity[name] !== 0));
   const axialDecimals = forceDecimals(reactions.flatMap((one) => shown.map((name) => one.gravity[name])));
@@ -104,7 +106,7 @@ export function ReactionTable(props: ReactionTableProps): ReactElement {
         </tfoot>
       </table>
       <p className="note mt-2">
-        The sum of shears is taken along the story shear of the lowest story.
+        {balanceText} The sum of shears is taken along the story shear of the lowest story.
         {floating.length > 0
           ? ` ${floating.map((one) => one.wall).join(', ')}: starts above the base, not in the sums; what it brings down is not yet assigned.`
           : ''}

@@ -22,6 +22,7 @@ import { useBuilding } from '../../data/queries.ts';
 import { heightDiagrams } from './heightDiagrams.ts';
 import { ReactionTable } from './ReactionTable.tsx';
 import { baseReactions, baseShearSum } from './reactions.ts';
+import { sayGravityBalance } from './sayGravityBalance.ts';
 import { ShareSteps } from './ShareSteps.tsx';
 import { shareSteps } from './shareSteps.ts';
 import { StoryTable } from './StoryTable.tsx';
@@ -147,6 +148,7 @@ function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactE
             reactions={reactions}
             shearSum={baseShearSum(document, down, reactions, walls.rows, chosen.case)}
             caseText={`${chosen.case}${chosen.variant === '0' ? '' : `, ${sayVariant(chosen.variant, accidental)}`}, ${chosen.basis}`}
+            balanceText={sayGravityBalance(document, chosen.basis, down.at(-1)?.level ?? '')}
             units={units}
             chosenWall={wall}
             onChooseWall={chooseWall}

@@ -3,6 +3,7 @@ import { expect, it } from 'vitest';
 import { levelsDown, resultChoice } from '../../components/drawing/resultChoice.ts';
 import { sample, sampleTables } from '../../engine/testing/sampleBuilding.ts';
 import { baseReactions, baseShearSum } from './reactions.ts';
+import { sayGravityBalance } from './sayGravityBalance.ts';
 import { shareSteps } from './shareSteps.ts';
 import { caseEnvelope, variantOf, wallBases, wallStories } from './wallStories.ts';
 
@@ -68,4 +69,9 @@ it('takes a share apart so that its parts sum to it', () => {
   expect(direct).toBeCloseTo(67.5, 9);
   expect((direct ?? 0) + (torsion ?? 0) + (change ?? 0)).toBeCloseTo(total ?? 0, 12);
   expect(Math.abs(change ?? 0)).toBeGreaterThan(1);
+});
+
+it('sets gravity in against gravity out', () => {
+  // 1,018.2 kip dead with self-weight and 120 kip live
+  expect(sayGravityBalance(document, 'rigid', 'L2')).toBe('Gravity in 1,138.2, out 1,138.2 kip.');
 });
