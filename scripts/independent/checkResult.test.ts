@@ -52,16 +52,12 @@ describe('the engine agrees with the independent solver', () => {
     expect(status).toBe(0);
   });
 
-  // 6 is left out: its web has 50 bars laid, 1.001 % of the section, at a nominal 0.995 %; the engine counts them untied
-  it.each(Array.from({ length: 21 }, (_, index) => index + 1).filter((seed) => seed !== 6))(
-    'on generated building %d',
-    (seed) => {
-      const folder = generate(seed);
-      const { status, output } = check(folder, solve(folder));
-      expect(output).toContain('no difference');
-      expect(status).toBe(0);
-    },
-  );
+  it.each(Array.from({ length: 21 }, (_, index) => index + 1))('on generated building %d', (seed) => {
+    const folder = generate(seed);
+    const { status, output } = check(folder, solve(folder));
+    expect(output).toContain('no difference');
+    expect(status).toBe(0);
+  });
 });
 
 describe('the independent check sees a fault', () => {

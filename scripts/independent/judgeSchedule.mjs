@@ -3,11 +3,10 @@ import { inch, psi } from './siUnits.mjs';
 
 /**
  * Judges every story of every schedule row again (ordinary walls, ACI 318-19): flexure, shear, distributed steel, spacing,
- * curtains. Answers a list of lines, one for each judgement that differs from what the result says. `untied` says what bars
- * in compression without ties carry (11.7.4.1): `nothing`, or `up to 0.01`: they count where the steel of their part, end
- * zone and web apart, is at most 0.01 Ag of it.
+ * curtains. Answers a list of lines, one for each judgement that differs from what the result says. Bars in
+ * compression without ties carry nothing (engineering.md section 6 on 11.7.4.1).
  */
-export function judgeSchedule(building, result, solution, untied) {
+export function judgeSchedule(building, result, solution) {
   const found = { lines: [], flexure: 0, shear: 0, sections: 0, worstFlexure: 0, worstShear: 0 };
   if (result.code !== 'aci318-19' || (building.settings.wallClass ?? 'ordinary') !== 'ordinary') return found;
   const checks = new Map();
@@ -18,14 +17,14 @@ export function judgeSchedule(building, result, solution, untied) {
     for (let i = building.index.get(row.from); i <= building.index.get(row.to); i += 1) {
       const actions = solution.actions.get(JSON.stringify([row.wall, i]));
       const of = (name) => checks.get(JSON.stringify([row.wall, building.stories[i].level, name]));
-      verdict = judgeStory({ building, row, wall, i, actions, of, found, untied }) && verdict;
+      verdict = judgeStory({ building, row, wall, i, actions, of, found }) && verdict;
     }
     if (row.ok && !verdict) found.lines.push(`row ${row.wall} ${row.from} to ${row.to}: ok in the result, not ok here`);
   }
   return found;
 }
 
-function judgeStory({ building, row, wall, i, actions, of, found, untied }) {
+function judgeStory({ building, row, wall, i, actions, of, found }) {
   const { settings, system, stories } = building;
   const segment = wall.segments.get(i);
   const height = stories[wall.to].top - stories[wall.from].bottom;
@@ -38,7 +37,7 @@ function judgeStory({ building, row, wall, i, actions, of, found, untied }) {
     segment,
     bars,
     fy: settings.fy,
-    compressed: partsCompressed(row, bars, segment, unit, untied),
+    compressed: { end: row.ties !== null && row.ends !== null, web: false },
   });
   const bending = worst(actions, ({ axial, moment }) => {
     const capacity = flexure(axial);
@@ -77,18 +76,6 @@ function judgeStory({ building, row, wall, i, actions, of, found, untied }) {
     if (row.ok) found.lines.push(`${where}: ${name} has ${has.toPrecision(6)}, needs ${needs.toPrecision(6)}`);
   }
   return verdict;
-}
-
-/** Whether bars of the end zones and of the web count in compression. */
-function partsCompressed(row, bars, segment, unit, untied) {
-  const tied = row.ties !== null;
-  const endLength = row.ends === null ? 0 : row.ends.length * unit;
-  const area = (end) => bars.reduce((sum, bar) => (bar.end === end ? sum + bar.area : sum), 0);
-  const light = (steel, length) => untied === 'up to 0.01' && steel <= 0.01 * length * segment.thickness * (1 + 1e-9);
-  return {
-    end: tied || light(area(true), 2 * endLength),
-    web: (tied && row.ends === null) || light(area(false), segment.length - 2 * endLength),
-  };
 }
 
 const steelRatio = (cell, spacing, segment, system) =>

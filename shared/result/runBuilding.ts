@@ -8,6 +8,7 @@ import { engineVersion } from '../engineering/version.ts';
 import { baseShearWarnings, combinationWarnings, criteriaWarnings } from '../engineering/warnings/inputWarnings.ts';
 import { methodWarnings, unsettles } from '../engineering/warnings/methodWarnings.ts';
 import { planWarnings } from '../engineering/warnings/planWarnings.ts';
+import { materialNotices } from '../engineering/wall-design/materialNotices.ts';
 import type { DesignRow, PinnedBand } from '../engineering/wall-design/designTypes.ts';
 
 import {
@@ -141,6 +142,10 @@ function collectWarnings(
     ...combinationWarnings(analysis, set.combinations, set.zeroLoads),
     ...baseShearWarnings(building, analysis),
     ...methodWarnings(building, analysis),
+    ...materialNotices(
+      analysis.model.settings,
+      analysis.model.walls.flatMap((wall) => wall.segments.map(({ fcPsi }) => fcPsi)),
+    ),
     ...notices,
   ];
 }

@@ -111,7 +111,7 @@ export function sectionSteel(file: SectionFile, place: SectionInPlace, context: 
     ? { bar: findBar(file.units, file.ties.bar), spacingIn: file.ties.spacing * context.limits.toIn }
     : null;
   const section = sectionOf(bars, place, all, context);
-  const untied = sectionOf(bars, place, compressionZones(bars, place.thicknessIn, false, context), context);
+  const untied = sectionOf(bars, place, compressionZones(bars, false), context);
   const checks = sectionChecks(
     place,
     loadsOf(file),

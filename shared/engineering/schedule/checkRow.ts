@@ -17,8 +17,8 @@ export function checkRow(
   const first = stories[0] as WallStory;
   const reinforcement = readReinforcement(cells, context);
   const { bars } = reinforcement;
-  const zones = compressionZones(bars, first.thicknessIn, reinforcement.ties !== null, context);
-  const bare = compressionZones(bars, first.thicknessIn, false, context);
+  const zones = compressionZones(bars, reinforcement.ties !== null);
+  const bare = compressionZones(bars, false);
   const strength = strengthOf(sectionOf(bars, first, zones, context), context);
   const untied = zones.ends === bare.ends ? strength : strengthOf(sectionOf(bars, first, bare, context), context);
   const steelIn2 = verticalSteel(bars, first.lengthIn);

@@ -18,7 +18,7 @@ export function flexureJudge(needs: BandNeeds, context: DesignContext): FlexureJ
   const pairs: AxialMoment[] = [...needs.pairs];
   const store = new CurveStore();
   const solver = (bars: WallBars, tied: boolean): ((pair: AxialMoment) => number | null) => {
-    const zones = compressionZones(bars, needs.thicknessIn, tied, context);
+    const zones = compressionZones(bars, tied);
     const curve = sectionCurve(sectionOf(bars, needs, zones, context), context.rules, 1, store);
     return ({ axialKip, momentKipIn }) => ratioOf(momentKipIn, designStrength(curve, axialKip)?.phiMnKipIn ?? null);
   };

@@ -79,6 +79,13 @@ export function webRatio(curtains: number, bar: Bar, spacingIn: number, thicknes
   return (curtains * bar.areaIn2) / (spacingIn * thicknessIn);
 }
 
+/** Steel over concrete of the web as its bars are laid: between the end zones, or over the whole length without them. */
+export function laidWebRatio(bars: WallBars, lengthIn: number, thicknessIn: number): number {
+  const runIn = bars.ends ? lengthIn - 2 * bars.ends.lengthIn : lengthIn;
+  const steelIn2 = webCount(bars, lengthIn) * bars.curtains * bars.web.areaIn2;
+  return steelIn2 === 0 ? 0 : steelIn2 / (Math.max(runIn, bars.webSpacingIn) * thicknessIn);
+}
+
 /** Steel over concrete of one end zone: bars over length x thickness; 0 without one. */
 export function endRatio(ends: WallBars['ends'], thicknessIn: number): number {
   return ends ? (ends.count * ends.bar.areaIn2) / (ends.lengthIn * thicknessIn) : 0;

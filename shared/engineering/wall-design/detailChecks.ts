@@ -1,4 +1,4 @@
-import { endRatio, webRatio } from './barLayers.ts';
+import { endRatio, laidWebRatio, webRatio } from './barLayers.ts';
 import { barFit } from './barFit.ts';
 import type { DesignContext } from './designContext.ts';
 import { tieSpacingLimit } from './endTies.ts';
@@ -6,7 +6,6 @@ import type { PlainCheck } from './plainCheck.ts';
 import { plainCheck, worse } from './plainCheck.ts';
 import type { LappedBars } from './rowLaps.ts';
 import { lapNeeded } from './rowLaps.ts';
-import { compressionZones } from './reinforcement.ts';
 import type { HorizontalBars, Reinforcement, StrengthAt } from './reinforcement.ts';
 import type { ShearDemand } from './steelNeeded.ts';
 import { curtainsNeeded, leastRatios, spacingLimits } from './steelNeeded.ts';
@@ -67,8 +66,8 @@ export function thicknessCheck(thicknessIn: number, context: DesignContext): Pla
 
 /**
  * Ties around vertical bars (11.7.4.1), in one of three forms. Ties scheduled: their spacing against 25.7.2.1. None, and no zone
- * above 0.01: that ratio. None, and a zone above it: flexure must do with that zone's bars at zero stress in compression, which is
- * what `untied` gives.
+ * with more steel than 0.01 of its concrete, bars as laid: that ratio. None, and a zone above it: flexure must do with all bars at
+ * zero stress in compression, which is what `untied` gives.
  */
 export function tiesCheck(
   section: SectionInPlace,
@@ -81,12 +80,11 @@ export function tiesCheck(
     const limitIn = tieSpacingLimit(bars.ends, ties.bar, section.thicknessIn);
     return plainCheck(context, 'ties', 'tie-spacing', 'barLength', ties.spacingIn, limitIn, null);
   }
-  const zones = compressionZones(bars, section.thicknessIn, false, context);
-  if (zones.web && zones.ends) {
-    const ratio = Math.max(
-      webRatio(bars.curtains, bars.web, bars.webSpacingIn, section.thicknessIn),
-      endRatio(bars.ends, section.thicknessIn),
-    );
+  const ratio = Math.max(
+    laidWebRatio(bars, section.lengthIn, section.thicknessIn),
+    endRatio(bars.ends, section.thicknessIn),
+  );
+  if (ratio <= context.rules.tiesAboveRatio) {
     return plainCheck(context, 'ties', 'ties', 'steelRatio', ratio, context.rules.tiesAboveRatio, null);
   }
   const flexure = flexureCheck(groups, untied, context);

@@ -1,6 +1,6 @@
 import type { Bar } from './bars.ts';
 import { findBar } from './bars.ts';
-import { barLayers, endRatio, webRatio } from './barLayers.ts';
+import { barLayers } from './barLayers.ts';
 import type { CompressionZones, WallBars } from './barLayers.ts';
 import type { DesignContext } from './designContext.ts';
 import type { LapCell, ScheduleCells } from './designTypes.ts';
@@ -72,20 +72,11 @@ export function readReinforcement(cells: ScheduleCells, context: DesignContext):
 }
 
 /**
- * Which bars may count in compression (11.7.4.1): untied bars of a zone with more steel than 0.01 of its concrete count zero, end
- * zone and web each by itself; web bars are never tied.
+ * Which bars may count in compression: those that ties hold (11.7.4.1, taken on the safe side: engineering.md section 6 lets bars
+ * without ties count zero in compression whatever their amount). Ties stand around end zones only; web bars are never tied.
  */
-export function compressionZones(
-  bars: WallBars,
-  thicknessIn: number,
-  tied: boolean,
-  context: DesignContext,
-): CompressionZones {
-  const limit = context.rules.tiesAboveRatio + 1e-12;
-  return {
-    web: webRatio(bars.curtains, bars.web, bars.webSpacingIn, thicknessIn) <= limit,
-    ends: tied || endRatio(bars.ends, thicknessIn) <= limit,
-  };
+export function compressionZones(bars: Pick<WallBars, 'ends'>, tied: boolean): CompressionZones {
+  return { web: false, ends: tied && bars.ends !== null };
 }
 
 /** Strength of a section that remembers what it has solved. */

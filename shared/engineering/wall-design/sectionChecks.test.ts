@@ -47,10 +47,7 @@ function run(
   });
   const steel = readReinforcement({ ...cells, ...changes }, here);
   const strengthWith = (tied: boolean) =>
-    strengthOf(
-      sectionOf(steel.bars, section, compressionZones(steel.bars, section.thicknessIn, tied, here), here),
-      here,
-    );
+    strengthOf(sectionOf(steel.bars, section, compressionZones(steel.bars, tied), here), here);
   const layers = sectionOf(steel.bars, section, { web: true, ends: true }, here).layers;
   const steelIn2 = layers.reduce((sum, layer) => sum + layer.areaIn2, 0);
   const checks = sectionChecks(
