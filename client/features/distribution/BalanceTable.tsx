@@ -15,8 +15,8 @@ const names: Readonly<Record<Line, string>> = {
   'force x': 'Force x',
   'force y': 'Force y',
   torque: 'Torque about the origin',
-  'overturning x': 'Overturning about x',
-  'overturning y': 'Overturning about y',
+  'overturning x': 'Overturning by forces in x',
+  'overturning y': 'Overturning by forces in y',
   vertical: 'Vertical',
 };
 
