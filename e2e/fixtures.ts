@@ -6,7 +6,7 @@ export const password = 'groundward-demo';
 export const changing = { 'X-Requested-With': 'groundward' };
 
 /** Every test fails on a console error, an uncaught exception, a policy violation or a request that leaves the house. */
-export const test = base.extend<{ watched: void; expected: { errors: readonly RegExp[] } }>({
+export const test = base.extend<{ watched: null; expected: { errors: readonly RegExp[] } }>({
   expected: [{ errors: [] }, { option: true }],
   watched: [
     async ({ page, baseURL, expected }, use) => {
@@ -20,7 +20,7 @@ export const test = base.extend<{ watched: void; expected: { errors: readonly Re
         if (!url.startsWith(baseURL ?? '') && !url.startsWith('data:') && !url.startsWith('blob:'))
           seen.push(`request to ${url}`);
       });
-      await use();
+      await use(null);
       expect(seen.filter((text) => !expected.errors.some((pattern) => pattern.test(text)))).toEqual([]);
     },
     { auto: true },

@@ -2,7 +2,7 @@ import { useCallback, useEffect, useId, useMemo, useRef, useState, type CSSPrope
 
 import { CellEditor } from './CellEditor.tsx';
 import { fromClipboard, toClipboard } from './clipboardRows.ts';
-import { GridHeader, headerRows } from './GridHeader.tsx';
+import { GridHeader } from './GridHeader.tsx';
 import { keyOnCell } from './gridKeys.ts';
 import { gridLines } from './gridLines.ts';
 import { chosenRange, locate, type GridAction } from './gridReducer.ts';
@@ -212,7 +212,7 @@ export function DataGrid<Row extends object>({
     event.preventDefault();
   };
 
-  const headRows = headerRows(columns);
+  const headRows = 1;
   const template = columns.map((column) => `minmax(${column.width}px, ${column.width}fr)`).join(' ');
   const minimum = columns.reduce((sum, column) => sum + column.width, 0);
   const style: CSSProperties & Record<'--gw-columns' | '--gw-width', string> = {

@@ -40,52 +40,52 @@ export interface GridHeaderProps<Row> {
   readonly columns: readonly GridColumn<Row>[];
 }
 
-/** The rows of column heads; they stick while the rows scroll. */
+/**
+ * The column heads; they stick while the rows scroll. Heads of groups stand above for the eye only: each column says its group as
+ * a description, so that heads and cells count alike.
+ */
 export function GridHeader<Row extends object>({ columns }: GridHeaderProps<Row>) {
   const definitions = useMemo(() => toDefinitions(columns), [columns]);
   const byId = useMemo(() => new Map(columns.map((column) => [column.id, column])), [columns]);
   const table = useTable<Features, Row>({ features, columns: definitions, data: noRows });
   return (
     <div role="rowgroup" className="gw-grid-head">
-      {table.getHeaderGroups().map((headerGroup, rowIndex) => (
-        <div key={headerGroup.id} role="row" aria-rowindex={rowIndex + 1} className="gw-grid-row">
-          {headerGroup.headers.map((header) => {
-            const column = byId.get(header.column.id);
-            const span = { gridColumn: `span ${header.colSpan}` };
-            if (header.isPlaceholder) {
-              return <div key={header.id} role="presentation" style={span} />;
-            }
-            if (column === undefined) {
+      {table.getHeaderGroups().map((headerGroup, level, all) => {
+        const grouping = level < all.length - 1;
+        return (
+          <div
+            key={headerGroup.id}
+            role={grouping ? 'presentation' : 'row'}
+            aria-hidden={grouping}
+            aria-rowindex={grouping ? undefined : 1}
+            className="gw-grid-row"
+          >
+            {headerGroup.headers.map((header) => {
+              const column = byId.get(header.column.id);
+              const span = { gridColumn: `span ${header.colSpan}` };
+              if (column === undefined || grouping) {
+                return (
+                  <div key={header.id} className={header.isPlaceholder ? undefined : 'gw-grid-group'} style={span}>
+                    {header.isPlaceholder ? null : <span>{String(header.column.columnDef.header)}</span>}
+                  </div>
+                );
+              }
               return (
                 <div
                   key={header.id}
                   role="columnheader"
-                  aria-colspan={header.colSpan}
-                  className="gw-grid-group"
+                  aria-description={column.group}
+                  className={`gw-grid-heading ${column.align === 'right' ? 'num' : ''}`}
                   style={span}
                 >
-                  <span>{String(header.column.columnDef.header)}</span>
+                  {column.header}
+                  {column.unit === undefined || column.unit === '' ? null : <span className="u">{column.unit}</span>}
                 </div>
               );
-            }
-            return (
-              <div
-                key={header.id}
-                role="columnheader"
-                className={`gw-grid-heading ${column.align === 'right' ? 'num' : ''}`}
-                style={span}
-              >
-                {column.header}
-                {column.unit === undefined || column.unit === '' ? null : <span className="u">{column.unit}</span>}
-              </div>
-            );
-          })}
-        </div>
-      ))}
+            })}
+          </div>
+        );
+      })}
     </div>
   );
 }
-
-/** Rows of heads: two once any column has a group. */
-export const headerRows = <Row,>(columns: readonly GridColumn<Row>[]): number =>
-  columns.some((column) => column.group !== undefined) ? 2 : 1;
