@@ -64,6 +64,8 @@ export function chooseHorizontal(question: {
   }
   if (above) consider(above.bar, above.spacing, above.end);
   const chosen = (best ?? strongest) as HorizontalCell | null;
-  if (!chosen) throw new Error('no horizontal bars to choose from: the bar lists are empty');
-  return chosen;
+  if (chosen) return chosen;
+  // an engineer's own curtains below heavier bars: nothing in the list is as heavy as above, so that only this band's needs count
+  if (above) return chooseHorizontal({ ...question, above: null });
+  throw new Error('no horizontal bars to choose from: the bar lists are empty');
 }
