@@ -47,6 +47,7 @@ const settings = (units: UnitSystem): Settings => ({
   forceLevel: 'strength',
   expectedBaseShear: {},
   criticalLevel: {},
+  baseSprings: {},
   oopEccentricity: 0,
   bandStories: 3,
   mergeShare: 0,
@@ -180,6 +181,7 @@ export function inventedContent(units: UnitSystem, walls = 5, levels = 8): Workb
       })),
     ),
     drifts: [],
+    displacements: [],
     lateral: cases.flatMap((load) =>
       places.map(({ level, wall, story, index }) => ({
         basis: 'rigid' as const,

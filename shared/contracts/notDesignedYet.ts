@@ -23,15 +23,7 @@ export function notDesignedYet(settings: Settings): SettingProblem[] {
   };
   refuse('code', settings.code === 'aci318-14', settings.code, 'use aci318-19');
   refuse('wallClass', settings.wallClass === 'special', settings.wallClass, 'use ordinary');
-  const rigidOnly = settings.basis.length === 1 && settings.basis[0] === 'rigid';
-  refuse('basis', !rigidOnly, `[${settings.basis.join(', ')}]`, 'use ["rigid"]');
-  refuse('amplify', settings.amplify, 'true', 'use false');
-  refuse('orthogonal', settings.orthogonal !== 0, String(settings.orthogonal), 'use 0');
-  refuse('windCases', settings.windCases, 'true', 'use false');
-  refuse('liveReduction', settings.liveReduction, 'true', 'use false and give live loads as reduced');
   refuse('shearMethod', settings.shearMethod === 'detailed', settings.shearMethod, 'use simplified');
-  refuse('forcesAre', settings.forcesAre === 'story-shear', settings.forcesAre, 'use level-force');
-  refuse('forceLevel', settings.forceLevel === 'service', settings.forceLevel, 'use strength');
   const critical = Object.keys(settings.criticalLevel);
   refuse('criticalLevel', critical.length > 0, `levels for ${critical.slice(0, 5).join(', ')}`, 'leave it out');
   refuse('mergeShare', settings.mergeShare > 0, String(settings.mergeShare), 'use 0');

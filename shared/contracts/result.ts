@@ -1,4 +1,5 @@
 import type { Basis, CodeEdition, LoadStandard, UnitSystem, Warning } from '../engineering/input.ts';
+import type { BalanceLineName } from '../engineering/balance/balanceLines.ts';
 import type { LapCell, ScheduleCells, TieCell } from '../engineering/wall-design/designTypes.ts';
 
 /** result.json of the contract: the building's units, unrounded. */
@@ -14,6 +15,8 @@ export interface ResultDocument {
   readonly rigidities: readonly { level: string; wall: string; k: number }[];
   readonly distribution: readonly ResultDistribution[];
   readonly drifts: readonly ResultDrift[];
+  /** an addition to the contract: what the displaced outline is drawn from */
+  readonly displacements: readonly ResultDisplacement[];
   readonly lateral: readonly ResultLateral[];
   readonly gravity: readonly { level: string; wall: string; case: string; axial: number; moment: number }[];
   readonly transferred: readonly ResultTransferred[];
@@ -59,6 +62,16 @@ export interface ResultDrift {
   readonly torsionRatio: number | null;
   readonly ax: number | null;
   readonly theta: number | null;
+}
+
+/** at the level's own point: in or mm, and radians */
+export interface ResultDisplacement {
+  readonly case: string;
+  readonly variant: Variant;
+  readonly level: string;
+  readonly x: number;
+  readonly y: number;
+  readonly rotation: number;
 }
 
 export interface ResultLateral {
@@ -159,7 +172,7 @@ export interface ResultBalance {
   readonly residual: number;
   /** the four lines behind the residual (an addition to the contract) */
   readonly lines: readonly {
-    line: 'force x' | 'force y' | 'torque' | 'overturning x' | 'overturning y' | 'vertical';
+    line: BalanceLineName;
     applied: number;
     resisted: number;
   }[];

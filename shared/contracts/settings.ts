@@ -71,6 +71,7 @@ export const typedSettingsSchema = z.strictObject({
   forceLevel: z.enum(['strength', 'service']).optional(),
   expectedBaseShear: z.record(z.string(), z.number()).optional(),
   criticalLevel: z.record(z.string(), z.string()).optional(),
+  baseSprings: z.record(z.string(), positive).optional(),
   oopEccentricity: notNegative.optional(),
   bandStories: z.number().int().min(1).max(200).optional(),
   mergeShare: fraction.optional(),

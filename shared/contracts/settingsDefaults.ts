@@ -23,7 +23,6 @@ const barLists: Readonly<Record<UnitSystem, BarLists>> = {
 
 /**
  * building.json with nothing but name and units: the defaults of the contract and the bar lists of engineering.md section 7.
- * `basis` is [rigid] as long as the other bases are not built.
  */
 export function settingsDefaults(units: UnitSystem, code: CodeEdition = 'aci318-19'): Settings {
   const us = units === 'us';
@@ -45,7 +44,7 @@ export function settingsDefaults(units: UnitSystem, code: CodeEdition = 'aci318-
     joint: 'roughened',
     slabThickness: us ? 8 : 200,
     stiffness: { flexure: 0.5, shear: 1, end: 'cantilever', unitWeight: null },
-    basis: ['rigid'],
+    basis: ['rigid', 'compatible'],
     accidental: 0.05,
     amplify: false,
     orthogonal: 0,
@@ -67,6 +66,7 @@ export function settingsDefaults(units: UnitSystem, code: CodeEdition = 'aci318-
     forceLevel: 'strength',
     expectedBaseShear: {},
     criticalLevel: {},
+    baseSprings: {},
     oopEccentricity: 0,
     bandStories: 3,
     mergeShare: 0,

@@ -78,6 +78,8 @@ export interface Settings {
   readonly forceLevel: 'strength' | 'service';
   readonly expectedBaseShear: Readonly<Record<string, number>>;
   readonly criticalLevel: Readonly<Record<string, string>>;
+  /** rotation springs at wall bases by wall, kip-ft or kN-m per radian (an addition to the contract) */
+  readonly baseSprings: Readonly<Record<string, number>>;
   /** in or mm */
   readonly oopEccentricity: number;
   readonly bandStories: number;

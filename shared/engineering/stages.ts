@@ -1,15 +1,17 @@
-import { gravityBalance, lateralBalance } from './balance/balanceLines.ts';
+import { gravityBalance } from './balance/balanceLines.ts';
+import { lateralBalance } from './balance/lateralBalance.ts';
 import type { BalanceEntry } from './balance/balanceLines.ts';
 import { expandCombinations } from './combinations/expandCombinations.ts';
-import type { ExpandedCombination, FactoredCombination } from './combinations/expandCombinations.ts';
+import type { FactoredCombination } from './combinations/expandCombinations.ts';
 import type { BasisForces } from './combinations/wallDemand.ts';
 import { wallDemand } from './combinations/wallDemand.ts';
-import { lateralActions } from './distribution/lateralActions.ts';
+import { distribute } from './distribution/bases.ts';
+import type { Distribution } from './distribution/bases.ts';
 import type { LateralAction } from './distribution/lateralActions.ts';
-import { rigidBasis } from './distribution/rigidBasis.ts';
 import type { BasisShares } from './distribution/rigidBasis.ts';
 import type { StoryStiffness } from './distribution/storyStiffness.ts';
-import type { BuildingInput, Problem } from './input.ts';
+import type { StoryDrift } from './drift/storyDrifts.ts';
+import type { BuildingInput, Problem, Warning } from './input.ts';
 import type { Model } from './model/model.ts';
 import { toModel } from './model/toModel.ts';
 import { storyRigidities } from './rigidity/storyRigidities.ts';
@@ -17,13 +19,16 @@ import { designWall } from './schedule/designWall.ts';
 import { gravityTakedown } from './takedown/gravityTakedown.ts';
 import type { GravityTakedown } from './takedown/gravityTakedown.ts';
 import { lateralMoments } from './takedown/lateralMoments.ts';
+import { transferEffects } from './takedown/transferEffects.ts';
+import type { TransferEffects } from './takedown/transferEffects.ts';
 import { transferPoints } from './takedown/transferred.ts';
 import type { TransferPoint } from './takedown/transferred.ts';
 import type { PinnedBand, WallDemand, WallDesign } from './wall-design/designTypes.ts';
 
-/** Shares, shears and moments of one basis, `[action][story][wall]`. */
+/** Shares, shears, moments and combinations of one basis. */
 export interface BasisResult extends BasisForces {
   readonly shares: BasisShares;
+  readonly along: { readonly xKip: Float64Array; readonly yKip: Float64Array } | null;
 }
 
 /** Everything before design, as columns. */
@@ -35,10 +40,14 @@ export interface Analysis {
   readonly bases: readonly BasisResult[];
   readonly gravity: GravityTakedown;
   readonly transfers: readonly TransferPoint[];
+  readonly effects: TransferEffects | null;
+  readonly drifts: readonly StoryDrift[];
+  readonly displacements: Distribution['displacements'];
   /** one list per basis, in the order of `bases` */
   readonly balance: readonly (readonly BalanceEntry[])[];
-  readonly expansions: readonly ExpandedCombination[];
   readonly gravitySetCount: number;
+  /** what the distribution had to leave out */
+  readonly warnings: readonly Warning[];
 }
 
 export interface ChainInput {
@@ -72,46 +81,65 @@ export function* chain(input: ChainInput): Generator<StageName, ChainOutcome, vo
   const rigidities = storyRigidities(model);
   yield 'rigidity';
 
-  const actions = lateralActions(model);
-  const rigid = rigidBasis(model, rigidities, actions);
-  if ('problems' in rigid) return { ok: false, problems: rigid.problems };
+  const distribution = distribute(model, rigidities);
+  if ('problems' in distribution) return { ok: false, problems: distribution.problems };
+  const { actions } = distribution;
   yield 'distribution';
 
-  const momentKipIn = lateralMoments(model, rigid.shares.totalKip, actions.length);
-  const bases: BasisResult[] = [{ basis: 'rigid', shares: rigid.shares, shearKip: rigid.shares.totalKip, momentKipIn }];
   const gravity = gravityTakedown(model);
   const transfers = transferPoints(model);
+  const effects = transferEffects(model, actions);
+  const eccentric = expandCombinations(input.combinations, actions, model.settings, true);
+  const plain = expandCombinations(input.combinations, actions, model.settings, false);
+  const bases = distribution.bases.map(({ basis, shares, along }) => {
+    const shearKip = plus(shares.totalKip, effects?.shearKip ?? null);
+    const momentKipIn = plus(lateralMoments(model, shares.totalKip, actions.length), effects?.momentKipIn ?? null);
+    const { expansions } = along ? plain : eccentric;
+    return { basis, shares, along, shearKip, momentKipIn, axialKip: effects?.axialKip ?? null, expansions };
+  });
   yield 'takedown';
 
   const vertical = gravityBalance(model, gravity, transfers);
   const balance = bases.map((basis) => [
     ...actions.flatMap((action, index) =>
-      lateralBalance(model, action, index, basis.shearKip, basis.momentKipIn, transfers),
+      listed(action, basis.along !== null) ? lateralBalance(model, action, index, basis, effects, transfers) : [],
     ),
     ...vertical,
   ]);
   yield 'balance';
 
-  const { expansions, gravitySetCount } = expandCombinations(input.combinations, actions);
+  const { gravitySetCount } = eccentric;
   const analysis: Analysis = {
     model,
     rigidities,
-    stiffness: rigid.stiffness,
+    stiffness: distribution.stiffness,
     actions,
     bases,
     gravity,
     transfers,
+    effects,
+    drifts: distribution.drifts,
+    displacements: distribution.displacements,
     balance,
-    expansions,
     gravitySetCount,
+    warnings: distribution.warnings,
   };
   yield 'combinations';
 
   const walls: WallOutcome[] = [];
   for (let index = 0; index < model.walls.length; index += 1) {
-    const demand = wallDemand(model, gravity, bases, expansions, gravitySetCount, index);
+    const demand = wallDemand(model, gravity, bases, gravitySetCount, index);
     walls.push({ demand, design: designWall(demand, model.settings, input.pinned) });
     yield 'design';
   }
   return { ok: true, analysis, walls };
+}
+
+/** Whether results list an action in a basis: flexible floors know no accidental eccentricity, and torques of wind cases are parts only. */
+export function listed(action: LateralAction, flexible: boolean): boolean {
+  return flexible ? action.variant === '0' : action.variant !== 'torsion';
+}
+
+function plus(column: Float64Array, more: Float64Array | null): Float64Array {
+  return more === null ? column : column.map((value, index) => value + (more[index] ?? 0));
 }

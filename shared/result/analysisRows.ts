@@ -1,14 +1,19 @@
 import type {
   ResultBalance,
+  ResultDisplacement,
   ResultDistribution,
   ResultDocument,
   ResultDrift,
   ResultLateral,
   ResultLevel,
   ResultTransferred,
+  Variant,
 } from '../contracts/result.ts';
+import type { LateralAction } from '../engineering/distribution/lateralActions.ts';
+import { displacementAt } from '../engineering/drift/edgeDisplacements.ts';
 import { gravityCases } from '../engineering/model/model.ts';
 import type { Analysis } from '../engineering/stages.ts';
+import { listed } from '../engineering/stages.ts';
 import type { UnitFactors } from '../engineering/units.ts';
 
 /** Stories from the top down, as levels are read. */
@@ -57,22 +62,29 @@ export function levelRows(analysis: Analysis, units: UnitFactors): ResultLevel[]
   });
 }
 
-/** Visits every standing wall and story of every action, from the top down. */
-function visit<Row>(analysis: Analysis, make: (at: number, action: number, level: string, wall: string) => Row): Row[] {
+/** Visits every standing wall and story of every action that a basis lists, from the top down. */
+function visit<Row>(
+  analysis: Analysis,
+  flexible: boolean,
+  make: (at: number, action: LateralAction, level: string, wall: string) => Row,
+): Row[] {
   const { model, actions } = analysis;
   const plane = model.stories.length * model.walls.length;
   const rows: Row[] = [];
-  actions.forEach((_, action) => {
+  actions.forEach((action, index) => {
+    if (!listed(action, flexible)) return;
     for (const story of fromTop(analysis)) {
       model.walls.forEach((wall, wallIndex) => {
         if (story < wall.fromStory || story > wall.toStory) return;
-        const at = action * plane + story * model.walls.length + wallIndex;
+        const at = index * plane + story * model.walls.length + wallIndex;
         rows.push(make(at, action, model.stories[story]?.level ?? '', wall.name));
       });
     }
   });
   return rows;
 }
+
+const variantOf = ({ variant }: LateralAction): Variant => (variant === 'torsion' ? '0' : variant);
 
 export function rigidityRows(analysis: Analysis, units: UnitFactors): ResultDocument['rigidities'] {
   const { model, rigidities } = analysis;
@@ -92,26 +104,30 @@ export function rigidityRows(analysis: Analysis, units: UnitFactors): ResultDocu
 }
 
 export function distributionRows(analysis: Analysis, units: UnitFactors): ResultDistribution[] {
-  return analysis.bases.flatMap(({ basis, shares }) =>
-    visit(analysis, (at, action, level, wall) => ({
+  return analysis.bases.flatMap(({ basis, shares, along }) =>
+    visit(analysis, along !== null, (at, action, level, wall) => ({
       basis,
-      case: analysis.actions[action]?.case ?? '',
-      variant: analysis.actions[action]?.variant ?? '0',
+      case: action.case,
+      variant: variantOf(action),
       level,
       wall,
-      direct: (shares.directKip[at] ?? 0) / units.force,
-      torsional: (shares.torsionalKip[at] ?? 0) / units.force,
+      ...(shares.directKip && shares.torsionalKip
+        ? {
+            direct: (shares.directKip[at] ?? 0) / units.force,
+            torsional: (shares.torsionalKip[at] ?? 0) / units.force,
+          }
+        : {}),
       total: (shares.totalKip[at] ?? 0) / units.force,
     })),
   );
 }
 
 export function lateralRows(analysis: Analysis, units: UnitFactors): ResultLateral[] {
-  return analysis.bases.flatMap(({ basis, shearKip, momentKipIn }) =>
-    visit(analysis, (at, action, level, wall) => ({
+  return analysis.bases.flatMap(({ basis, shearKip, momentKipIn, along }) =>
+    visit(analysis, along !== null, (at, action, level, wall) => ({
       basis,
-      case: analysis.actions[action]?.case ?? '',
-      variant: analysis.actions[action]?.variant ?? '0',
+      case: action.case,
+      variant: variantOf(action),
       level,
       wall,
       shear: (shearKip[at] ?? 0) / units.force,
@@ -120,21 +136,51 @@ export function lateralRows(analysis: Analysis, units: UnitFactors): ResultLater
   );
 }
 
-/** Rows with blank values: displacements come from the whole-height solution only, which is not made here. */
+/** Drift of every listed action; blank values where the whole-height solution can't be made. */
 export function driftRows(analysis: Analysis): ResultDrift[] {
-  return analysis.actions.flatMap((action) =>
-    fromTop(analysis).map((story) => ({
-      case: action.case,
-      variant: action.variant,
-      level: analysis.model.stories[story]?.level ?? '',
-      x: null,
-      y: null,
-      edge: null,
-      torsionRatio: null,
-      ax: null,
-      theta: null,
-    })),
+  const known = new Map(
+    analysis.drifts.map((drift) => [`${drift.case}\n${drift.variant}\n${String(drift.story)}`, drift]),
   );
+  return analysis.actions
+    .filter((action) => listed(action, false))
+    .flatMap((action) =>
+      fromTop(analysis).map((story) => {
+        const drift = known.get(`${action.case}\n${action.variant}\n${String(story)}`);
+        return {
+          case: action.case,
+          variant: variantOf(action),
+          level: analysis.model.stories[story]?.level ?? '',
+          x: drift?.x ?? null,
+          y: drift?.y ?? null,
+          edge: drift?.edge ?? null,
+          torsionRatio: drift?.torsionRatio ?? null,
+          ax: drift?.ax ?? null,
+          theta: drift?.theta ?? null,
+        };
+      }),
+    );
+}
+
+/** Floor displacements at each level's own point: what the displaced outline of the plan is drawn from. */
+export function displacementRows(analysis: Analysis, units: UnitFactors): ResultDisplacement[] {
+  const { displacements, actions, model } = analysis;
+  if (!displacements) return [];
+  return actions.flatMap((action, index) => {
+    const solution = displacements.solutions[index];
+    if (!solution || !listed(action, false)) return [];
+    return fromTop(analysis).map((story) => {
+      const level = model.stories[story];
+      const at = displacementAt(displacements.whole, solution, story, level?.xIn ?? 0, level?.yIn ?? 0);
+      return {
+        case: action.case,
+        variant: variantOf(action),
+        level: level?.level ?? '',
+        x: at.x / units.barLength,
+        y: at.y / units.barLength,
+        rotation: solution.rotation[story] ?? 0,
+      };
+    });
+  });
 }
 
 export function gravityRows(analysis: Analysis, units: UnitFactors): ResultDocument['gravity'] {
@@ -158,21 +204,27 @@ export function gravityRows(analysis: Analysis, units: UnitFactors): ResultDocum
 export function transferredRows(analysis: Analysis, units: UnitFactors): ResultTransferred[] {
   const { model, actions, bases, gravity, transfers } = analysis;
   const plane = model.stories.length * model.walls.length;
-  return bases.flatMap(({ basis, shearKip, momentKipIn }) =>
+  return bases.flatMap(({ basis, shearKip, momentKipIn, axialKip, along }) =>
     transfers.flatMap(({ wallIndex, fromStory, level }) => {
       const at = fromStory * model.walls.length + wallIndex;
       const wall = model.walls[wallIndex]?.name ?? '';
       return [
-        ...actions.map((action, index) => ({
-          basis,
-          case: action.case,
-          variant: action.variant,
-          level,
-          wall,
-          axial: 0,
-          shear: (shearKip[index * plane + at] ?? 0) / units.force,
-          moment: (momentKipIn[index * plane + at] ?? 0) / units.moment,
-        })),
+        ...actions.flatMap((action, index) =>
+          !listed(action, along !== null)
+            ? []
+            : [
+                {
+                  basis,
+                  case: action.case,
+                  variant: variantOf(action),
+                  level,
+                  wall,
+                  axial: (axialKip?.[index * plane + at] ?? 0) / units.force,
+                  shear: (shearKip[index * plane + at] ?? 0) / units.force,
+                  moment: (momentKipIn[index * plane + at] ?? 0) / units.moment,
+                },
+              ],
+        ),
         ...gravityCases.map((name) => ({
           basis,
           case: name,
@@ -188,6 +240,16 @@ export function transferredRows(analysis: Analysis, units: UnitFactors): ResultT
   );
 }
 
+const forceLines = new Set([
+  'force x',
+  'force y',
+  'vertical',
+  'transfers x',
+  'transfers y',
+  'sideways x',
+  'sideways y',
+]);
+
 export function balanceRows(analysis: Analysis, units: UnitFactors): ResultBalance[] {
   return analysis.bases.flatMap(({ basis }, index) =>
     (analysis.balance[index] ?? []).map((entry) => ({
@@ -197,7 +259,7 @@ export function balanceRows(analysis: Analysis, units: UnitFactors): ResultBalan
       level: analysis.model.stories[entry.story]?.level ?? '',
       residual: entry.lines.reduce((worst, line) => Math.max(worst, line.residual), 0),
       lines: entry.lines.map(({ line, applied, resisted }) => {
-        const factor = line.startsWith('force') || line === 'vertical' ? units.force : units.moment;
+        const factor = forceLines.has(line) ? units.force : units.moment;
         return { line, applied: applied / factor, resisted: resisted / factor };
       }),
     })),

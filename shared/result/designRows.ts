@@ -53,43 +53,55 @@ export function checkRows(walls: readonly WallOutcome[], system: UnitSystem, uni
   );
 }
 
+/**
+ * The worst of the bases for each wall, story and check, as rows of the basis `envelope`: nothing is mixed, a row is one of those above.
+ */
+export function envelopeRows(walls: readonly WallOutcome[], system: UnitSystem, units: UnitFactors): ResultCheck[] {
+  const worst = new Map<string, ResultCheck>();
+  for (const row of checkRows(walls, system, units)) {
+    const key = `${row.wall}\n${row.level}\n${row.check}`;
+    const known = worst.get(key);
+    const rank = (check: ResultCheck) => (check.ratio ?? Number.POSITIVE_INFINITY) + (check.ok ? 0 : 1e9);
+    if (!known || rank(row) > rank(known)) worst.set(key, row);
+  }
+  return [...worst.values()].map((row) => ({ ...row, basis: 'envelope' }));
+}
+
 /** Factored actions that govern an extreme or a check; every expansion with `all`. From the top down, wall by wall. */
 export function actionRows(walls: readonly WallOutcome[], units: UnitFactors, all: boolean): ResultAction[] {
   return walls.flatMap(({ demand, design }) => {
-    const indexOf = new Map(demand.expansions.map((expansion, index) => [expansion.name, index] as const).reverse());
-    const named = combinationsByPlace(design.checks, indexOf);
     const count = demand.stories.length;
-    return demand.forces.flatMap((forces) =>
-      [...demand.stories].reverse().flatMap((section) => {
+    return demand.forces.flatMap((forces) => {
+      const indexOf = new Map(forces.expansions.map((expansion, index) => [expansion.name, index] as const).reverse());
+      const named = combinationsByPlace(design.checks, forces.basis, indexOf);
+      return [...demand.stories].reverse().flatMap((section) => {
         const story = demand.stories.indexOf(section);
         const chosen = all
-          ? demand.expansions.map((_, index) => index)
-          : [
-              ...new Set([
-                ...governingExpansions(demand, forces, story),
-                ...(named.get(`${forces.basis}\n${section.level}`) ?? []),
-              ]),
-            ].sort((a, b) => a - b);
+          ? forces.expansions.map((_, index) => index)
+          : [...new Set([...governingExpansions(demand, forces, story), ...(named.get(section.level) ?? [])])].sort(
+              (a, b) => a - b,
+            );
         return chosen.map((index) => ({
           basis: forces.basis,
           level: section.level,
           wall: demand.wall,
-          combination: demand.expansions[index]?.name ?? '',
+          combination: forces.expansions[index]?.name ?? '',
           axial: (forces.axialKip[index * count + story] ?? 0) / units.force,
           moment: (forces.momentKipIn[index * count + story] ?? 0) / units.moment,
           shear: (forces.shearKip[index * count + story] ?? 0) / units.force,
         }));
-      }),
-    );
+      });
+    });
   });
 }
 
-function combinationsByPlace(checks: readonly Check[], indexOf: ReadonlyMap<string, number>) {
+/** Places of a basis's combinations named by its checks, by level. */
+function combinationsByPlace(checks: readonly Check[], basis: string, indexOf: ReadonlyMap<string, number>) {
   const places = new Map<string, number[]>();
   for (const check of checks) {
     const index = check.combination === null ? undefined : indexOf.get(check.combination);
-    if (index === undefined) continue;
-    const key = `${check.basis}\n${check.level}`;
+    if (index === undefined || check.basis !== basis) continue;
+    const key = check.level;
     const list = places.get(key) ?? [];
     list.push(index);
     places.set(key, list);

@@ -34,7 +34,7 @@ export function readCombinations(building: BuildingInput): CombinationSet | { re
       return;
     }
     for (const { text, factors } of reading.alternatives) {
-      combinations.push({ name: row.name, text, factors });
+      combinations.push({ name: row.name, text, factors, standard: !typed });
       for (const load of ['R', 'F', 'T'] as const) if (factors[load] !== 0) zeroLoads.add(load);
     }
   });

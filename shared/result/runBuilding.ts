@@ -7,12 +7,15 @@ import { unitFactors } from '../engineering/units.ts';
 import { engineVersion } from '../engineering/version.ts';
 import { baseShearWarnings, combinationWarnings, criteriaWarnings } from '../engineering/warnings/inputWarnings.ts';
 import { methodWarnings, unsettles } from '../engineering/warnings/methodWarnings.ts';
+import { basisWarnings } from '../engineering/warnings/basisWarnings.ts';
+import { driftWarnings } from '../engineering/warnings/driftWarnings.ts';
 import { planWarnings } from '../engineering/warnings/planWarnings.ts';
 import { materialNotices } from '../engineering/wall-design/materialNotices.ts';
 import type { DesignRow, PinnedBand } from '../engineering/wall-design/designTypes.ts';
 
 import {
   balanceRows,
+  displacementRows,
   distributionRows,
   driftRows,
   gravityRows,
@@ -21,7 +24,8 @@ import {
   rigidityRows,
   transferredRows,
 } from './analysisRows.ts';
-import { actionRows, checkRows, quantityRows, scheduleRows } from './designRows.ts';
+import { actionRows, checkRows, envelopeRows, quantityRows, scheduleRows } from './designRows.ts';
+import { driftCheckRows } from './driftChecks.ts';
 import type { CombinationSet } from './readCombinations.ts';
 import { readCombinations } from './readCombinations.ts';
 
@@ -118,11 +122,16 @@ function write(
     rigidities: rigidityRows(analysis, units),
     distribution: distributionRows(analysis, units),
     drifts: driftRows(analysis),
+    displacements: displacementRows(analysis, units),
     lateral: lateralRows(analysis, units),
     gravity: gravityRows(analysis, units),
     transferred: transferredRows(analysis, units),
     actions: actionRows(walls, units, allActions),
-    checks: checkRows(walls, settings.units, units),
+    checks: [
+      ...checkRows(walls, settings.units, units),
+      ...(settings.basis.includes('envelope') ? envelopeRows(walls, settings.units, units) : []),
+      ...driftCheckRows(analysis),
+    ],
     schedule,
     quantities: quantityRows(walls, units),
     balance: balanceRows(analysis, units),
@@ -141,7 +150,10 @@ function collectWarnings(
     ...planWarnings(building, analysis),
     ...combinationWarnings(analysis, set.combinations, set.zeroLoads),
     ...baseShearWarnings(building, analysis),
+    ...analysis.warnings,
     ...methodWarnings(building, analysis),
+    ...basisWarnings(analysis),
+    ...driftWarnings(analysis),
     ...materialNotices(
       analysis.model.settings,
       analysis.model.walls.flatMap((wall) => wall.segments.map(({ fcPsi }) => fcPsi)),

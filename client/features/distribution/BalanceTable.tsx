@@ -18,6 +18,11 @@ const names: Readonly<Record<Line, string>> = {
   'overturning x': 'Overturning by forces in x',
   'overturning y': 'Overturning by forces in y',
   vertical: 'Vertical',
+  'transfers x': 'Transfers assigned, x',
+  'transfers y': 'Transfers assigned, y',
+  'torque left open': 'Torque left open by shares',
+  'sideways x': 'Sideways part, x',
+  'sideways y': 'Sideways part, y',
 };
 
 export interface BalanceTableProps {

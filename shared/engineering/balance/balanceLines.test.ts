@@ -1,14 +1,14 @@
 import { expect, test } from 'vitest';
 
 import { lateralActions } from '../distribution/lateralActions.ts';
-import { rigidBasis } from '../distribution/rigidBasis.ts';
+import { rigidBasis, storyStiffnesses } from '../distribution/rigidBasis.ts';
 import { toModel } from '../model/toModel.ts';
 import { storyRigidities } from '../rigidity/storyRigidities.ts';
 import { lateralMoments } from '../takedown/lateralMoments.ts';
 import { transferPoints } from '../takedown/transferred.ts';
 import { building, force, level, wall } from '../testing/handBuilding.ts';
 
-import { lateralBalance } from './balanceLines.ts';
+import { lateralBalance } from './lateralBalance.ts';
 
 /** Two stories, five walls; C starts above the base, so that its moment has to be carried as transferred. */
 const input = building({
@@ -29,15 +29,22 @@ const input = building({
 function residuals(fault: number) {
   const model = toModel(input);
   const actions = lateralActions(model);
-  const outcome = rigidBasis(model, storyRigidities(model), actions);
-  if ('problems' in outcome) throw new Error('refused');
-  const shear = outcome.shares.totalKip.slice();
+  const rigidities = storyRigidities(model);
+  const stories = storyStiffnesses(model, rigidities);
+  if ('problems' in stories) throw new Error('refused');
+  const shares = rigidBasis(model, rigidities, stories.stiffness, actions);
+  const shear = shares.totalKip.slice();
   shear[0] = (shear[0] ?? 0) * (1 + fault);
   const moments = lateralMoments(model, shear, actions.length);
   return actions.flatMap((action, index) =>
-    lateralBalance(model, action, index, shear, moments, transferPoints(model)).flatMap(({ lines }) =>
-      lines.map(({ residual }) => residual),
-    ),
+    lateralBalance(
+      model,
+      action,
+      index,
+      { shearKip: shear, momentKipIn: moments, shares, along: null },
+      null,
+      transferPoints(model),
+    ).flatMap(({ lines }) => lines.map(({ residual }) => residual)),
   );
 }
 

@@ -17,11 +17,14 @@ const tables = {
   ],
 };
 const factors = { D: 1.2, L: 1, Lr: 0, S: 0, W: 0, E: 0, H: 0 };
-const expand = (list: Partial<typeof factors>[], accidental = 0.05, forces = tables.forces) =>
-  expandCombinations(
-    list.map((more) => ({ name: null, text: 'text', factors: { ...factors, ...more } })),
-    lateralActions(toModel(building({ ...tables, forces }, { accidental }))),
+const expand = (list: Partial<typeof factors>[], accidental = 0.05, forces = tables.forces) => {
+  const model = toModel(building({ ...tables, forces }, { accidental }));
+  return expandCombinations(
+    list.map((more) => ({ name: null, text: 'text', factors: { ...factors, ...more }, standard: false })),
+    lateralActions(model),
+    model.settings,
   ).expansions;
+};
 
 test('wind acts both ways', () => {
   expect(expand([{ W: 1.6 }]).map(({ name, lateral }) => [name, lateral[0]?.factor])).toEqual([

@@ -1,5 +1,9 @@
 import type { LateralAction } from '../distribution/lateralActions.ts';
+import type { ModelSettings } from '../model/model.ts';
 import type { Expansion } from '../wall-design/designTypes.ts';
+
+import type { LateralState } from './lateralStates.ts';
+import { otherStates, seismicStates, windStates } from './lateralStates.ts';
 
 /** Linear factors of one written alternative of a combination. */
 export interface CombinationFactors {
@@ -18,37 +22,37 @@ export interface FactoredCombination {
   /** the alternative written out: `1.2D + 1.0W + 1.0L + 0.5S` */
   readonly text: string;
   readonly factors: CombinationFactors;
+  /** one of the load standard's own, not typed by the engineer */
+  readonly standard: boolean;
 }
 
 export interface ExpandedCombination extends Expansion {
+  /** factor on live load that may not take the reduced factor on L */
+  readonly fullL: number;
   /** lateral actions that take part, with their factors (signs included) */
   readonly lateral: readonly { readonly action: number; readonly factor: number }[];
 }
 
-interface LateralState {
-  readonly label: string;
-  readonly parts: readonly { readonly action: number; readonly factor: number }[];
-}
-
 /**
- * Every sign, case and variant of every combination, in list order: combinations, then cases as they stand in forces.csv, then
- * variants, then signs (engineering.md section 5). W and E act both ways; a seismic case with accidental eccentricity enters as
- * + and - only; each `other` case in turn is H with its own sign; a kind without a case counts 0.
+ * Every sign, case and variant of every combination, in list order: combinations, then the states of W, E and H (engineering.md section 5).
+ * W and E act both ways; a kind without a case counts 0. `eccentric` false: no accidental eccentricity (flexible basis).
  */
 export function expandCombinations(
   combinations: readonly FactoredCombination[],
   actions: readonly LateralAction[],
+  settings: ModelSettings,
+  eccentric = true,
 ): { readonly expansions: readonly ExpandedCombination[]; readonly gravitySetCount: number } {
-  const wind = bothWays(actions, 'wind');
-  const seismic = bothWays(actions, 'seismic');
-  const other = actions.flatMap((action, index) =>
-    action.kind === 'other' ? [{ label: `H = ${action.case}`, parts: [{ action: index, factor: 1 }] }] : [],
-  );
+  const wind = windStates(actions, settings, eccentric);
+  const seismic = seismicStates(actions, settings, eccentric);
+  const other = otherStates(actions);
   const expansions: ExpandedCombination[] = [];
   const gravitySets = new Map<string, number>();
   for (const combination of combinations) {
     const { D, L, Lr, S, W, E, H } = combination.factors;
-    const key = [D, L, Lr, S].join(' ');
+    // live load that keeps its full value: the standard's reduced factor on L is not for it
+    const fullL = combination.standard && L !== 0 ? Math.max(L, 1) : L;
+    const key = [D, L, Lr, S, fullL].join(' ');
     const gravitySet = gravitySets.get(key) ?? gravitySets.size;
     gravitySets.set(key, gravitySet);
     for (const first of statesOf(W, wind)) {
@@ -61,6 +65,7 @@ export function expandCombinations(
             wind: W !== 0,
             seismic: E !== 0,
             factors: { D, L, Lr, S },
+            fullL,
             gravitySet,
             lateral: states.flatMap((state) => state.parts),
           });
@@ -83,18 +88,4 @@ function statesOf(factor: number, states: readonly LateralState[]): (LateralStat
     label: state.label,
     parts: state.parts.map((part) => ({ action: part.action, factor: part.factor * factor })),
   }));
-}
-
-function bothWays(actions: readonly LateralAction[], kind: 'wind' | 'seismic'): LateralState[] {
-  const symbol = kind === 'wind' ? 'W' : 'E';
-  return actions.flatMap((action, index) => {
-    if (action.kind !== kind) return [];
-    const hasSenses = actions.some((other) => other.caseIndex === action.caseIndex && other.variant !== '0');
-    if (hasSenses && action.variant === '0') return [];
-    const at = action.variant === '0' ? '' : ` at ${action.variant === '+' ? '+' : '−'}e`;
-    return [
-      { label: `${symbol} = +${action.case}${at}`, parts: [{ action: index, factor: 1 }] },
-      { label: `${symbol} = −${action.case}${at}`, parts: [{ action: index, factor: -1 }] },
-    ];
-  });
 }

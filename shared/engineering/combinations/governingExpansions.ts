@@ -8,7 +8,7 @@ export function governingExpansions(demand: WallDemand, forces: WallForces, stor
   const count = demand.stories.length;
   const extremes = [0, 0, 0, 0];
   const best = [Number.NEGATIVE_INFINITY, Number.NEGATIVE_INFINITY, Number.NEGATIVE_INFINITY, Number.NEGATIVE_INFINITY];
-  for (let expansion = 0; expansion < demand.expansions.length; expansion += 1) {
+  for (let expansion = 0; expansion < forces.expansions.length; expansion += 1) {
     const at = expansion * count + story;
     const axial = forces.axialKip[at] ?? 0;
     const values = [axial, -axial, Math.abs(forces.momentKipIn[at] ?? 0), Math.abs(forces.shearKip[at] ?? 0)];

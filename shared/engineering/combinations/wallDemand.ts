@@ -10,6 +10,9 @@ export interface BasisForces {
   readonly basis: Basis;
   readonly shearKip: Float64Array;
   readonly momentKipIn: Float64Array;
+  /** axial from assigned transfers; null where there is none */
+  readonly axialKip: Float64Array | null;
+  readonly expansions: readonly ExpandedCombination[];
 }
 
 /**
@@ -20,7 +23,6 @@ export function wallDemand(
   model: Model,
   gravity: GravityTakedown,
   bases: readonly BasisForces[],
-  expansions: readonly ExpandedCombination[],
   gravitySetCount: number,
   wallIndex: number,
 ): WallDemand {
@@ -45,20 +47,14 @@ export function wallDemand(
     wall: wall.name,
     stories,
     heightIn: wall.heightIn,
-    expansions,
     gravitySetCount,
-    forces: bases.map((basis) => factoredForces(model, gravity, basis, expansions, wallIndex)),
+    forces: bases.map((basis) => factoredForces(model, gravity, basis, wallIndex)),
     deadKip: Float64Array.from(stories, ({ story }) => gravity.axialKip.D[at(story)] ?? 0),
   };
 }
 
-function factoredForces(
-  model: Model,
-  gravity: GravityTakedown,
-  basis: BasisForces,
-  expansions: readonly ExpandedCombination[],
-  wallIndex: number,
-): WallForces {
+function factoredForces(model: Model, gravity: GravityTakedown, basis: BasisForces, wallIndex: number): WallForces {
+  const { expansions } = basis;
   const wall = model.walls[wallIndex];
   const count = wall?.segments.length ?? 0;
   const from = wall?.fromStory ?? 0;
@@ -67,29 +63,33 @@ function factoredForces(
   const axialKip = new Float64Array(expansions.length * count);
   const momentKipIn = new Float64Array(expansions.length * count);
   const shearKip = new Float64Array(expansions.length * count);
-  const { axialKip: axial, momentKipIn: moment } = gravity;
-  expansions.forEach(({ factors, lateral }, expansion) => {
+  const { axialKip: axial, momentKipIn: moment, fullLive: full } = gravity;
+  expansions.forEach(({ factors, fullL, lateral }, expansion) => {
     for (let story = 0; story < count; story += 1) {
       const source = (from + story) * walls + wallIndex;
       const target = expansion * count + story;
-      axialKip[target] =
+      let p =
         factors.D * (axial.D[source] ?? 0) +
         factors.L * (axial.L[source] ?? 0) +
         factors.Lr * (axial.Lr[source] ?? 0) +
-        factors.S * (axial.S[source] ?? 0);
+        factors.S * (axial.S[source] ?? 0) +
+        (fullL - factors.L) * (full.axialKip[source] ?? 0);
       let m =
         factors.D * (moment.D[source] ?? 0) +
         factors.L * (moment.L[source] ?? 0) +
         factors.Lr * (moment.Lr[source] ?? 0) +
-        factors.S * (moment.S[source] ?? 0);
+        factors.S * (moment.S[source] ?? 0) +
+        (fullL - factors.L) * (full.momentKipIn[source] ?? 0);
       let v = 0;
       for (const part of lateral) {
         m += part.factor * (basis.momentKipIn[part.action * plane + source] ?? 0);
         v += part.factor * (basis.shearKip[part.action * plane + source] ?? 0);
+        if (basis.axialKip) p += part.factor * (basis.axialKip[part.action * plane + source] ?? 0);
       }
+      axialKip[target] = p;
       momentKipIn[target] = m;
       shearKip[target] = v;
     }
   });
-  return { basis: basis.basis, axialKip, momentKipIn, shearKip };
+  return { basis: basis.basis, expansions, axialKip, momentKipIn, shearKip };
 }

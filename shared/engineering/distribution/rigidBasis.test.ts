@@ -5,7 +5,7 @@ import { storyRigidities } from '../rigidity/storyRigidities.ts';
 import { building, force, level, wall } from '../testing/handBuilding.ts';
 
 import { lateralActions } from './lateralActions.ts';
-import { rigidBasis } from './rigidBasis.ts';
+import { rigidBasis, storyStiffnesses } from './rigidBasis.ts';
 
 /** One story of 10 ft: two equal walls in y at x = 0 and 60, two equal walls in x at y = 0 and 40; all of one rigidity. */
 const square = building(
@@ -24,9 +24,12 @@ const square = building(
 
 function solve(input: typeof square) {
   const model = toModel(input);
-  const outcome = rigidBasis(model, storyRigidities(model), lateralActions(model));
-  if ('problems' in outcome) throw new Error(outcome.problems.map(({ message }) => message).join());
-  return outcome;
+  const rigidities = storyRigidities(model);
+  const stories = storyStiffnesses(model, rigidities);
+  if ('problems' in stories) throw new Error(stories.problems.map(({ message }) => message).join());
+  const { directKip, torsionalKip } = rigidBasis(model, rigidities, stories.stiffness, lateralActions(model));
+  if (!directKip || !torsionalKip) throw new Error('no parts');
+  return { shares: { directKip, torsionalKip }, stiffness: stories.stiffness };
 }
 
 test('direct and torsional shares by hand', () => {
@@ -62,7 +65,7 @@ test('a force in x takes its accidental torque with the other sign', () => {
 test('a story without walls in x is refused by name', () => {
   const input = { ...square, tables: { ...square.tables, walls: square.tables.walls.slice(0, 2) } };
   const model = toModel(input);
-  const outcome = rigidBasis(model, storyRigidities(model), lateralActions(model));
+  const outcome = storyStiffnesses(model, storyRigidities(model));
   expect('problems' in outcome && outcome.problems[0]?.message).toContain('Story Roof');
   expect('problems' in outcome && outcome.problems[0]?.message).toContain('no wall in x');
 });
@@ -70,6 +73,6 @@ test('a story without walls in x is refused by name', () => {
 test('walls through one point are refused', () => {
   const walls = [wall('A', [0, -10, 0, 10], 10, ['Roof', 'Roof']), wall('B', [-10, 0, 10, 0], 10, ['Roof', 'Roof'])];
   const model = toModel({ ...square, tables: { ...square.tables, walls } });
-  const outcome = rigidBasis(model, storyRigidities(model), lateralActions(model));
+  const outcome = storyStiffnesses(model, storyRigidities(model));
   expect('problems' in outcome && outcome.problems[0]?.message).toContain('one point');
 });

@@ -7,26 +7,17 @@ import { storyStiffness } from './storyStiffness.ts';
 
 /** Wall shears of one basis: `[action * stories * walls + story * walls + wall]`, kip, with sign along the wall. */
 export interface BasisShares {
-  readonly directKip: Float64Array;
-  readonly torsionalKip: Float64Array;
+  /** `rigid` only */
+  readonly directKip: Float64Array | null;
+  readonly torsionalKip: Float64Array | null;
   readonly totalKip: Float64Array;
 }
 
-export interface RigidOutcome {
-  readonly shares: BasisShares;
-  readonly stiffness: readonly StoryStiffness[];
-}
-
-/**
- * Distribution by relative rigidity in each story under a rigid diaphragm (engineering.md section 3.1). Direct share: the
- * story action moved to the center of rigidity, both translations solved, rotation zero. Torsional share: the torque about
- * that center, theta = T / sum k b^2. Together they solve K u = S exactly. Refused where a story can't resist.
- */
-export function rigidBasis(
+/** Every story's stiffness, or a problem for each story that can't resist. */
+export function storyStiffnesses(
   model: Model,
   rigidities: Float64Array,
-  actions: readonly LateralAction[],
-): { readonly problems: readonly Problem[] } | RigidOutcome {
+): { readonly problems: readonly Problem[] } | { readonly stiffness: readonly StoryStiffness[] } {
   const problems: Problem[] = [];
   const stiffness: StoryStiffness[] = [];
   model.stories.forEach((story, index) => {
@@ -40,8 +31,20 @@ export function rigidBasis(
         message: `Story ${story.level} can't be distributed: ${outcome.lack}.`,
       });
   });
-  if (problems.length > 0) return { problems };
+  return problems.length > 0 ? { problems } : { stiffness };
+}
 
+/**
+ * Distribution by relative rigidity in each story under a rigid diaphragm (engineering.md section 3.1). Direct share: the
+ * story action moved to the center of rigidity, both translations solved, rotation zero. Torsional share: the torque about
+ * that center, theta = T / sum k b^2. Together they solve K u = S exactly.
+ */
+export function rigidBasis(
+  model: Model,
+  rigidities: Float64Array,
+  stiffness: readonly StoryStiffness[],
+  actions: readonly LateralAction[],
+): BasisShares {
   const plane = model.stories.length * model.walls.length;
   const directKip = new Float64Array(actions.length * plane);
   const torsionalKip = new Float64Array(actions.length * plane);
@@ -67,5 +70,5 @@ export function rigidBasis(
       });
     });
   });
-  return { shares: { directKip, torsionalKip, totalKip }, stiffness };
+  return { directKip, torsionalKip, totalKip };
 }

@@ -35,9 +35,26 @@ export function buildLoadCases(rows: readonly ForceRow[], stories: readonly Stor
     add(loadCase.mzKipIn, index, mz);
     add(loadCase.torqueKipIn, index, mz + x * fy - y * fx);
   }
+  if (settings.forcesAre === 'story-shear') for (const loadCase of byName.values()) toLevelForces(loadCase, stories);
   return [...byName.values()].map((loadCase) => {
     const total = (column: Float64Array) => Math.abs(column.reduce((sum, value) => sum + value, 0));
     return { ...loadCase, direction: total(loadCase.fyKip) > total(loadCase.fxKip) ? 'y' : 'x' };
+  });
+}
+
+/**
+ * Story shears to level forces: differences of successive rows, of mz too, acting at each level's own point (engineering.md
+ * section 5).
+ */
+function toLevelForces(loadCase: Omit<LoadCase, 'direction'>, stories: readonly Story[]): void {
+  const { fxKip, fyKip, mzKipIn, torqueKipIn } = loadCase;
+  for (const column of [fxKip, fyKip, mzKipIn]) {
+    for (let story = 0; story < stories.length - 1; story += 1) {
+      column[story] = (column[story] ?? 0) - (column[story + 1] ?? 0);
+    }
+  }
+  stories.forEach((story, index) => {
+    torqueKipIn[index] = (mzKipIn[index] ?? 0) + story.xIn * (fyKip[index] ?? 0) - story.yIn * (fxKip[index] ?? 0);
   });
 }
 
@@ -62,6 +79,9 @@ export function buildGravity(
   });
   const axialKip = columns();
   const momentKipIn = columns();
+  const column = () => new Float64Array(size);
+  const reducible = { axialKip: column(), momentKipIn: column(), areaIn2: column(), floors: column() };
+  const full = { axialKip: column(), momentKipIn: column() };
   for (const row of rows) {
     const story = storyOf.get(row.level);
     const wall = wallOf.get(row.wall);
@@ -73,8 +93,29 @@ export function buildGravity(
       add(axialKip[name], at, kip);
       add(momentKipIn[name], at, kip * eccentricityIn);
     }
+    const liveKip = (row.live ?? 0) * factors.force;
+    const areaIn2 = (row.tributary_area ?? 0) * factors.area;
+    const heavy = isHeavy(row, liveKip, areaIn2);
+    if (heavy) {
+      add(full.axialKip, at, liveKip);
+      add(full.momentKipIn, at, liveKip * eccentricityIn);
+    } else if (areaIn2 > 0 && liveKip !== 0) {
+      add(reducible.axialKip, at, liveKip);
+      add(reducible.momentKipIn, at, liveKip * eccentricityIn);
+      add(reducible.areaIn2, at, areaIn2);
+      reducible.floors[at] = 1;
+    }
   }
-  return { axialKip, momentKipIn };
+  return { axialKip, momentKipIn, reducible, full };
+}
+
+/** 100.5 psf in kip/in2: live load above it counts as heavy (ASCE/SEI 7 4.7.3, with half a psf for rounding). */
+const heavyKipPerIn2 = 100.5 / 1000 / 144;
+
+/** Live load that may not be reduced: by its class, or above 100 psf over its area. */
+export function isHeavy(row: GravityRow, liveKip: number, areaIn2: number): boolean {
+  if (row.live_class !== null && row.live_class !== 'reducible') return true;
+  return areaIn2 > 0 && liveKip / areaIn2 > heavyKipPerIn2;
 }
 
 function add(column: Float64Array, index: number, value: number) {

@@ -76,6 +76,7 @@ export function buildStories(heights: readonly StoryHeight[], walls: readonly Wa
       extentYIn: y.extent,
       edgeXIn: x.edge,
       edgeYIn: y.edge,
+      gravityKip: row.gravity === null ? null : row.gravity * unitFactors[settings.units].force,
       extentAssumed: x.assumed || y.assumed,
     };
   });

@@ -50,6 +50,7 @@ function segmentOf(row: WallRow, story: number, factors: (typeof unitFactors)['u
     opening: row.opening ?? 0,
     flexureFactor: row.flexure_factor ?? settings.stiffness.flexure,
     shearFactor: row.shear_factor ?? settings.stiffness.shear,
+    shares: row.share_x === null && row.share_y === null ? null : { x: row.share_x ?? 0, y: row.share_y ?? 0 },
     centroidXIn: (x1In + x2In) / 2,
     centroidYIn: (y1In + y2In) / 2,
   };

@@ -10,6 +10,20 @@ export interface Model {
   readonly walls: readonly WallLine[];
   readonly cases: readonly LoadCase[];
   readonly gravity: GravityColumns;
+  readonly overrides: readonly Override[];
+}
+
+/** An engineer's transfer or share, in engine units; `caseName` null: every case. */
+export interface Override {
+  readonly kind: 'transfer' | 'share';
+  readonly story: number;
+  readonly wallIndex: number;
+  readonly caseName: string | null;
+  readonly shearKip: number;
+  readonly axialKip: number;
+  readonly momentKipIn: number;
+  /** part of the story shear along the wall's own direction */
+  readonly share: number;
 }
 
 export interface ModelSettings {
@@ -32,6 +46,19 @@ export interface ModelSettings {
   readonly concreteWeightPcf: number;
   readonly basis: readonly (Basis | 'envelope')[];
   readonly accidental: number;
+  readonly amplify: boolean;
+  readonly orthogonal: number;
+  readonly windCases: boolean;
+  readonly liveReduction: boolean;
+  readonly kll: number;
+  readonly cd: number;
+  readonly ie: number;
+  readonly driftLimit: number;
+  readonly windDriftFactor: number;
+  /** what turns a typed wind or seismic force into strength level: 1, or 1/0.6 and 1/0.7 for service forces */
+  readonly strengthFactor: { readonly wind: number; readonly seismic: number };
+  /** rotation springs at wall bases, kip-in/rad */
+  readonly baseSprings: ReadonlyMap<string, number>;
   readonly liveFactor: number;
   readonly sds: number;
   readonly rho: number;
@@ -55,6 +82,8 @@ export interface Story {
   readonly extentYIn: number;
   readonly edgeXIn: number;
   readonly edgeYIn: number;
+  /** D + 0.5L of the whole floor, for stability; null where it is not given */
+  readonly gravityKip: number | null;
   /** true where the extent had to be taken from the wall ends */
   readonly extentAssumed: boolean;
 }
@@ -85,6 +114,8 @@ export interface WallSegment {
   readonly opening: number;
   readonly flexureFactor: number;
   readonly shearFactor: number;
+  /** parts of Fx and Fy that the wall takes in the flexible basis; null where the row gives neither */
+  readonly shares: { readonly x: number; readonly y: number } | null;
   readonly centroidXIn: number;
   readonly centroidYIn: number;
 }
@@ -110,4 +141,13 @@ export type GravityCase = (typeof gravityCases)[number];
 export interface GravityColumns {
   readonly axialKip: Readonly<Record<GravityCase, Float64Array>>;
   readonly momentKipIn: Readonly<Record<GravityCase, Float64Array>>;
+  /** live load that may be reduced, with its area and its number of floors; the rest of L may not */
+  readonly reducible: {
+    readonly axialKip: Float64Array;
+    readonly momentKipIn: Float64Array;
+    readonly areaIn2: Float64Array;
+    readonly floors: Float64Array;
+  };
+  /** live load whose factor in the standard's combinations never falls below 1.0 (heavy, garage, assembly, storage) */
+  readonly full: { readonly axialKip: Float64Array; readonly momentKipIn: Float64Array };
 }

@@ -2,6 +2,7 @@ import type { BuildingInput, Settings } from '../input.ts';
 import { unitFactors } from '../units.ts';
 
 import { buildGravity, buildLoadCases } from './buildLoads.ts';
+import { buildOverrides } from './buildOverrides.ts';
 import { buildStories, buildStoryHeights } from './buildStories.ts';
 import { buildWalls } from './buildWalls.ts';
 import type { Model, ModelSettings } from './model.ts';
@@ -20,8 +21,12 @@ export function toModel(input: BuildingInput): Model {
     walls,
     cases: buildLoadCases(tables.forces, stories, settings),
     gravity: buildGravity(tables.gravity, stories, walls, settings),
+    overrides: buildOverrides(tables.overrides, stories, walls, settings),
   };
 }
+
+/** Allowable story drift, all other structures: ASCE/SEI 7 Table 12.12-1 by risk category. */
+const driftLimits = { I: 0.02, II: 0.02, III: 0.015, IV: 0.01 } as const;
 
 export function toModelSettings(settings: Settings): ModelSettings {
   const factors = unitFactors[settings.units];
@@ -45,6 +50,17 @@ export function toModelSettings(settings: Settings): ModelSettings {
     concreteWeightPcf: settings.concreteWeight * factors.density,
     basis: settings.basis,
     accidental: settings.accidental,
+    amplify: settings.amplify,
+    orthogonal: settings.orthogonal,
+    windCases: settings.windCases,
+    liveReduction: settings.liveReduction,
+    kll: settings.kll,
+    cd: settings.cd,
+    ie: settings.ie,
+    driftLimit: settings.driftLimit ?? driftLimits[settings.riskCategory],
+    windDriftFactor: settings.windDriftFactor,
+    strengthFactor: settings.forceLevel === 'service' ? { wind: 1 / 0.6, seismic: 1 / 0.7 } : { wind: 1, seismic: 1 },
+    baseSprings: new Map(Object.entries(settings.baseSprings).map(([wall, value]) => [wall, value * factors.moment])),
     liveFactor: settings.liveFactor,
     sds: settings.sds,
     rho: settings.rho,

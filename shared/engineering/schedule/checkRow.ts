@@ -30,7 +30,10 @@ export function checkRow(
           level: (stories[index] as WallStory).level,
           wall: demand.wall,
           ...check,
-          combination: expansion === null ? null : (demand.expansions[expansion] as Expansion).name,
+          combination:
+            expansion === null
+              ? null
+              : ((demand.forces[basis] as WallDemand['forces'][number]).expansions[expansion] as Expansion).name,
         }),
       ),
     ),

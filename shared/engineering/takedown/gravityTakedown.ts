@@ -2,12 +2,19 @@ import type { GravityCase, Model } from '../model/model.ts';
 import { gravityCases } from '../model/model.ts';
 import { poundsPerKip } from '../units.ts';
 
+import { centroidShiftIn } from './centroidShift.ts';
+import { liveReductionFactor } from './liveReduction.ts';
+
 const cubicInchesPerCubicFoot = 1728;
 
 /** Summed over levels at and above, at the bottom of each story; `[story * walls + wall]`, kip and kip-in. */
 export interface GravityTakedown {
   readonly axialKip: Readonly<Record<GravityCase, Float64Array>>;
   readonly momentKipIn: Readonly<Record<GravityCase, Float64Array>>;
+  /** part of L that keeps a factor of at least 1.0 in the standard's combinations */
+  readonly fullLive: { readonly axialKip: Float64Array; readonly momentKipIn: Float64Array };
+  /** factor on the reducible live load, `[story * walls + wall]`; 1 where nothing is reduced */
+  readonly liveFactor: Float64Array;
   /** self-weight of each story's wall alone, kip */
   readonly selfWeightKip: Float64Array;
 }
@@ -47,26 +54,73 @@ export function gravityTakedown(model: Model): GravityTakedown {
   const axialKip = columns();
   const momentKipIn = columns();
   for (const name of gravityCases) {
-    walls.forEach((wall, wallIndex) => {
-      let axial = 0;
-      let moment = 0;
-      for (let story = wall.toStory; story >= wall.fromStory; story -= 1) {
-        const at = story * walls.length + wallIndex;
-        const segment = wall.segments[story - wall.fromStory];
-        const above = wall.segments[story + 1 - wall.fromStory];
-        if (segment && above) {
-          const shiftIn =
-            (above.centroidXIn - segment.centroidXIn) * segment.cos +
-            (above.centroidYIn - segment.centroidYIn) * segment.sin;
-          moment += axial * shiftIn;
-        }
-        axial += gravity.axialKip[name][at] ?? 0;
-        moment += gravity.momentKipIn[name][at] ?? 0;
-        if (name === 'D') axial += selfWeightKip[at] ?? 0;
-        axialKip[name][at] = axial;
-        momentKipIn[name][at] = moment;
-      }
-    });
+    sumDown(model, gravity.axialKip[name], gravity.momentKipIn[name], axialKip[name], momentKipIn[name]);
   }
-  return { axialKip, momentKipIn, selfWeightKip };
+  addSelfWeight(model, selfWeightKip, axialKip.D, momentKipIn.D);
+  const column = () => new Float64Array(size);
+  const fullLive = { axialKip: column(), momentKipIn: column() };
+  sumDown(model, gravity.full.axialKip, gravity.full.momentKipIn, fullLive.axialKip, fullLive.momentKipIn);
+  const liveFactor = column().fill(1);
+  if (model.settings.liveReduction) reduceLive(model, axialKip.L, momentKipIn.L, liveFactor);
+  return { axialKip, momentKipIn, fullLive, liveFactor, selfWeightKip };
+}
+
+/** Sums of loads at and above; moments of their eccentricity and of the axial from above where the centroid moves. */
+function sumDown(
+  model: Model,
+  levelAxial: Float64Array,
+  levelMoment: Float64Array,
+  axialKip: Float64Array,
+  momentKipIn: Float64Array,
+): void {
+  const walls = model.walls.length;
+  model.walls.forEach((wall, wallIndex) => {
+    let axial = 0;
+    let moment = 0;
+    for (let story = wall.toStory; story >= wall.fromStory; story -= 1) {
+      const at = story * walls + wallIndex;
+      moment += axial * centroidShiftIn(wall, story) + (levelMoment[at] ?? 0);
+      axial += levelAxial[at] ?? 0;
+      axialKip[at] = axial;
+      momentKipIn[at] = moment;
+    }
+  });
+}
+
+/** Self-weight of the stories, each hanging at its own centroid. */
+function addSelfWeight(model: Model, weights: Float64Array, axialKip: Float64Array, momentKipIn: Float64Array): void {
+  const walls = model.walls.length;
+  model.walls.forEach((wall, wallIndex) => {
+    let axial = 0;
+    let moment = 0;
+    for (let story = wall.toStory; story >= wall.fromStory; story -= 1) {
+      const at = story * walls + wallIndex;
+      moment += axial * centroidShiftIn(wall, story);
+      axial += weights[at] ?? 0;
+      axialKip[at] = (axialKip[at] ?? 0) + axial;
+      momentKipIn[at] = (momentKipIn[at] ?? 0) + moment;
+    }
+  });
+}
+
+/** Takes the reduction of 4.7.2 off the reducible part of L, by the area and the floors summed down to each story. */
+function reduceLive(model: Model, axialKip: Float64Array, momentKipIn: Float64Array, liveFactor: Float64Array): void {
+  const walls = model.walls.length;
+  const { reducible } = model.gravity;
+  const sumAxial = new Float64Array(axialKip.length);
+  const sumMoment = new Float64Array(axialKip.length);
+  sumDown(model, reducible.axialKip, reducible.momentKipIn, sumAxial, sumMoment);
+  model.walls.forEach((wall, wallIndex) => {
+    let areaIn2 = 0;
+    let floors = 0;
+    for (let story = wall.toStory; story >= wall.fromStory; story -= 1) {
+      const at = story * walls + wallIndex;
+      areaIn2 += reducible.areaIn2[at] ?? 0;
+      floors += reducible.floors[at] ?? 0;
+      const factor = liveReductionFactor(areaIn2, floors, model.settings.kll);
+      liveFactor[at] = factor;
+      axialKip[at] = (axialKip[at] ?? 0) - (1 - factor) * (sumAxial[at] ?? 0);
+      momentKipIn[at] = (momentKipIn[at] ?? 0) - (1 - factor) * (sumMoment[at] ?? 0);
+    }
+  });
 }

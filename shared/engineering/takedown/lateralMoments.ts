@@ -2,7 +2,7 @@ import type { Model } from '../model/model.ts';
 
 /**
  * Wall moments at the bottom of every story: M = sum of V h downward, kip-in, same indices as the shears
- * (`[action][story][wall]`). Lateral cases bring no axial load in this model, so that a moved centroid adds nothing.
+ * (`[action][story][wall]`). Shares bring no axial load, so that a moved centroid adds nothing; transfers have their own columns.
  */
 export function lateralMoments(model: Model, shearKip: Float64Array, actionCount: number): Float64Array {
   const walls = model.walls.length;

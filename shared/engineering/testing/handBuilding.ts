@@ -41,6 +41,7 @@ export const plainSettings: Settings = {
   forceLevel: 'strength',
   expectedBaseShear: {},
   criticalLevel: {},
+  baseSprings: {},
   oopEccentricity: 0,
   bandStories: 3,
   mergeShare: 0,

@@ -31,6 +31,8 @@ export interface WallStory {
 /** Column index = expansion * stories.length + story (0 = the wall's lowest). Compression positive, signs kept. */
 export interface WallForces {
   readonly basis: Basis;
+  /** the flexible basis knows no accidental eccentricity, so that each basis has its own list */
+  readonly expansions: readonly Expansion[];
   readonly axialKip: Float64Array;
   readonly momentKipIn: Float64Array;
   readonly shearKip: Float64Array;
@@ -42,7 +44,6 @@ export interface WallDemand {
   readonly stories: readonly WallStory[];
   /** hw: base to the wall's own top */
   readonly heightIn: number;
-  readonly expansions: readonly Expansion[];
   readonly gravitySetCount: number;
   /** one per basis */
   readonly forces: readonly WallForces[];

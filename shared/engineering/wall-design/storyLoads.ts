@@ -51,8 +51,8 @@ export function addAction(
 export function storyLoads(demand: WallDemand, forces: WallForces): LoadGroup[][] {
   const count = demand.stories.length;
   const stories: LoadGroup[][] = demand.stories.map(() => []);
-  for (let index = 0; index < demand.expansions.length; index += 1) {
-    const { seismic } = demand.expansions[index] as Expansion;
+  for (let index = 0; index < forces.expansions.length; index += 1) {
+    const { seismic } = forces.expansions[index] as Expansion;
     for (let story = 0; story < count; story += 1) {
       const at = index * count + story;
       addAction(

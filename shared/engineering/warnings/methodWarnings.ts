@@ -3,13 +3,7 @@ import type { Analysis } from '../stages.ts';
 
 /** What the chosen method can't say, so that no one reads silence as an answer. */
 export function methodWarnings(building: BuildingInput, analysis: Analysis): Warning[] {
-  const warnings: Warning[] = [
-    {
-      code: 'drift-not-available',
-      message:
-        'Drift, torsion ratio and stability come from the whole-height solution only, which this version does not make: they are blank and nothing that needs them reads ok.',
-    },
-  ];
+  const warnings: Warning[] = [];
   if (analysis.model.stories.length > 1 && building.settings.basis.every((basis) => basis === 'rigid')) {
     warnings.push({
       code: 'rigid-only',
@@ -18,7 +12,7 @@ export function methodWarnings(building: BuildingInput, analysis: Analysis): War
     });
   }
   const sharesGiven = building.tables.walls.some((row) => row.share_x !== null || row.share_y !== null);
-  if (sharesGiven) {
+  if (sharesGiven && !building.settings.basis.includes('flexible')) {
     warnings.push({
       code: 'shares-not-used',
       message: 'share_x and share_y are stored but not used: they belong to the flexible basis.',
