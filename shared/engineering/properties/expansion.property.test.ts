@@ -58,10 +58,16 @@ function building(
   return { ...plan, tables: { ...plan.tables, gravity: [gravity], combinations } };
 }
 
+/** Rows of `rigid`; in one story the whole height is the story, so that `compatible` has to give the same rows. */
 function actionsOf(input: BuildingInput, wall: string): readonly ResultAction[] {
   const outcome = runBuilding(input, { allActions: true });
   if (!outcome.ok) throw new Error(JSON.stringify(outcome.problems));
-  return outcome.document.actions.filter((action) => action.wall === wall);
+  const rowsOf = (basis: string): ResultAction[] =>
+    outcome.document.actions.filter((action) => action.wall === wall && action.basis === basis);
+  const [rigid, compatible] = [rowsOf('rigid'), rowsOf('compatible')];
+  expect(compatible.map(({ combination }) => combination)).toEqual(rigid.map(({ combination }) => combination));
+  expectTriples(compatible, triples(rigid));
+  return rigid;
 }
 
 const triples = (actions: readonly ResultAction[]): number[][] =>
