@@ -1,5 +1,5 @@
 /** Every path of the client and its builder. */
-export const inputTabs = ['levels', 'walls', 'forces', 'gravity', 'combinations', 'settings'] as const;
+export const inputTabs = ['levels', 'walls', 'forces', 'gravity', 'combinations', 'overrides', 'settings'] as const;
 export type InputTab = (typeof inputTabs)[number];
 
 export const buildingPages = ['inputs', 'distribution', 'takedown', 'schedule'] as const;

@@ -19,6 +19,6 @@ export function buildingInput(building: BuildingResource, tables: LoadedTables):
   );
   return {
     settings: { given: [], ...settings },
-    tables: { ...(plain as unknown as Omit<Tables, 'overrides'>), overrides: [] },
+    tables: plain as unknown as Tables,
   };
 }

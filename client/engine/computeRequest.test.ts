@@ -12,6 +12,7 @@ const loaded = () => ({
   forces: sampleTable('forces'),
   gravity: sampleTable('gravity'),
   combinations: sampleTable('combinations'),
+  overrides: sampleTable('overrides'),
 });
 
 it('puts together what the server sent to the input that it came from', () => {

@@ -13,8 +13,9 @@ export function useBuildingInput(id: string): BuildingInput | null {
   const forces = useTable(id, 'forces').data;
   const gravity = useTable(id, 'gravity').data;
   const combinations = useTable(id, 'combinations').data;
+  const overrides = useTable(id, 'overrides').data;
   return useMemo(() => {
-    if (!building || !levels || !walls || !forces || !gravity || !combinations) return null;
-    return buildingInput(building, { levels, walls, forces, gravity, combinations });
-  }, [building, levels, walls, forces, gravity, combinations]);
+    if (!building || !levels || !walls || !forces || !gravity || !combinations || !overrides) return null;
+    return buildingInput(building, { levels, walls, forces, gravity, combinations, overrides });
+  }, [building, levels, walls, forces, gravity, combinations, overrides]);
 }

@@ -4,7 +4,9 @@
  */
 import { readFileSync } from 'node:fs';
 
-import { compareActions, compareResult } from './compareResult.mjs';
+import { compareActions } from './compareActions.mjs';
+import { compareResult } from './compareResult.mjs';
+import { judgeEnvelope } from './judgeEnvelope.mjs';
 import { residuals } from './equilibrium.mjs';
 import { judgeSchedule } from './judgeSchedule.mjs';
 import { judgeRows } from './judgeRows.mjs';
@@ -26,7 +28,7 @@ const solution = solveBuilding(building);
 const lines = [];
 const say = (text) => process.stdout.write(`${text}\n`);
 
-const balance = residuals(building, result, ownUnits[building.system]);
+const balance = residuals(building, result, ownUnits[building.system], solution);
 for (const line of ['force x', 'force y', 'torque', 'overturning x', 'overturning y', 'vertical']) {
   const rows = balance.filter((row) => row.line === line);
   const worst = rows.reduce((largest, row) => (row.value > largest.value ? row : largest), {
@@ -37,12 +39,12 @@ for (const line of ['force x', 'force y', 'torque', 'overturning x', 'overturnin
   say(`residual ${line.padEnd(14)} ${worst.value.toExponential(2)} over ${String(rows.length)} stories and cases`);
   for (const row of rows) {
     if (!(row.value < residualLimit))
-      lines.push(`residual of ${line}, ${row.case} ${row.variant} ${row.level}: ${String(row.value)}`);
+      lines.push(`residual of ${line}, ${row.basis ?? ''} ${row.case} ${row.variant} ${row.level}: ${String(row.value)}`);
   }
 }
 for (const row of result.balance) {
   if (!(row.residual < residualLimit))
-    lines.push(`balance ${row.case} ${row.variant} ${row.level}: states ${String(row.residual)}`);
+    lines.push(`balance ${row.basis} ${row.case} ${row.variant} ${row.level}: states ${String(row.residual)}`);
 }
 
 const arrays = compareResult(building, result, solution);
@@ -50,19 +52,19 @@ say(`compared ${String(arrays.compared)} numbers, largest deviation ${arrays.lar
 lines.push(...arrays.lines);
 
 const { comparison, counts } = compareActions(building, result, solution);
-say(
-  `actions: ${String(counts?.own ?? 0)} expansions a wall and story here, ${String(comparison.compared)} numbers compared`,
-);
-lines.push(...comparison.lines);
-if (option === '--all-actions' && counts !== null && counts.own !== counts.listed) {
-  lines.push(`actions: ${String(counts.listed)} a wall and story in the result, ${String(counts.own)} here`);
+for (const [basis, { own, listed }] of counts) {
+  say(`actions: ${String(own)} expansions a wall and story here in ${basis}`);
+  if (option === '--all-actions' && own !== listed)
+    lines.push(`actions ${basis}: ${String(listed)} a wall and story in the result, ${String(own)} here`);
 }
+say(`actions: ${String(comparison.compared)} numbers compared`);
+lines.push(...comparison.lines);
 
 const judged = judgeSchedule(building, result, solution);
 say(
   `sections judged again: ${String(judged.sections)}, flexure within ${judged.worstFlexure.toExponential(2)}, shear within ${judged.worstShear.toExponential(2)}`,
 );
-lines.push(...judged.lines, ...judgeRows(building, result));
+lines.push(...judged.lines, ...judgeRows(building, result), ...judgeEnvelope(building, result, solution));
 
 for (const line of lines.slice(0, shown)) say(`differs: ${line}`);
 if (lines.length > shown) say(`and ${String(lines.length - shown)} more`);

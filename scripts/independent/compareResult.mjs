@@ -1,4 +1,5 @@
 import { Comparison } from './compareArrays.mjs';
+import { compareDrifts } from './compareDrifts.mjs';
 import { ownUnits } from './siUnits.mjs';
 
 const keyOf =
@@ -6,12 +7,11 @@ const keyOf =
   (row) =>
     JSON.stringify(columns.map((column) => row[column]));
 
-/** Every array of a result that this check solves on its own, in the building's units. */
+/** Every array of a result before the combinations that this check solves on its own, in the building's units. */
 export function compareResult(building, result, solution) {
   const unit = ownUnits[building.system];
   const comparison = new Comparison();
   const levelOf = (i) => building.stories[i].level;
-  const rigid = (rows) => rows.filter((row) => row.basis === 'rigid');
   compareLevels(comparison, building, result, unit);
 
   const rigidities = building.rigidity.flatMap(({ parts }, i) => {
@@ -23,8 +23,9 @@ export function compareResult(building, result, solution) {
   const shares = [];
   const lateral = [];
   const transferred = [];
-  for (const set of solution.lateral) {
-    const name = { case: set.load.name, variant: set.variant };
+  for (const set of solution.sets) {
+    if (set.variant === 'twist') continue;
+    const name = { basis: set.basis, case: set.load.name, variant: set.variant };
     const force = (i) => Math.hypot(set.actions[i].x, set.actions[i].y) / unit.force;
     const overturning = (from) =>
       Math.hypot(
@@ -34,30 +35,18 @@ export function compareResult(building, result, solution) {
       ) / unit.moment;
     for (const { story, wall, direct, torsional, total } of set.shares) {
       const size = force(story);
-      shares.push({
-        ...name,
-        level: levelOf(story),
-        wall,
-        direct: direct / unit.force,
-        torsional: torsional / unit.force,
-        total: total / unit.force,
-        scale: { direct: size, torsional: size, total: size },
-      });
+      const parts = set.basis === 'rigid' ? { direct: direct / unit.force, torsional: torsional / unit.force } : {};
+      const scale = { direct: size, torsional: size, total: size };
+      shares.push({ ...name, level: levelOf(story), wall, ...parts, total: total / unit.force, scale });
     }
     for (const { story, wall, shear, moment } of set.lateral) {
       const scale = { shear: force(story), moment: overturning(story) };
-      lateral.push({
-        ...name,
-        level: levelOf(story),
-        wall,
-        shear: shear / unit.force,
-        moment: moment / unit.moment,
-        scale,
-      });
+      const values = { shear: shear / unit.force, moment: moment / unit.moment };
+      lateral.push({ ...name, level: levelOf(story), wall, ...values, scale });
     }
-    for (const { story, wall, shear, moment } of set.transferred) {
+    for (const { story, wall, axial, shear, moment } of set.transferred) {
       const scale = { axial: force(story), shear: force(story), moment: overturning(story) };
-      const values = { axial: 0, shear: shear / unit.force, moment: moment / unit.moment };
+      const values = { axial: axial / unit.force, shear: shear / unit.force, moment: moment / unit.moment };
       transferred.push({ ...name, level: levelOf(story), wall, ...values, scale });
     }
   }
@@ -70,13 +59,17 @@ export function compareResult(building, result, solution) {
   for (const { lowest, story, wall, case: name, axial, moment, scale } of gravity) {
     if (!lowest || story === 0) continue;
     const values = { axial, shear: 0, moment, scale: { ...scale, shear: scale.axial } };
-    transferred.push({ case: name, variant: '0', level: levelOf(story - 1), wall, ...values });
+    for (const basis of solution.bases)
+      transferred.push({ basis, case: name, variant: '0', level: levelOf(story - 1), wall, ...values });
   }
-  const place = keyOf('case', 'variant', 'level', 'wall');
-  comparison.rows('distribution', rigid(result.distribution), shares, place, ['direct', 'torsional', 'total']);
-  comparison.rows('lateral', rigid(result.lateral), lateral, place, ['shear', 'moment']);
+  const place = keyOf('basis', 'case', 'variant', 'level', 'wall');
+  const rigid = (rows) => rows.filter((row) => row.basis === 'rigid');
+  comparison.rows('distribution', result.distribution, shares, place, ['total']);
+  comparison.rows('distribution', rigid(result.distribution), rigid(shares), place, ['direct', 'torsional']);
+  comparison.rows('lateral', result.lateral, lateral, place, ['shear', 'moment']);
   comparison.rows('gravity', result.gravity, gravity, keyOf('case', 'level', 'wall'), ['axial', 'moment']);
-  comparison.rows('transferred', rigid(result.transferred), transferred, place, ['axial', 'shear', 'moment']);
+  comparison.rows('transferred', result.transferred, transferred, place, ['axial', 'shear', 'moment']);
+  compareDrifts(comparison, building, result, solution);
   return comparison;
 }
 
@@ -108,51 +101,4 @@ function compareLevels(comparison, building, result, unit) {
       comparison.number(`${where} ${load.name} story mz`, shear?.mz, sum('torque', unit.moment), force);
     }
   });
-}
-
-/** Listed actions against the own expansion: every one must be among mine, and the extremes must be the same. */
-export function compareActions(building, result, solution) {
-  const unit = ownUnits[building.system];
-  const comparison = new Comparison();
-  const listed = new Map();
-  for (const action of result.actions.filter((row) => row.basis === 'rigid')) {
-    const key = JSON.stringify([action.wall, building.index.get(action.level)]);
-    if (!listed.has(key)) listed.set(key, []);
-    listed.get(key).push(action);
-  }
-  let counts = null;
-  for (const [key, forces] of solution.actions) {
-    const own = forces.map(({ axial, moment, shear }) => [
-      axial / unit.force,
-      moment / unit.moment,
-      shear / unit.force,
-    ]);
-    const theirs = listed.get(key) ?? [];
-    const scales = [0, 1, 2].map((n) => Math.max(1e-9, ...own.map((values) => Math.abs(values[n]))));
-    const free = new Set(own);
-    for (const { combination, axial, moment, shear } of theirs) {
-      const match = [...free].find((values) =>
-        [axial, moment, shear].every((value, n) => Math.abs(value - values[n]) <= 1e-6 * scales[n]),
-      );
-      comparison.compared += 1;
-      if (match === undefined)
-        comparison.lines.push(
-          `actions ${key} ${combination}: [${[axial, moment, shear].join(', ')}] is not in the own expansion`,
-        );
-      else free.delete(match);
-    }
-    const extremes = [
-      ['axial largest', ([a]) => a],
-      ['axial smallest', ([a]) => -a],
-      ['moment', ([, m]) => Math.abs(m)],
-      ['shear', ([, , v]) => Math.abs(v)],
-    ];
-    for (const [name, pick] of extremes) {
-      const mine = Math.max(...own.map(pick));
-      const there = Math.max(...theirs.map(({ axial, moment, shear }) => pick([axial, moment, shear])));
-      comparison.number(`actions ${key} ${name}`, there, mine, Math.abs(mine));
-    }
-    counts ??= { own: own.length, listed: theirs.length };
-  }
-  return { comparison, counts };
 }

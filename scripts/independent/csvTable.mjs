@@ -37,6 +37,7 @@ const quantities = {
     eccentricity: 'length',
   },
   combinations: {},
+  overrides: { shear: 'force', axial: 'force', moment: 'moment', share: 'plain' },
 };
 
 /** Records of a delimited text with quoted fields. */

@@ -1,85 +1,75 @@
-import { storyActions } from './solveLateral.mjs';
-
 /**
  * Residuals of a result against the tables alone: force and torque of the shares, overturning of the wall moments about
  * both axes at every story bottom, vertical load. Nothing of the solver's own shares is used; walls that stop above the
  * base count with what the result lists as transferred.
  */
-export function residuals(building, result, unit) {
+export function residuals(building, result, unit, solution) {
   const out = [];
-  const place = (rows) => {
-    const map = new Map();
-    for (const row of rows) {
-      const key = JSON.stringify([row.case, row.variant, row.level]);
-      if (!map.has(key)) map.set(key, []);
-      map.get(key).push(row);
+  for (const basis of solution.bases) {
+    for (const set of solution.sets) {
+      if (set.basis === basis && set.variant !== 'twist') out.push(...ofSet(building, result, unit, set));
     }
-    return map;
-  };
-  const rigid = (rows) => rows.filter((row) => row.basis === 'rigid');
-  const shares = place(rigid(result.distribution));
-  const lateral = place(rigid(result.lateral));
-  for (const load of building.cases) {
-    const variants = load.kind === 'seismic' && building.settings.accidental > 0 ? ['0', '+', '-'] : ['0'];
-    for (const variant of variants) {
-      const actions = storyActions(building, load, variant);
-      building.stories.forEach((story, i) => {
-        const rows = shares.get(JSON.stringify([load.name, variant, story.level])) ?? [];
-        const moments = lateral.get(JSON.stringify([load.name, variant, story.level])) ?? [];
-        const segment = (row) => building.walls.get(row.wall).segments.get(i);
-        const forces = (pick) => rows.map((row) => row.total * unit.force * pick(segment(row)));
-        const add = (line, parts, applied, base) =>
-          out.push({ line, case: load.name, variant, level: story.level, value: relative(parts, applied, base) });
-        add(
-          'force x',
-          forces(({ c }) => c),
-          actions[i].x,
-          actions[0].x,
-        );
-        add(
-          'force y',
-          forces(({ s }) => s),
-          actions[i].y,
-          actions[0].y,
-        );
-        add(
-          'torque',
-          forces(({ c, s, x, y }) => x * s - y * c),
-          actions[i].torque,
-          actions[0].torque,
-        );
-        const stopped = rigid(result.transferred).filter(
-          (row) => row.case === load.name && row.variant === variant && building.index.get(row.level) >= i,
-        );
-        const directionOf = (row) => {
-          const wall = building.walls.get(row.wall);
-          return wall.segments.get(wall.from);
-        };
-        for (const [line, part, component] of [
-          ['overturning x', 'c', 'fx'],
-          ['overturning y', 's', 'fy'],
-        ]) {
-          const parts = [...moments, ...stopped].map((row) => row.moment * unit.moment * directionOf(row)[part]);
-          const applied = (from) =>
-            load.levels.reduce(
-              (sum, force, j) =>
-                j < from ? sum : sum + force[component] * (building.stories[j].top - building.stories[from].bottom),
-              0,
-            );
-          add(line, parts, applied(i), applied(0));
-        }
-      });
-    }
+    out.push(...verticalResiduals(building, result, unit, basis));
   }
-  return [...out, ...verticalResiduals(building, result, unit)];
+  return out;
 }
 
-function verticalResiduals(building, result, unit) {
+/** Stories below an own share do not close in torque; `flexible` closes each direction by force, skew walls push sideways. */
+function ofSet(building, result, unit, { basis, load, variant, actions }) {
+  const out = [];
+  const own = (rows) =>
+    rows.filter((row) => row.basis === basis && row.case === load.name && row.variant === variant);
+  const shares = own(result.distribution);
+  const lateral = own(result.lateral);
+  const stopped = own(result.transferred);
+  const belongs = (row) => row.case === undefined || row.case === load.name;
+  const overrides = building.overrides.filter(belongs);
+  const sideways =
+    basis === 'flexible' && [...building.walls.values()].some((wall) => Math.abs(wall.segments.get(wall.from).c * wall.segments.get(wall.from).s) > 1e-9);
+  const directionOf = (row) => {
+    const wall = building.walls.get(row.wall);
+    return wall.segments.get(wall.from);
+  };
+  building.stories.forEach((story, i) => {
+    const here = shares.filter((row) => row.level === story.level);
+    const forces = (pick) => here.map((row) => row.total * unit.force * pick(directionOf(row)));
+    const add = (line, parts, applied, base) =>
+      out.push({ line, basis, case: load.name, variant, level: story.level, value: relative(parts, applied, base) });
+    if (sideways) return;
+    add('force x', forces(({ c }) => c), actions[i].x, actions[0].x);
+    add('force y', forces(({ s }) => s), actions[i].y, actions[0].y);
+    const shared = overrides.some((row) => row.kind === 'share' && row.level === story.level);
+    if (basis !== 'flexible' && !shared)
+      add('torque', forces(({ c, s, x, y }) => x * s - y * c), actions[i].torque, actions[0].torque);
+    if (overrides.some((row) => row.kind === 'transfer')) return;
+    const moments = lateral.filter((row) => row.level === story.level);
+    const above = stopped.filter((row) => building.index.get(row.level) >= i);
+    for (const [line, part, component] of [
+      ['overturning x', 'c', 'fx'],
+      ['overturning y', 's', 'fy'],
+    ]) {
+      const parts = [...moments, ...above].map((row) => row.moment * unit.moment * directionOf(row)[part]);
+      const applied = (from) =>
+        load.levels.reduce(
+          (sum, force, j) =>
+            j < from ? sum : sum + force[component] * (building.stories[j].top - building.stories[from].bottom),
+          0,
+        );
+      add(line, parts, applied(i), applied(0));
+    }
+  });
+  return out;
+}
+
+function verticalResiduals(building, result, unit, basis) {
   const columns = { D: 'dead', L: 'live', Lr: 'rooflive', S: 'snow' };
+  if (building.settings.liveReduction) delete columns.L; // what is reduced does not arrive; the arrays are compared instead
   return Object.entries(columns).flatMap(([name, column]) => {
     const applied = (from) => {
       let sum = 0;
       for (const row of building.gravity) if (building.index.get(row.level) >= from) sum += row[column] ?? 0;
+      for (const row of building.overrides)
+        if (row.kind === 'transfer' && row.case === name && building.index.get(row.level) >= from) sum += row.axial ?? 0;
       if (name !== 'D' || !building.settings.selfWeight) return sum;
       for (const wall of building.walls.values()) {
         for (const [i, { length, thickness, opening }] of wall.segments) {
@@ -92,7 +82,7 @@ function verticalResiduals(building, result, unit) {
     return building.stories.map((story, i) => {
       const standing = result.gravity.filter((row) => row.case === name && row.level === story.level);
       const stopped = result.transferred.filter(
-        (row) => row.basis === 'rigid' && row.case === name && building.index.get(row.level) >= i,
+        (row) => row.basis === basis && row.case === name && building.index.get(row.level) >= i,
       );
       const parts = [...standing, ...stopped].map((row) => row.axial * unit.force);
       return {

@@ -1,3 +1,5 @@
+import { lateralStates } from './lateralStates.mjs';
+
 /** Own reader of combination text: recursive descent over characters, answering every alternative's factors at once. */
 const symbols = ['Omega0', 'SDS', 'rho', 'Lr', 'D', 'L', 'S', 'R', 'W', 'E', 'H', 'F', 'T'];
 
@@ -88,28 +90,34 @@ function defaultTexts(loads, f) {
   ];
 }
 
-/** Every expanded combination: gravity factors, and at most one lateral case with variant and signed factor, plus H. */
-export function expandCombinations(building) {
+/**
+ * Every expanded combination: gravity factors, and the lateral parts with variant and signed factor, plus H. `kept` is the
+ * factor of live load whose live factor stays 1.0 in the standard's own combinations.
+ */
+export function expandCombinations(building, basis) {
   const { settings, combinations, cases } = building;
   const constants = { SDS: settings.sds, rho: settings.rho, Omega0: settings.omega0 };
   const typed = combinations.map((row) => row.expression);
-  const texts = typed.length > 0 ? typed : defaultTexts(settings.loads, settings.liveFactor);
-  const ofKind = (kind) => cases.filter((load) => load.kind === kind);
-  const out = [];
-  for (const form of texts.flatMap((text) => readCombination(text, constants))) {
-    const seismicVariants = settings.accidental > 0 ? ['+', '-'] : ['0'];
+  const read = (f) => {
+    const texts = typed.length > 0 ? typed : defaultTexts(settings.loads, f);
+    return texts.flatMap((text) => readCombination(text, constants));
+  };
+  const whole = read(1);
+  const service = settings.forceLevel === 'service';
+  const states = {
+    W: lateralStates(building, basis, 'wind'),
+    E: lateralStates(building, basis, 'seismic'),
+    H: cases.filter((load) => load.kind === 'other').map((load) => [{ load, variant: '0', by: 1 }]),
+  };
+  const level = { W: service ? 0.6 : 1, E: service ? 0.7 : 1, H: 1 };
+  return read(settings.liveFactor).flatMap((form, n) => {
     let lateral = [[]];
-    const options = (loads, variants, signs, factor) =>
-      loads.flatMap((load) =>
-        variants.flatMap((variant) => signs.map((sign) => ({ load, variant, by: sign * factor }))),
-      );
-    const join = (list) => {
-      if (list.length > 0) lateral = lateral.flatMap((chosen) => list.map((item) => [...chosen, item]));
-    };
-    if ('W' in form) join(options(ofKind('wind'), ['0'], [1, -1], form.W));
-    if ('E' in form) join(options(ofKind('seismic'), seismicVariants, [1, -1], form.E));
-    if ('H' in form) join(options(ofKind('other'), ['0'], [1], form.H));
-    for (const parts of lateral) out.push({ form, parts });
-  }
-  return out;
+    for (const symbol of ['W', 'E', 'H']) {
+      if (!(symbol in form) || states[symbol].length === 0) continue;
+      const factor = form[symbol] / level[symbol];
+      const scaled = states[symbol].map((parts) => parts.map((part) => ({ ...part, by: part.by * factor })));
+      lateral = lateral.flatMap((chosen) => scaled.map((parts) => [...chosen, ...parts]));
+    }
+    return lateral.map((parts) => ({ form, kept: whole[n].L ?? 0, parts }));
+  });
 }

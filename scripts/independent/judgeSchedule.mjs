@@ -10,14 +10,16 @@ export function judgeSchedule(building, result, solution) {
   const found = { lines: [], flexure: 0, shear: 0, sections: 0, worstFlexure: 0, worstShear: 0 };
   if (result.code !== 'aci318-19' || (building.settings.wallClass ?? 'ordinary') !== 'ordinary') return found;
   const checks = new Map();
-  for (const check of result.checks) checks.set(JSON.stringify([check.wall, check.level, check.check]), check);
+  for (const check of result.checks) checks.set(JSON.stringify([check.basis, check.wall, check.level, check.check]), check);
   for (const row of result.schedule) {
     const wall = building.walls.get(row.wall);
     let verdict = true;
     for (let i = building.index.get(row.from); i <= building.index.get(row.to); i += 1) {
-      const actions = solution.actions.get(JSON.stringify([row.wall, i]));
-      const of = (name) => checks.get(JSON.stringify([row.wall, building.stories[i].level, name]));
-      verdict = judgeStory({ building, row, wall, i, actions, of, found }) && verdict;
+      for (const basis of solution.bases) {
+        const actions = solution.actions.get(basis).get(JSON.stringify([row.wall, i]));
+        const of = (name) => checks.get(JSON.stringify([basis, row.wall, building.stories[i].level, name]));
+        verdict = judgeStory({ building, row, wall, i, actions, of, found }) && verdict;
+      }
     }
     if (row.ok && !verdict) found.lines.push(`row ${row.wall} ${row.from} to ${row.to}: ok in the result, not ok here`);
   }

@@ -2,6 +2,7 @@ import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 
 import { readCsvTable } from './csvTable.mjs';
+import { readCases } from './readCases.mjs';
 import { ownUnits } from './siUnits.mjs';
 
 /** A building of a folder in newtons and meters: plain objects, stories from the base up. */
@@ -19,6 +20,19 @@ export function readBuilding(folder) {
     sds: 0,
     rho: 1,
     omega0: 2.5,
+    basis: ['rigid', 'compatible'],
+    amplify: false,
+    orthogonal: 0,
+    windCases: false,
+    liveReduction: false,
+    kll: 1,
+    cd: 5,
+    ie: 1,
+    riskCategory: 'II',
+    windDriftFactor: 0.6,
+    forcesAre: 'level-force',
+    forceLevel: 'strength',
+    baseSprings: {},
     ...given,
     fc: (given.fc ?? (us ? 5000 : 35)) * unit.strength,
     fy: (given.fy ?? (us ? 60 : 420)) * unit.steel,
@@ -38,6 +52,7 @@ export function readBuilding(folder) {
   readWalls(building, table('walls'));
   placeStories(building);
   building.gravity = table('gravity');
+  building.overrides = table('overrides');
   building.cases = readCases(building, table('forces'));
   return building;
 }
@@ -84,6 +99,8 @@ function readWalls(building, rows) {
         opening: row.opening ?? 0,
         flexure: row.flexurefactor ?? settings.stiffness.flexure,
         shear: row.shearfactor ?? settings.stiffness.shear,
+        sharex: row.sharex,
+        sharey: row.sharey,
       });
     }
   }
@@ -104,27 +121,11 @@ function placeStories(building) {
       const extent = story[`extent${axis}`];
       const edge = story[`edge${axis}`];
       story[`extent${axis}`] ??= high - low;
+      story[`edge${axis}`] ??=
+        story[axis] !== undefined ? story[axis] - (extent ?? high - low) / 2 : extent === undefined ? low : undefined;
       story[axis] ??= extent !== undefined && edge !== undefined ? edge + extent / 2 : (low + high) / 2;
     };
     along('x');
     along('y');
   });
-}
-
-function readCases(building, rows) {
-  const cases = new Map();
-  for (const row of rows) {
-    if (!cases.has(row.case)) {
-      const empty = building.stories.map(() => ({ fx: 0, fy: 0, mz: 0, torque: 0 }));
-      cases.set(row.case, { name: row.case, kind: row.kind.toLowerCase(), levels: empty });
-    }
-    const i = building.index.get(row.level);
-    const story = building.stories[i];
-    const sum = cases.get(row.case).levels[i];
-    sum.fx += row.fx;
-    sum.fy += row.fy;
-    sum.mz += row.mz ?? 0;
-    sum.torque += (row.mz ?? 0) + (row.x ?? story.x) * row.fy - (row.y ?? story.y) * row.fx;
-  }
-  return [...cases.values()];
 }

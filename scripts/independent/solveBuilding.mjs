@@ -1,20 +1,21 @@
 import { expandCombinations } from './expandCombinations.mjs';
+import { solveBases } from './solveBases.mjs';
 import { solveGravity } from './solveGravity.mjs';
-import { solveLateral, storyRigidity, variantsOf } from './solveLateral.mjs';
+import { storyRigidity } from './solveLateral.mjs';
+
+const key = (...parts) => JSON.stringify(parts);
 
 /** Everything the check compares, in newtons and meters. */
 export function solveBuilding(building) {
   building.rigidity = building.stories.map((_, i) => storyRigidity(building, i));
-  const lateral = building.cases.flatMap((load) =>
-    variantsOf(load, building.settings).map((variant) => ({ load, variant, ...solveLateral(building, load, variant) })),
-  );
+  const { sets, drifts, bases } = solveBases(building);
   const gravity = solveGravity(building);
-  return { lateral, gravity, actions: expandActions(building, lateral, gravity) };
+  const actions = new Map(bases.map((basis) => [basis, expandActions(building, basis, sets, gravity)]));
+  return { bases, sets, drifts, gravity, actions };
 }
 
-/** Axial, moment and shear of every wall and story under every expanded combination: a map of lists. */
-function expandActions(building, lateral, gravity) {
-  const key = (wall, story) => JSON.stringify([wall, story]);
+/** Axial, moment and shear of every wall and story under every expanded combination of one basis: a map of lists. */
+function expandActions(building, basis, sets, gravity) {
   const actions = new Map();
   const gravityOf = new Map();
   for (const row of gravity) {
@@ -22,26 +23,26 @@ function expandActions(building, lateral, gravity) {
     gravityOf.set(place, { ...gravityOf.get(place), [row.case]: row });
     actions.set(place, []);
   }
-  const sets = new Map();
-  for (const set of lateral) {
-    const places = new Map(set.lateral.map((row) => [key(row.wall, row.story), row]));
-    sets.set(JSON.stringify([set.load.name, set.variant]), places);
+  const lateralOf = new Map();
+  for (const set of sets) {
+    if (set.basis !== basis) continue;
+    lateralOf.set(key(set.load.name, set.variant), new Map(set.lateral.map((row) => [key(row.wall, row.story), row])));
   }
-  for (const { form, parts } of expandCombinations(building)) {
+  for (const { form, kept, parts } of expandCombinations(building, basis)) {
     for (const [place, cases] of gravityOf) {
-      let axial = 0;
-      let moment = 0;
-      let shear = 0;
+      const sum = { axial: 0, moment: 0, shear: 0, form, parts };
       for (const [name, row] of Object.entries(cases)) {
-        axial += (form[name] ?? 0) * row.axial;
-        moment += (form[name] ?? 0) * row.moment;
+        const factor = form[name] ?? 0;
+        sum.axial += factor * row.axial + (name === 'L' ? (kept - factor) * row.kept.axial : 0);
+        sum.moment += factor * row.moment + (name === 'L' ? (kept - factor) * row.kept.moment : 0);
       }
       for (const { load, variant, by } of parts) {
-        const row = sets.get(JSON.stringify([load.name, variant])).get(place);
-        moment += by * row.moment;
-        shear += by * row.shear;
+        const row = lateralOf.get(key(load.name, variant)).get(place);
+        sum.axial += by * row.axial;
+        sum.moment += by * row.moment;
+        sum.shear += by * row.shear;
       }
-      actions.get(place).push({ axial, moment, shear, form, parts });
+      actions.get(place).push(sum);
     }
   }
   return actions;

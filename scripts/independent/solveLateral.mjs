@@ -1,11 +1,18 @@
+import { transferAt } from './applyOverrides.mjs';
 import { foot, pound, psi } from './siUnits.mjs';
 
-/** k of one segment, N/m: cantilever or fixed, flexure and shear; Ec = 57,000 sqrt(f'c) psi or 33 w^1.5 sqrt(f'c). */
-export function rigidityOf(segment, height, settings) {
-  const { end, unitWeight } = settings.stiffness;
+/** Ec = 57,000 sqrt(f'c) psi or, with a typed unit weight, 33 w^1.5 sqrt(f'c). */
+export function modulusOf(segment, settings) {
+  const { unitWeight } = settings.stiffness;
   const root = Math.sqrt(segment.fc / psi);
   const weightPcf = typeof unitWeight !== 'number' ? null : unitWeight / (pound / foot ** 3);
-  const modulus = (weightPcf === null ? 57000 * root : 33 * weightPcf ** 1.5 * root) * psi;
+  return (weightPcf === null ? 57000 * root : 33 * weightPcf ** 1.5 * root) * psi;
+}
+
+/** k of one segment, N/m: cantilever or fixed, flexure and shear. */
+export function rigidityOf(segment, height, settings) {
+  const { end } = settings.stiffness;
+  const modulus = modulusOf(segment, settings);
   const inertia = (segment.flexure * segment.thickness * segment.length ** 3) / 12;
   const area = segment.shear * segment.thickness * segment.length;
   const bending = height ** 3 / ((end === 'fixed' ? 12 : 3) * modulus * inertia);
@@ -16,16 +23,25 @@ export function rigidityOf(segment, height, settings) {
 export const variantsOf = (load, settings) =>
   load.kind === 'seismic' && settings.accidental > 0 ? ['0', '+', '-'] : ['0'];
 
-/** Action of every story: sums over levels at and above, about the origin. */
-export function storyActions(building, load, variant) {
+/** Force and torque of every level; accidental eccentricity by the level's own extent and its own Ax; `twist` alone for wind. */
+export function levelActions(building, load, variant, ax) {
   const sign = { 0: 0, '+': 1, '-': -1 }[variant];
-  let sum = { x: 0, y: 0, torque: 0 };
-  const actions = [];
-  for (let i = building.stories.length - 1; i >= 0; i -= 1) {
-    const story = building.stories[i];
+  return building.stories.map((story, i) => {
     const force = load.levels[i];
-    const accidental = building.settings.accidental * (story.extentx * force.fy - story.extenty * force.fx);
-    sum = { x: sum.x + force.fx, y: sum.y + force.fy, torque: sum.torque + force.torque + sign * accidental };
+    const lever = story.extentx * force.fy - story.extenty * force.fx;
+    if (variant === 'twist') return { x: 0, y: 0, torque: 0.15 * lever };
+    const torque = force.torque + sign * building.settings.accidental * (ax?.[i] ?? 1) * lever;
+    return { x: force.fx, y: force.fy, torque };
+  });
+}
+
+/** Action of every story: sums over levels at and above, about the origin. */
+export function sumDown(levels) {
+  const actions = [];
+  let sum = { x: 0, y: 0, torque: 0 };
+  for (let i = levels.length - 1; i >= 0; i -= 1) {
+    const { x, y, torque } = levels[i];
+    sum = { x: sum.x + x, y: sum.y + y, torque: sum.torque + torque };
     actions[i] = sum;
   }
   return actions;
@@ -69,25 +85,29 @@ export function shareStory(rigidity, action) {
   }));
 }
 
-/** Everything lateral of one case and variant: shares, wall shear and moment at every story bottom, what stops above base. */
-export function solveLateral(building, load, variant) {
-  const actions = storyActions(building, load, variant);
-  const shares = [];
-  for (let i = 0; i < building.stories.length; i += 1) {
-    for (const share of shareStory(building.rigidity[i], actions[i])) {
-      shares.push({ story: i, ...share, total: share.direct + share.torsional });
-    }
-  }
+/** Shares of all stories, story by story. */
+export function solveStories(building, actions) {
+  return building.rigidity.flatMap((rigidity, story) =>
+    shareStory(rigidity, actions[story]).map((share) => ({ story, ...share, total: share.direct + share.torsional })),
+  );
+}
+
+/** Shear, moment and axial of every wall at every story bottom from its shares, and what stops above the base. */
+export function takeDown(building, load, shares) {
   const lateral = [];
   const transferred = [];
+  const at = new Map(shares.map((share) => [`${String(share.story)} ${share.wall}`, share]));
   for (const wall of building.walls.values()) {
     let moment = 0;
+    let axial = 0;
     for (let i = wall.to; i >= wall.from; i -= 1) {
-      const { total } = shares.find((share) => share.story === i && share.wall === wall.name);
-      moment += total * building.stories[i].height;
-      lateral.push({ story: i, wall: wall.name, shear: total, moment });
-      if (i === wall.from && i > 0) transferred.push({ story: i - 1, wall: wall.name, axial: 0, shear: total, moment });
+      const extra = load === null ? { shear: 0, axial: 0, moment: 0 } : transferAt(building, load, wall.name, i);
+      const shear = at.get(`${String(i)} ${wall.name}`).total + extra.shear;
+      axial += extra.axial;
+      moment += shear * building.stories[i].height + extra.moment;
+      lateral.push({ story: i, wall: wall.name, shear, moment, axial });
+      if (i === wall.from && i > 0) transferred.push({ story: i - 1, wall: wall.name, axial, shear, moment });
     }
   }
-  return { actions, shares, lateral, transferred };
+  return { lateral, transferred };
 }

@@ -120,6 +120,6 @@ export const tableColumns: { readonly [T in TableName]: ColumnsOf<T> } = {
   ],
 };
 
-/** Tables with pages and routes today; overrides.csv is refused as not designed yet. */
-export const editableTables = ['levels', 'walls', 'forces', 'gravity', 'combinations'] as const;
+/** Tables with pages and routes: all of them, in the order in which they refer to each other. */
+export const editableTables = ['levels', 'walls', 'forces', 'gravity', 'combinations', 'overrides'] as const;
 export type EditableTable = (typeof editableTables)[number];

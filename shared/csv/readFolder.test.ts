@@ -53,13 +53,13 @@ describe('readFolder', () => {
 
   it('gathers problems of building.json, cells and references at once, in order', () => {
     const places = placesOf({
-      'building.json': '{"name": "Two", "units": "us", "fc": "x", "amplify": true}',
+      'building.json': '{"name": "Two", "units": "us", "fc": "x", "mergeShare": 0.1}',
       'forces.csv': 'level,case,kind,fx,fy\nL9,WX,wind,1,0\nL1,WX,wind,1,b\n\nL8,WX,seismic,1,0\nL2,WX,wind,1,0\n',
       'gravity.csv': 'level,wall,dead\nL1,W9,4\n',
     });
     expect(places).toEqual([
       ['building.json', null, 'fc'],
-      ['building.json', null, 'amplify'],
+      ['building.json', null, 'mergeShare'],
       ['forces.csv', 2, 'level'],
       ['forces.csv', 3, 'fy'],
       ['forces.csv', 5, 'level'],
@@ -95,11 +95,27 @@ describe('readFolder', () => {
     expect(problemsOf({ 'building.json': '{"name": "Two", "units": "us", "wallClass": "special"}' })[0]?.code).toBe(
       'not-designed-yet',
     );
-    expect(problemsOf({ 'overrides.csv': 'kind,level,wall,reason\ntransfer,L1,W1,x\n' })[0]).toMatchObject({
-      file: 'overrides.csv',
-      row: 2,
-      code: 'not-designed-yet',
-    });
+  });
+
+  it('reads overrides and holds them against walls and cases', () => {
+    const overrides = 'kind,level,wall,axial,reason\ntransfer,L1,W9,12,ring beam\n';
+    expect(placesOf({ 'overrides.csv': overrides })).toEqual([['overrides.csv', 2, 'wall']]);
+    const reading = readFolder(files({ 'overrides.csv': overrides.replace('W9', 'W1') }));
+    if (!reading.ok) throw new Error(JSON.stringify(reading.problems));
+    expect(reading.input.tables.overrides).toEqual([
+      {
+        kind: 'transfer',
+        level: 'L1',
+        wall: 'W1',
+        case: null,
+        shear: null,
+        axial: 12,
+        moment: null,
+        share: null,
+        reason: 'ring beam',
+      },
+    ]);
+    expect(reading.lines.overrides).toEqual([2]);
   });
 
   it('passes on notices of files and rows', () => {
@@ -120,6 +136,7 @@ describe('readFolder', () => {
       'forces.csv',
       'gravity.csv',
       'combinations.csv',
+      'overrides.csv',
     );
     fc.assert(
       fc.property(name, fc.nat(), fc.nat(), fc.uint8Array({ maxLength: 6 }), (file, at, cut, patch) => {

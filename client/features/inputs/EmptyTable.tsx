@@ -38,6 +38,12 @@ const words: Readonly<Record<EditableTable, { title: string; start: string; add:
     start: 'one expression a row. Without any, the combinations of the load standard in the settings are taken.',
     add: 'Add a combination',
   },
+  overrides: {
+    title: 'No overrides',
+    start:
+      'one row a transfer or share, with its reason. A transfer adds shear, axial or moment to a wall in a story; a share sets its part of the story shear.',
+    add: 'Add an override',
+  },
 };
 
 /** What to bring first, then the way. */

@@ -20,6 +20,7 @@ import { useBuilding } from '../../data/queries.ts';
 import { downloadText } from './downloadText.ts';
 import { EmptyTable } from './EmptyTable.tsx';
 import { focusRow } from './focusRow.ts';
+import { ForcesReading } from './ForcesReading.tsx';
 import { valueOf, type InputRow } from './inputColumns.ts';
 import { InputStack } from './InputStack.tsx';
 import { InputTabs } from './InputTabs.tsx';
@@ -66,6 +67,7 @@ export function InputsPage() {
       rows: allRows[table] as readonly InputRow[],
       levels: allRows.levels.map((row) => row.level),
       walls: [...new Set(allRows.walls.map((row) => row.wall))],
+      cases: [...new Set(allRows.forces.map((row) => row.case))],
       elevations: new Map(view.stories.map((story) => [story.level, story.elevation])),
     }),
     [units, allRows, table, view],
@@ -120,7 +122,8 @@ export function InputsPage() {
           building={building.data}
           canEdit={canEdit}
           hasRows={editableTables.some((one) => queries[one].data?.rows.length !== 0)}
-          cases={[...new Set(allRows.forces.map((row) => row.case))]}
+          cases={context.cases}
+          walls={context.walls}
         />
       )
     ) : query.isError ? (
@@ -236,7 +239,12 @@ export function InputsPage() {
           if (canEdit) flow.choose([...event.dataTransfer.files]);
         }}
       >
-        <div className="min-w-0">{pane}</div>
+        <div className="min-w-0">
+          {pane}
+          {tab === 'forces' && rows.length > 0 && building.data !== undefined ? (
+            <ForcesReading building={building.data} levels={allRows.levels} forces={allRows.forces} canEdit={canEdit} />
+          ) : null}
+        </div>
         {uploading && canEdit ? (
           <UploadPanel
             flow={flow}

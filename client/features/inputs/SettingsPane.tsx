@@ -1,14 +1,14 @@
-import { useId, useState, type SubmitEvent } from 'react';
+import { useState, type SubmitEvent } from 'react';
 
 import type { BuildingResource } from '#shared/contracts/buildings';
 import type { ApiProblem } from '#shared/contracts/errors';
 
 import { sentenceOf } from '../../app/errorSentences.ts';
 import { Button } from '../../components/ui/Button.tsx';
-import { Segments } from '../../components/ui/Segments.tsx';
 import { usePatchBuilding, type BuildingPatch } from '../../data/mutations.ts';
-import { draftOf, putAt, readDraft, valueAt } from './settingDraft.ts';
-import { fieldUnit, settingGroups, type SettingField } from './settingFields.ts';
+import { draftOf, putAt, readDraft, recordPath, valueAt } from './settingDraft.ts';
+import { SettingField as Field } from './SettingField.tsx';
+import { settingGroups, type SettingField } from './settingFields.ts';
 
 export interface SettingsPaneProps {
   readonly building: BuildingResource;
@@ -17,82 +17,8 @@ export interface SettingsPaneProps {
   readonly hasRows: boolean;
   /** cases of the forces table, for the base shears expected */
   readonly cases: readonly string[];
-}
-
-const switchChoices = [
-  { value: 'yes', text: 'Yes' },
-  { value: 'no', text: 'No' },
-];
-
-function Field({
-  field,
-  units,
-  draft,
-  disabled,
-  problem,
-  onDraft,
-}: {
-  readonly field: SettingField;
-  readonly units: 'us' | 'si';
-  readonly draft: string;
-  readonly disabled: boolean;
-  readonly problem: string | null;
-  readonly onDraft: (draft: string) => void;
-}) {
-  const id = useId();
-  const unit = fieldUnit(field, units);
-  const aside = [unit, field.note ?? ''].filter((part) => part !== '').join(', ');
-  const choices = field.kind === 'switch' ? switchChoices : field.choices;
-  const label = (
-    <>
-      {field.label}
-      {aside === '' ? null : <small>{aside}</small>}
-    </>
-  );
-  const wide = field.kind === 'list' || field.kind === 'text';
-  return (
-    <div className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3 border-t border-rule py-1 first:border-t-0">
-      {choices === undefined ? (
-        <label htmlFor={id} className="gw-label">
-          {label}
-        </label>
-      ) : (
-        <span className="gw-label">{label}</span>
-      )}
-      {choices === undefined ? (
-        <input
-          id={id}
-          className={`gw-input gw-input-low ${wide ? 'w-[220px]!' : 'w-[112px]! text-right'} ${field.kind === 'list' ? 'mono' : ''}`}
-          value={draft}
-          disabled={disabled}
-          aria-invalid={problem !== null}
-          aria-describedby={problem === null ? undefined : `${id}-problem`}
-          onChange={(event) => onDraft(event.target.value)}
-        />
-      ) : choices.length > 3 ? (
-        <select
-          className="gw-input gw-input-low w-[112px]!"
-          aria-label={field.label}
-          value={draft}
-          disabled={disabled}
-          onChange={(event) => onDraft(event.target.value)}
-        >
-          {choices.map((choice) => (
-            <option key={choice.value} value={choice.value}>
-              {choice.text}
-            </option>
-          ))}
-        </select>
-      ) : (
-        <Segments label={field.label} options={choices} value={draft} disabled={disabled} onChoose={onDraft} />
-      )}
-      {problem === null ? null : (
-        <p id={`${id}-problem`} className="gw-problem col-span-2 mt-1" role="alert">
-          {problem}
-        </p>
-      )}
-    </div>
-  );
+  /** for the springs at their bases */
+  readonly walls: readonly string[];
 }
 
 const problemAt = (problems: readonly ApiProblem[], path: string): string | null =>
@@ -100,7 +26,7 @@ const problemAt = (problems: readonly ApiProblem[], path: string): string | null
   null;
 
 /** building.json as a form: what is built, in groups, with units; a blank field takes its default. */
-export function SettingsPane({ building, canEdit, hasRows, cases }: SettingsPaneProps) {
+export function SettingsPane({ building, canEdit, hasRows, cases, walls }: SettingsPaneProps) {
   const patch = usePatchBuilding(building.id);
   const [drafts, setDrafts] = useState<Readonly<Record<string, string>>>({});
   const [wrong, setWrong] = useState<Readonly<Record<string, string>>>({});
@@ -110,15 +36,21 @@ export function SettingsPane({ building, canEdit, hasRows, cases }: SettingsPane
     kind: 'number',
     quantity: 'force',
   }));
+  const springFields: readonly SettingField[] = walls.map((name) => ({
+    path: `baseSprings.${name}`,
+    label: name,
+    kind: 'number',
+    quantity: 'moment',
+    note: 'per radian',
+  }));
   const groups = [
     ...settingGroups,
     ...(shearFields.length === 0 ? [] : [{ title: 'Base shear of your load sheet', fields: shearFields }]),
+    ...(springFields.length === 0 ? [] : [{ title: 'Rotation springs at bases, blank: fixed', fields: springFields }]),
   ];
   const stored = (field: SettingField) => {
-    const record = field.path.startsWith('expectedBaseShear.')
-      ? building.expectedBaseShear[field.path.slice('expectedBaseShear.'.length)]
-      : valueAt(building, field.path);
-    return draftOf(record);
+    const inRecord = recordPath(field.path);
+    return draftOf(inRecord === null ? valueAt(building, field.path) : building[inRecord.key][inRecord.name]);
   };
   const draftFor = (field: SettingField) => drafts[field.path] ?? stored(field);
   const changed = groups.flatMap((group) => group.fields.filter((field) => draftFor(field) !== stored(field)));
@@ -129,22 +61,21 @@ export function SettingsPane({ building, canEdit, hasRows, cases }: SettingsPane
     event.preventDefault();
     const body: Record<string, unknown> = { version: building.version };
     const faults: Record<string, string> = {};
-    const shears: Record<string, unknown> = { ...building.expectedBaseShear };
-    let shearsChanged = false;
+    const records: Record<string, Record<string, unknown>> = {};
     for (const field of changed) {
       const read = readDraft(field, draftFor(field));
+      const inRecord = recordPath(field.path);
       if (!read.ok) faults[field.path] = `read ${draftFor(field)}, expected ${read.expected}`;
-      else if (field.path.startsWith('expectedBaseShear.')) {
-        shearsChanged = true;
-        const name = field.path.slice('expectedBaseShear.'.length);
-        if (read.value === null) Reflect.deleteProperty(shears, name);
-        else shears[name] = read.value;
-      } else putAt(body, field.path, read.value);
+      else if (inRecord === null) putAt(body, field.path, read.value);
+      else {
+        const record = (records[inRecord.key] ??= { ...building[inRecord.key] });
+        if (read.value === null) Reflect.deleteProperty(record, inRecord.name);
+        else record[inRecord.name] = read.value;
+      }
     }
     setWrong(faults);
     if (Object.keys(faults).length > 0) return;
-    if (shearsChanged) body.expectedBaseShear = shears;
-    patch.mutate(body as BuildingPatch, { onSuccess: () => setDrafts({}) });
+    patch.mutate({ ...body, ...records } as BuildingPatch, { onSuccess: () => setDrafts({}) });
   };
 
   return (
@@ -176,7 +107,7 @@ export function SettingsPane({ building, canEdit, hasRows, cases }: SettingsPane
         ) : (
           <span className="gw-tag text-graphite">read only for your role</span>
         )}
-        <span className="note ml-auto">Code ACI 318-19, ordinary structural walls, shares by rigid diaphragms</span>
+        <span className="note ml-auto">Code ACI 318-19, ordinary structural walls</span>
       </div>
       {patch.error === null || placed ? null : (
         <p className="gw-problem mb-3 font-medium" role="alert">

@@ -133,9 +133,9 @@ export function TablePane({ buildingId, table, context, canEdit, focusRowId, onF
       <div className="mt-2 flex min-h-[32px] flex-wrap items-center gap-2">
         {canEdit ? (
           <>
-            <Button onClick={addRow}>{`Add a ${rowNames[table].one}`}</Button>
+            <Button onClick={addRow}>{`Add ${table === 'overrides' ? 'an' : 'a'} ${rowNames[table].one}`}</Button>
             <Button onClick={deleteRow} disabled={focused === null}>
-              {`Delete ${rowNames[table].one}${mark === null || table === 'forces' || table === 'gravity' ? '' : ` ${mark}`}`}
+              {`Delete ${rowNames[table].one}${mark === null || table === 'forces' || table === 'gravity' || table === 'overrides' ? '' : ` ${mark}`}`}
             </Button>
           </>
         ) : (

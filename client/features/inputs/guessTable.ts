@@ -1,6 +1,7 @@
 import { editableTables, type EditableTable } from '#shared/contracts/tableColumns';
 
 const words: readonly (readonly [RegExp, EditableTable])[] = [
+  [/overrid|transfer/, 'overrides'],
   [/combin|combo/, 'combinations'],
   [/gravit|dead|takedown/, 'gravity'],
   [/force|lateral|wind|seism|diaphragm/, 'forces'],

@@ -14,6 +14,7 @@ export interface ColumnContext {
   readonly rows: readonly InputRow[];
   readonly levels: readonly string[];
   readonly walls: readonly string[];
+  readonly cases: readonly string[];
   /** elevations of the levels, worked out from the heights */
   readonly elevations: ReadonlyMap<string, number>;
 }
@@ -24,12 +25,13 @@ export const valueOf = (row: object, column: string): CellValue => {
 };
 
 /** Columns that refer to names of another table. */
-const references: Readonly<Record<EditableTable, Readonly<Record<string, 'levels' | 'walls'>>>> = {
+const references: Readonly<Record<EditableTable, Readonly<Record<string, 'levels' | 'walls' | 'cases'>>>> = {
   levels: {},
   walls: { from_level: 'levels', to_level: 'levels' },
   forces: { level: 'levels' },
   gravity: { level: 'levels', wall: 'walls' },
   combinations: {},
+  overrides: { level: 'levels', wall: 'walls', case: 'cases' },
 };
 
 const widths: Readonly<Record<string, number>> = {
@@ -56,6 +58,7 @@ const widths: Readonly<Record<string, number>> = {
   eccentricity: 96,
   kind: 88,
   case: 72,
+  reason: 320,
 };
 
 /** `height reads "x", expected a number above 0; write digits ...`: what follows `expected`, less advice that is for files. */

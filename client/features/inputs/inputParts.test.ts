@@ -51,7 +51,14 @@ describe('guessTable', () => {
 
 describe('inputColumns', () => {
   const rows = [{ id: 'g1', version: 1, level: 'L2', wall: 'W1', dead: 10 }] as unknown as InputRow[];
-  const context = { units: 'us' as const, rows, levels: ['Roof', 'L10', 'L2'], walls: ['W1'], elevations: new Map() };
+  const context = {
+    units: 'us' as const,
+    rows,
+    levels: ['Roof', 'L10', 'L2'],
+    walls: ['W1'],
+    cases: ['WX'],
+    elevations: new Map(),
+  };
   const level = inputColumns('gravity', context)[0];
   const row = rows[0];
   if (level === undefined || row === undefined) throw new Error('gravity has no level column');

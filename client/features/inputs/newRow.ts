@@ -63,5 +63,13 @@ export function newRow(table: EditableTable, context: NewRowContext): Cells {
       return { level: text('level', levels[0] ?? 'Roof'), wall: text('wall', walls[0] ?? 'W1'), dead: 0 };
     case 'combinations':
       return { name: null, expression: '1.4D' };
+    case 'overrides':
+      return {
+        kind: 'transfer',
+        level: text('level', levels[levels.length - 1] ?? 'L2'),
+        wall: text('wall', walls[0] ?? 'W1'),
+        shear: 0,
+        reason: 'reason not stated yet',
+      };
   }
 }

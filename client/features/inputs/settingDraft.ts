@@ -29,6 +29,7 @@ export function readDraft(field: SettingField, draft: string): ReadDraft {
     const read = parseNumber(text);
     return read.ok ? read : { ok: false, expected: `a number; ${read.remedy}` };
   }
+  if (field.kind === 'set') return { ok: true, value: text.split(/\s+/) };
   const parts = text.split(/[\s;,]+/).filter((part) => part !== '');
   const values: number[] = [];
   for (const part of parts) {
@@ -53,4 +54,14 @@ export function putAt(target: Record<string, unknown>, path: string, value: unkn
     at[part] = next;
     at = next;
   });
+}
+
+/** Settings that are records by the name of a case or wall; names may hold points, so they are no paths. */
+const recordKeys = ['expectedBaseShear', 'baseSprings'] as const;
+export type RecordKey = (typeof recordKeys)[number];
+
+/** `baseSprings.W1.5` as its record and name; null for a plain path. */
+export function recordPath(path: string): { readonly key: RecordKey; readonly name: string } | null {
+  const key = recordKeys.find((one) => path.startsWith(`${one}.`));
+  return key === undefined ? null : { key, name: path.slice(key.length + 1) };
 }

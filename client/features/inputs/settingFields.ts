@@ -6,7 +6,7 @@ export interface SettingField {
   /** path of the key, parts joined by points */
   readonly path: string;
   readonly label: string;
-  readonly kind: 'text' | 'number' | 'list' | 'choice' | 'switch';
+  readonly kind: 'text' | 'number' | 'list' | 'choice' | 'switch' | 'set';
   readonly quantity?: Quantity;
   readonly choices?: readonly { readonly value: string; readonly text: string }[];
   /** a word on what it does, where the label can't say it */
@@ -86,15 +86,76 @@ export const settingGroups: readonly SettingGroup[] = [
         ],
       },
       number('stiffness.unitWeight', 'Unit weight for Ec', 'density', 'blank: Ec from f′c alone'),
-      number('accidental', 'Accidental eccentricity', 'fraction', 'of the extent'),
     ],
   },
   {
-    title: 'Loads',
+    title: 'Sharing of shears',
     fields: [
+      {
+        path: 'basis',
+        label: 'Bases',
+        kind: 'set',
+        choices: [
+          { value: 'rigid', text: 'Rigid' },
+          { value: 'compatible', text: 'Compatible' },
+          { value: 'flexible', text: 'Flexible' },
+          { value: 'envelope', text: 'Envelope' },
+        ],
+      },
+      number('accidental', 'Accidental eccentricity', 'fraction', 'of the extent'),
+      { path: 'amplify', label: 'Amplify it by Ax', kind: 'switch' },
+      number('orthogonal', 'Orthogonal part', 'fraction', '0 or 0.3'),
+      { path: 'windCases', label: 'Four wind cases', kind: 'switch' },
+    ],
+  },
+  {
+    title: 'What the forces are',
+    fields: [
+      {
+        path: 'forcesAre',
+        label: 'Forces are',
+        kind: 'choice',
+        choices: [
+          { value: 'level-force', text: 'Force at each level' },
+          { value: 'story-shear', text: 'Story shear' },
+        ],
+      },
+      {
+        path: 'forceLevel',
+        label: 'Wind and seismic forces are at',
+        kind: 'choice',
+        choices: [
+          { value: 'strength', text: 'Strength' },
+          { value: 'service', text: 'Service' },
+        ],
+      },
+    ],
+  },
+  {
+    title: 'Gravity',
+    fields: [
+      { path: 'liveReduction', label: 'Live load reduction', kind: 'switch' },
+      number('kll', 'Element factor KLL'),
       number('liveFactor', 'Factor on L with W or E', 'plain', '0.5 or 1'),
+      number('oopEccentricity', 'Out-of-plane eccentricity', 'thickness'),
+    ],
+  },
+  {
+    title: 'Seismic and drift',
+    fields: [
       number('sds', 'SDS', 'plain', 'g'),
       number('rho', 'Redundancy ρ'),
+      number('omega0', 'Overstrength Ω0'),
+      number('cd', 'Deflection amplification Cd'),
+      number('ie', 'Importance factor Ie'),
+      {
+        path: 'riskCategory',
+        label: 'Risk category',
+        kind: 'choice',
+        choices: ['I', 'II', 'III', 'IV'].map((value) => ({ value, text: value })),
+      },
+      number('driftLimit', 'Story drift limit', 'plain', 'blank: by risk category'),
+      number('windDriftFactor', 'Wind drift at', 'plain', 'of strength wind'),
       {
         path: 'sdc',
         label: 'Seismic design category',
@@ -104,7 +165,6 @@ export const settingGroups: readonly SettingGroup[] = [
           ...['A', 'B', 'C', 'D', 'E', 'F'].map((value) => ({ value, text: value })),
         ],
       },
-      number('oopEccentricity', 'Out-of-plane eccentricity', 'thickness'),
     ],
   },
   {

@@ -6,6 +6,7 @@ export const tabNames: Readonly<Record<InputTab, string>> = {
   forces: 'Forces',
   gravity: 'Gravity',
   combinations: 'Combinations',
+  overrides: 'Overrides',
   settings: 'Settings',
 };
 
@@ -16,6 +17,8 @@ export const tabLines: Readonly<Record<InputTab, string>> = {
   forces: 'Forces at each level, by case. A level and case twice add up.',
   gravity: 'Tributary gravity of each wall at each level, not summed. Self-weight is added by the settings.',
   combinations: 'Combinations of your own. Without any, those of the load standard are taken.',
+  overrides:
+    'What you hand to a wall with a reason: transfers from walls above, or its share of a story shear. Each stands in the balance.',
   settings: 'Code, materials, stiffness and how walls are detailed. A blank field takes its default.',
 };
 
@@ -25,4 +28,5 @@ export const rowNames: Readonly<Record<Exclude<InputTab, 'settings'>, { one: str
   forces: { one: 'force', many: 'rows of forces' },
   gravity: { one: 'row', many: 'rows of gravity' },
   combinations: { one: 'combination', many: 'combinations' },
+  overrides: { one: 'override', many: 'overrides' },
 };

@@ -10,6 +10,7 @@ export interface AllRows {
   readonly forces: readonly StoredRow<'forces'>[];
   readonly gravity: readonly StoredRow<'gravity'>[];
   readonly combinations: readonly StoredRow<'combinations'>[];
+  readonly overrides: readonly StoredRow<'overrides'>[];
 }
 
 const plural = (count: number, one: string, many: string): string =>
@@ -45,5 +46,9 @@ export function tableSummary(table: EditableTable, rows: AllRows, view: Elevatio
     }
     case 'combinations':
       return plural(rows.combinations.length, 'combination', 'combinations');
+    case 'overrides': {
+      const shares = rows.overrides.filter((row) => row.kind === 'share').length;
+      return `${plural(rows.overrides.length - shares, 'transfer', 'transfers')}, ${plural(shares, 'share', 'shares')}`;
+    }
   }
 }

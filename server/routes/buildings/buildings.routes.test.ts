@@ -30,7 +30,7 @@ describe('buildings', () => {
     expect(answer.status).toBe(201);
     expect(answer.headers.location).toBe(`/api/buildings/${body.id}`);
     expect(body).toMatchObject({ fc: 35, fy: 420, cover: 20, edge: 75, state: 'in progress', seq: 1, version: 1 });
-    expect(body.basis).toEqual(['rigid']);
+    expect(body.basis).toEqual(['rigid', 'compatible']);
     expect(body).not.toHaveProperty('given');
   });
 
@@ -93,7 +93,7 @@ describe('settings', () => {
     expect((await patch(id, { version: 1, colour: 'red' })).body).toMatchObject({
       error: { problems: [{ column: 'colour' }] },
     });
-    expect((await patch(id, { version: 1, amplify: true })).body).toMatchObject({
+    expect((await patch(id, { version: 1, mergeShare: 0.1 })).body).toMatchObject({
       error: { code: 'not-designed-yet' },
     });
     expect((await read(id)).version).toBe(1);

@@ -1,6 +1,8 @@
 import multer from 'multer';
 import { z } from 'zod';
 
+import { editableTables } from '#shared/contracts/tableColumns';
+
 import type { ApiRouter } from '../../http/ApiRouter.ts';
 import { HttpError } from '../../http/HttpError.ts';
 import { validate } from '../../http/validate.ts';
@@ -43,11 +45,8 @@ export function uploadsRoutes(api: ApiRouter, { uploads }: Services): void {
     '/api/buildings/:id/uploads',
     async ({ request, response, signedIn, building }) => {
       const { table, dryRun, columns } = validate(formSchema, request.body);
-      if (table === 'overrides') {
-        throw new HttpError(422, 'not-designed-yet', 'Overrides are not designed yet; leave overrides.csv out.');
-      }
       if (!isEditableTable(table)) {
-        throw invalid('table', `table reads "${table}", expected levels, walls, forces, gravity or combinations`);
+        throw invalid('table', `table reads "${table}", expected one of ${editableTables.join(', ')}`);
       }
       if (request.file === undefined) throw invalid('file', 'file is missing, expected one CSV file');
       const answer = await uploads.take(signedIn.caller, building, {

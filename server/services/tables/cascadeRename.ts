@@ -20,9 +20,13 @@ const references: Readonly<Record<Rename['kind'], readonly (readonly [EditableTa
     ['walls', ['from_level', 'to_level']],
     ['forces', ['level']],
     ['gravity', ['level']],
+    ['overrides', ['level']],
   ],
-  wall: [['gravity', ['wall']]],
-  case: [],
+  wall: [
+    ['gravity', ['wall']],
+    ['overrides', ['wall']],
+  ],
+  case: [['overrides', ['case']]],
 };
 
 /**
@@ -56,7 +60,7 @@ export interface Cascade {
 export async function cascadeRename(store: Store, buildingId: string, renames: readonly Rename[]): Promise<Cascade> {
   const before: Partial<Record<EditableTable, TableState>> = {};
   const after: Partial<Record<EditableTable, TableState>> = {};
-  for (const table of ['walls', 'forces', 'gravity'] as const) {
+  for (const table of ['walls', 'forces', 'gravity', 'overrides'] as const) {
     const maps = renames.flatMap((rename) =>
       references[rename.kind].filter(([name]) => name === table).map(([, columns]) => ({ rename, columns })),
     );
@@ -82,18 +86,33 @@ export async function cascadeRename(store: Store, buildingId: string, renames: r
     after[table] = sides.after;
   }
   await renameSchedule(store, buildingId, renames);
-  return { before, after, settings: await renameCases(store, buildingId, renames) };
+  return { before, after, settings: await renameInSettings(store, buildingId, renames) };
 }
 
-/** `expectedBaseShear` is by case. */
-async function renameCases(store: Store, buildingId: string, renames: readonly Rename[]): Promise<Cascade['settings']> {
-  const cases = new Map(renames.flatMap(({ kind, from, to }) => (kind === 'case' ? [[from, to] as const] : [])));
-  if (cases.size === 0) return null;
+/** `expectedBaseShear` is by case, `baseSprings` by wall. */
+async function renameInSettings(
+  store: Store,
+  buildingId: string,
+  renames: readonly Rename[],
+): Promise<Cascade['settings']> {
+  const names = (wanted: Rename['kind']): ReadonlyMap<string, string> =>
+    new Map(renames.flatMap(({ kind, from, to }) => (kind === wanted ? [[from, to] as const] : [])));
+  const cases = names('case');
+  const walls = names('wall');
+  if (cases.size + walls.size === 0) return null;
   const { settings, version } = await store.buildings.get(buildingId);
-  const named = Object.entries(settings.expectedBaseShear);
-  if (!named.some(([name]) => cases.has(name))) return null;
-  const expectedBaseShear = Object.fromEntries(named.map(([name, value]) => [cases.get(name) ?? name, value]));
-  const next: Settings = { ...settings, expectedBaseShear };
+  const { expectedBaseShear, baseSprings } = settings;
+  const named =
+    Object.keys(expectedBaseShear).some((name) => cases.has(name)) ||
+    Object.keys(baseSprings).some((name) => walls.has(name));
+  if (!named) return null;
+  const renamed = (record: Readonly<Record<string, number>>, to: ReadonlyMap<string, string>) =>
+    Object.fromEntries(Object.entries(record).map(([name, value]) => [to.get(name) ?? name, value]));
+  const next: Settings = {
+    ...settings,
+    expectedBaseShear: renamed(expectedBaseShear, cases),
+    baseSprings: renamed(baseSprings, walls),
+  };
   if (!(await store.buildings.setSettings(buildingId, version, next))) {
     throw new HttpError(409, 'version', 'The settings have been changed at the same moment.');
   }

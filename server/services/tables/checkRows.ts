@@ -1,6 +1,6 @@
 import { tableColumns, type EditableTable } from '#shared/contracts/tableColumns';
 import type { CellValue } from '#shared/contracts/tables';
-import type { TableName, Tables, UnitSystem } from '#shared/engineering/input';
+import type { Settings, TableName, Tables } from '#shared/engineering/input';
 import { checkTable } from '#shared/engineering/model/check-tables/checkTables';
 
 import type { Gate } from '../../db/gate.ts';
@@ -32,7 +32,7 @@ export function checkRows(
   table: EditableTable,
   rows: readonly Readonly<Record<string, CellValue>>[],
   others: Partial<Tables>,
-  units: UnitSystem,
+  { units, forcesAre }: Settings,
 ): ReturnType<typeof checkTable> {
-  return checkTable(table, rows as unknown as Tables[EditableTable], others, units);
+  return checkTable(table, rows as unknown as Tables[EditableTable], others, units, forcesAre);
 }

@@ -9,6 +9,7 @@ const keyColumns: Readonly<Record<EditableTable, readonly string[]>> = {
   forces: ['level', 'case'],
   gravity: ['level', 'wall'],
   combinations: ['name'],
+  overrides: ['kind', 'level', 'wall', 'case'],
 };
 
 /** What a row is called outside the database: rows of a new upload are matched to stored ones by it, so that ids survive. */

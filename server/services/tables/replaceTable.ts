@@ -79,7 +79,7 @@ export async function replaceTable(
     });
   }
   const { others } = await readSurroundings(context.gate, building.id, table);
-  const checked = checkRows(table, cells, others, building.settings.units);
+  const checked = checkRows(table, cells, others, building.settings);
   if (checked.problems.length > 0) {
     throw new HttpError(422, 'problems', `The rows of ${table} do not fit; nothing of them was taken.`, {
       problems: checked.problems.slice(0, 500).map(({ row, column, message }) => ({ table, row, column, message })),

@@ -36,7 +36,7 @@ export class UploadService {
     const reading = readTable(table, bytes, fileName, units, columns);
     const rows = reading.rows as unknown as readonly Readonly<Record<string, CellValue>>[];
     const { others, stored, version } = await readSurroundings(this.context.gate, building.id, table);
-    const checked = checkRows(table, rows, others, units);
+    const checked = checkRows(table, rows, others, building.settings);
     const across = checked.problems.map(({ row, column, message }): FileProblem => ({
       file: fileName,
       row: row === null ? null : (reading.lines[row - 1] ?? null),

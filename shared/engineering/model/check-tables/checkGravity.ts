@@ -1,24 +1,13 @@
 import type { GravityRow, WallRow } from '../../input.ts';
 
 import { listNames } from './findings.ts';
+import { standsIn } from './standsIn.ts';
 
 import type { WallSpan } from './checkWalls.ts';
 import type { Findings } from './findings.ts';
 import type { LevelIndex } from './levelIndex.ts';
 
 const loads = ['dead', 'live', 'roof_live', 'snow'] as const;
-
-/** From the lowest band to the highest: a gap between bands is a fault of walls.csv. Bands without known levels may be anywhere. */
-function standsIn(bands: readonly (WallSpan | null)[], story: number): boolean {
-  let below = false;
-  let above = false;
-  for (const span of bands) {
-    if (!span) return true;
-    below ||= span.from <= story;
-    above ||= story <= span.to;
-  }
-  return below && above;
-}
 
 /** gravity.csv: levels and walls that exist, the wall standing there; rows of one wall and level add up, with a notice. */
 export function checkGravity(

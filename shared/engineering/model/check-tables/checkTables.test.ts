@@ -279,19 +279,26 @@ describe('checkTables as a whole', () => {
     expect(problems).toMatchObject([{ table: 'building', row: null, column: 'expectedBaseShear.EX' }]);
   });
 
-  it('refuses overrides as not designed yet', () => {
-    const row = {
-      kind: 'share',
-      level: 'L1',
-      wall: 'A',
-      case: null,
-      shear: null,
-      axial: null,
-      moment: null,
-      share: 0.4,
-      reason: 'x',
-    } as const;
-    expect(check({ overrides: [row] }).problems).toMatchObject([{ table: 'overrides', code: 'not-designed-yet' }]);
+  it('wants the walls of baseSprings to exist', () => {
+    const walls = [wall('A', 'L1', 'L5')];
+    const { problems } = check({ levels: five, walls }, { baseSprings: { A: 9e5, B: 9e5 } });
+    expect(problems).toMatchObject([{ table: 'building', row: null, column: 'baseSprings.B' }]);
+  });
+});
+
+describe('checkTables on story shears', () => {
+  const shears = ['L5', 'L4', 'L2', 'L1'].map((name) => force(name));
+  it('names the levels that a case leaves out, at its first row', () => {
+    const { problems } = check({ levels: five, forces: shears }, { forcesAre: 'story-shear' });
+    expect(problems).toMatchObject([{ table: 'forces', row: 1, column: 'level' }]);
+    expect(problems[0]?.message).toContain('no row for L3;');
+  });
+
+  it('is content with every level, and with gaps where level forces are meant', () => {
+    expect(check({ levels: five, forces: [...shears, force('L3')] }, { forcesAre: 'story-shear' }).problems).toEqual(
+      [],
+    );
+    expect(check({ levels: five, forces: shears }).problems).toEqual([]);
   });
 });
 

@@ -1,10 +1,12 @@
-import type { BuildingInput, Problem, TableName, Tables, UnitSystem, Warning } from '../../input.ts';
+import type { BuildingInput, Problem, Settings, TableName, Tables, UnitSystem, Warning } from '../../input.ts';
 
 import { checkBands } from './checkBands.ts';
 import { checkForces } from './checkForces.ts';
 import { checkGravity } from './checkGravity.ts';
 import { checkLevels } from './checkLevels.ts';
+import { checkOverrides } from './checkOverrides.ts';
 import { checkShares } from './checkShares.ts';
+import { checkStoryShears } from './checkStoryShears.ts';
 import { checkWalls } from './checkWalls.ts';
 import { Findings } from './findings.ts';
 import { indexLevels } from './levelIndex.ts';
@@ -28,7 +30,7 @@ const tableOrder: readonly string[] = [
 const byPlace = (a: Problem, b: Problem): number =>
   tableOrder.indexOf(a.table) - tableOrder.indexOf(b.table) || (a.row ?? 0) - (b.row ?? 0);
 
-function checkFilled(tables: Tables, units: UnitSystem): Findings {
+function checkFilled(tables: Tables, units: UnitSystem, forcesAre: Settings['forcesAre']): Findings {
   const findings = new Findings();
   const levels = indexLevels(tables.levels);
   checkLevels(tables.levels, units, findings);
@@ -37,15 +39,8 @@ function checkFilled(tables: Tables, units: UnitSystem): Findings {
   checkShares(tables.walls, spans, levels, findings);
   checkForces(tables.forces, levels, findings);
   checkGravity(tables.gravity, tables.walls, spans, levels, findings);
-  if (tables.overrides.length > 0) {
-    findings.problems.push({
-      table: 'overrides',
-      row: 1,
-      column: null,
-      message: 'overrides are not designed yet; take the rows of overrides.csv out',
-      code: 'not-designed-yet',
-    });
-  }
+  if (forcesAre === 'story-shear') checkStoryShears(tables.forces, levels, findings);
+  checkOverrides(tables.overrides, tables.forces, tables.walls, spans, levels, findings);
   return findings;
 }
 
@@ -56,7 +51,7 @@ function checkFilled(tables: Tables, units: UnitSystem): Findings {
  */
 export function checkTables(input: BuildingInput, options: { readonly complete?: boolean } = {}): CheckResult {
   const { settings, tables } = input;
-  const findings = checkFilled(tables, settings.units);
+  const findings = checkFilled(tables, settings.units, settings.forcesAre);
   if (options.complete) {
     for (const table of ['levels', 'walls', 'forces'] as const) {
       if (tables[table].length > 0) continue;
@@ -68,15 +63,24 @@ export function checkTables(input: BuildingInput, options: { readonly complete?:
       });
     }
   }
+  const refuseSetting = (column: string, message: string): void => {
+    findings.problems.push({ table: 'building', row: null, column, message });
+  };
   const cases = new Set(tables.forces.map((row) => row.case));
   for (const name of Object.keys(settings.expectedBaseShear)) {
     if (tables.forces.length === 0 || cases.has(name)) continue;
-    findings.problems.push({
-      table: 'building',
-      row: null,
-      column: `expectedBaseShear.${name}`,
-      message: `expectedBaseShear names case ${name}, which forces.csv does not have; correct the name or take it out`,
-    });
+    refuseSetting(
+      `expectedBaseShear.${name}`,
+      `expectedBaseShear names case ${name}, which forces.csv does not have; correct the name or take it out`,
+    );
+  }
+  const walls = new Set(tables.walls.map((row) => row.wall));
+  for (const name of Object.keys(settings.baseSprings)) {
+    if (tables.walls.length === 0 || walls.has(name)) continue;
+    refuseSetting(
+      `baseSprings.${name}`,
+      `baseSprings names wall ${name}, which walls.csv does not have; correct the name or take it out`,
+    );
   }
   return { problems: findings.problems.sort(byPlace), notices: findings.notices };
 }
@@ -93,9 +97,10 @@ export function checkTable<T extends TableName>(
   rows: Tables[T],
   others: Partial<Tables>,
   units: UnitSystem,
+  forcesAre: Settings['forcesAre'] = 'level-force',
 ): CheckResult {
   const tables: Tables = { ...emptyTables, ...others, [table]: rows };
-  const findings = checkFilled(tables, units);
+  const findings = checkFilled(tables, units, forcesAre);
   const own = findings.problems.filter((problem) => problem.table === table);
   const orphans: Warning[] = findings.problems
     .filter((problem) => problem.table !== table)
