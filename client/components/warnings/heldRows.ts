@@ -35,11 +35,12 @@ export interface WeighedWarning {
   readonly holds: number;
 }
 
-/** Warnings with those that hold rows first, otherwise in the order of the engine. */
+/** Warnings with those that hold rows first, otherwise in the order of the engine. Drift has a note of its own. */
 export function weighWarnings(
   document: Pick<ResultDocument, 'warnings' | 'levels' | 'schedule'>,
 ): readonly WeighedWarning[] {
-  const weighed = document.warnings.map((warning) => ({
+  const others = document.warnings.filter((warning) => warning.code !== 'drift-not-available');
+  const weighed = others.map((warning) => ({
     warning,
     holds: document.schedule.filter((row) => holdsRow(warning, row, document.levels)).length,
   }));

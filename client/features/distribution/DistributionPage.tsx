@@ -171,9 +171,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
         <DriftNote warnings={document.warnings} />
       </div>
       <div className="mt-4">
-        <WarningList
-          warnings={weighWarnings(document).filter(({ warning }) => warning.code !== 'drift-not-available')}
-        />
+        <WarningList warnings={weighWarnings(document)} />
       </div>
     </PageFrame>
   );

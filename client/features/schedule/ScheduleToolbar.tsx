@@ -1,4 +1,4 @@
-import type { ReactElement } from 'react';
+import type { ReactElement, ReactNode } from 'react';
 
 import type { ScheduleResourceRow } from '#shared/contracts/schedule';
 import type { UnitSystem } from '#shared/engineering/input';
@@ -14,6 +14,8 @@ export interface ScheduleToolbarProps {
   units: UnitSystem;
   canEdit: boolean;
   saving: boolean;
+  /** the way to what there is to weigh */
+  toWeigh: ReactNode;
   onTakeAuto: () => void;
   onEditNotes: () => void;
 }
@@ -25,6 +27,7 @@ export function ScheduleToolbar({
   units,
   canEdit,
   saving,
+  toWeigh,
   onTakeAuto,
   onEditNotes,
 }: ScheduleToolbarProps): ReactElement {
@@ -64,7 +67,8 @@ export function ScheduleToolbar({
         </span>
       ) : null}
       <span role="status">{saving ? 'saving' : ''}</span>
-      <span className="ml-auto flex items-center gap-2">
+      <span className="ml-auto">{toWeigh}</span>
+      <span className="flex items-center gap-2">
         <i className="inline-block h-[16px] w-[3px] bg-ochre" aria-hidden="true" />
         overwritten
       </span>
