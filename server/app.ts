@@ -13,6 +13,7 @@ import type { Runner } from './compute/Runner.ts';
 import { ApiRouter } from './http/ApiRouter.ts';
 import { errorHandler } from './http/errorHandler.ts';
 import { notFound } from './http/HttpError.ts';
+import { refuseDeepBodies } from './http/refuseDeepBodies.ts';
 import { refuseNullCharacters } from './http/refuseNullCharacters.ts';
 import { requestLog } from './http/requestLog.ts';
 import { securityHeaders } from './http/securityHeaders.ts';
@@ -79,6 +80,7 @@ export function createApp(dependencies: AppDependencies): App {
   app.use(
     '/api',
     express.json({ limit: '16mb', strict: false, verify: refuseNullCharacters }),
+    refuseDeepBodies,
     (_request, response, next) => {
       response.setHeader('Cache-Control', 'no-store');
       next();
