@@ -45,8 +45,8 @@ export function WarningList({ warnings }: WarningListProps): ReactElement | null
           <tbody>
             {shown.map(({ warning, holds }, index) => (
               <tr key={`${warning.code} ${warning.level ?? ''} ${warning.wall ?? ''} ${index}`}>
-                <td className="font-medium">{warning.level ?? <Everywhere />}</td>
-                <td className="font-medium">{warning.wall ?? <Everywhere />}</td>
+                <td className="font-medium">{warning.level ?? <NoPlace />}</td>
+                <td className="font-medium">{warning.wall ?? <NoPlace />}</td>
                 <td>{warning.message}</td>
                 <td className={holds > 0 ? 'font-semibold' : 'text-graphite'}>{holds > 0 ? sayRows(holds) : '–'}</td>
               </tr>
@@ -63,4 +63,5 @@ export function WarningList({ warnings }: WarningListProps): ReactElement | null
   );
 }
 
-const Everywhere = (): ReactElement => <span className="font-normal text-graphite">all</span>;
+/** of the building as a whole */
+const NoPlace = (): ReactElement => <span className="font-normal text-graphite">–</span>;

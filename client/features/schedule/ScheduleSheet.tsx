@@ -68,7 +68,7 @@ export function ScheduleSheet({
 }: ScheduleSheetProps): ReactElement {
   const { units } = document;
   const canEdit = useCanEdit();
-  const edits = useScheduleEdits(id);
+  const edits = useScheduleEdits(id, units);
   const undo = useUndo(id);
   const input = useBuildingInput(id);
   const [cell, setCell] = useState<{ rowId: string; columnId: string } | null>(null);
@@ -176,6 +176,7 @@ export function ScheduleSheet({
             )}
             rowHeight={40}
             rowState={(row) => ({ over: !row.ok })}
+            pending={edits.pending}
             onCommit={(committed) => {
               for (const [row, own] of mergeEdits(committed)) edits.send({ rowId: row, own });
             }}
