@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 
 import type { ScheduleResource } from '#shared/contracts/schedule';
+import type { TableResource } from '#shared/contracts/tables';
 
 import { newSmallBuilding, smallBuilding, upload } from '../testing/smallBuilding.ts';
 import { startTestServer, type TestServer } from '../testing/startTestServer.ts';
@@ -88,6 +89,40 @@ describe('odd requests', () => {
         expect([answer.status, (answer.body as { error: { code: string } }).error.code]).toEqual([400, 'unreadable']);
       }
     }
+  });
+
+  it('bodies of a type that is not read', async () => {
+    for (const type of ['text/plain', 'application/xml', 'application/x-www-form-urlencoded']) {
+      const call = server.as('engineer').patch(`/api/buildings/${id}/levels`).set('Content-Type', type);
+      expect((await call.send('{"edits": []}')).status).toBe(400);
+    }
+  });
+
+  it('a form whose part has a header with a null character', async () => {
+    const part =
+      '--b\r\nContent-Disposition: form-data; name="file"; filename="a\u0000b.csv"\r\n\r\nlevel\r\n--b--\r\n';
+    const answer = await server
+      .as('engineer')
+      .post(`/api/buildings/${id}/uploads`)
+      .set('Content-Type', 'multipart/form-data; boundary=b')
+      .send(part);
+    expect(answer.body).toMatchObject({ error: { code: 'unreadable' } });
+    expect(answer.status).toBe(400);
+  });
+
+  it('an edit that changes nothing leaves the edit before it to be undone', async () => {
+    const engineer = server.as('engineer');
+    const own = await newSmallBuilding(engineer);
+    const address = `/api/buildings/${own}/walls`;
+    const first = async () => ((await engineer.get(address)).body as TableResource<'walls'>).rows[0];
+    const wall = await first();
+    const edit = (was: number, to: number) =>
+      engineer.patch(address).send({ edits: [{ id: wall?.id, column: 'thickness', was, to }] });
+    await edit(10, 12).expect(200);
+    await edit(12, 12).expect(200);
+    await engineer.patch(address).send({}).expect(200);
+    await engineer.post(`/api/buildings/${own}/undo`).expect(200);
+    expect((await first())?.thickness).toBe(10);
   });
 
   it('names that every object has are no columns and no cells', async () => {
