@@ -1,9 +1,10 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 
+import type { ResultDocument } from '#shared/contracts/result';
 import type { ScheduleResource } from '#shared/contracts/schedule';
 import type { TableResource } from '#shared/contracts/tables';
 
-import { newSmallBuilding, smallBuilding, upload } from '../testing/smallBuilding.ts';
+import { newBuilding, newSmallBuilding, smallBuilding, upload } from '../testing/smallBuilding.ts';
 import { startTestServer, type TestServer } from '../testing/startTestServer.ts';
 
 let server: TestServer;
@@ -133,6 +134,32 @@ describe('odd requests', () => {
       .send({ inserts: [{ after: null, row }] });
     expect(inserted.status).toBe(422);
     expect(inserted.body).toMatchObject({ error: { problems: [{ column: 'constructor' }] } });
+  });
+
+  it('keeps every name, also those that every object has', async () => {
+    const engineer = server.as('engineer');
+    const own = await newBuilding(engineer);
+    const names: readonly (readonly [string, string])[] = [
+      ['Roof', '__proto__'],
+      ['L2', '=1+1'],
+      ['A,', 'constructor,'],
+      ['B,', '-1,'],
+      ['WX', '__proto__'],
+      ['WY', 'toString'],
+    ];
+    for (const table of ['levels', 'walls', 'forces', 'gravity'] as const) {
+      const text = names.reduce((so, [from, to]) => so.replaceAll(from, to), smallBuilding[table]);
+      await upload(engineer, own, table, text).expect(200);
+    }
+    const answer = await engineer.get(`/api/buildings/${own}/results`).expect(200);
+    const { levels, schedule } = answer.body as ResultDocument;
+    expect(levels.map(({ level }) => level)).toEqual(['__proto__', '=1+1']);
+    for (const { force, shear } of levels) {
+      expect(Object.keys(force).sort()).toEqual(['__proto__', 'toString']);
+      expect(Object.keys(shear).sort()).toEqual(['__proto__', 'toString']);
+    }
+    expect(Object.entries(levels[1]?.shear ?? {}).find(([name]) => name === '__proto__')?.[1].vx).toBeCloseTo(50, 9);
+    expect(new Set(schedule.map(({ wall }) => wall))).toEqual(new Set(['constructor', '-1', 'C', 'D']));
   });
 
   it('walls and spacings that would keep a computation for hours', async () => {
