@@ -146,6 +146,19 @@ describe('the Levels grid', () => {
   });
 });
 
+it('lists the combinations in force while there are none of the building', async () => {
+  fakeServer({
+    ...sampleAnswers(),
+    'GET /api/buildings/b1/combinations': { body: { rows: [], version: 1, seq: 1 } },
+  });
+  renderAt('/buildings/b1/inputs/combinations');
+  const list = await screen.findByRole('region', { name: 'Combinations in force' });
+  expect(within(list).getByRole('rowheader', { name: 'ASCE 7-22 2.3.1 (5)' }).closest('tr')).toHaveTextContent(
+    '0.9D + 1.0W',
+  );
+  expect(within(list).getByRole('link', { name: 'Settings' })).toHaveAttribute('href', '/buildings/b1/inputs/settings');
+});
+
 describe('roles', () => {
   it.each(['checker', 'admin'])('%s reads only', async (role) => {
     fakeServer(sampleAnswers(role));
