@@ -13,7 +13,9 @@ import type { Runner } from './compute/Runner.ts';
 import { ApiRouter } from './http/ApiRouter.ts';
 import { errorHandler } from './http/errorHandler.ts';
 import { notFound } from './http/HttpError.ts';
+import { refuseDeepBodies } from './http/refuseDeepBodies.ts';
 import { refuseNullCharacters } from './http/refuseNullCharacters.ts';
+import { refuseOtherBodies } from './http/refuseOtherBodies.ts';
 import { requestLog } from './http/requestLog.ts';
 import { securityHeaders } from './http/securityHeaders.ts';
 import { servePages } from './http/servePages.ts';
@@ -79,6 +81,8 @@ export function createApp(dependencies: AppDependencies): App {
   app.use(
     '/api',
     express.json({ limit: '16mb', strict: false, verify: refuseNullCharacters }),
+    refuseOtherBodies,
+    refuseDeepBodies,
     (_request, response, next) => {
       response.setHeader('Cache-Control', 'no-store');
       next();

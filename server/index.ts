@@ -50,7 +50,9 @@ async function start(): Promise<void> {
       await seedDemoBuilding(context, app.services.buildings, engineerId, resolve('fixtures/buildings/demo'), logger);
     }
   }
-  const server = app.express.listen(environment.port, environment.host, () => {
+  const server = app.express.listen(environment.port, environment.host, (error?: Error) => {
+    // told of by the event below
+    if (error !== undefined) return;
     const address = server.address();
     const port = typeof address === 'object' && address !== null ? address.port : environment.port;
     logger.info({ port, host: environment.host }, 'listening');

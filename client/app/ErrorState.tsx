@@ -40,7 +40,10 @@ export function ProblemLinks({
   return (
     <ol className="mt-2 flex flex-col">
       {problems.map((problem, index) => (
-        <li key={index} className="grid grid-cols-[132px_1fr] gap-3 border-t border-rule py-2 first:border-t-0">
+        <li
+          key={index}
+          className="grid grid-cols-[minmax(120px,176px)_1fr] gap-3 border-t border-rule py-2 first:border-t-0"
+        >
           <Link
             className="gw-problem gw-linked font-semibold text-oxide"
             to={`${paths.inputs(buildingId, asTab(problem.table))}${problem.rowId === undefined ? '' : `?row=${problem.rowId}`}`}

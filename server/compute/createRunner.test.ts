@@ -35,9 +35,27 @@ const task: RunTask = {
   pinned: [],
 };
 
+const limits = { threads: 1, longestQueue: 8, longestRunSeconds: 60, mostMegabytes: 256 };
+
 describe('pooledRunner', () => {
+  it.each([
+    ['takes too long', 'for (;;);', { longestRunSeconds: 1 }],
+    ['takes too much memory', 'const all = []; for (;;) all.push(Array.from({ length: 1000 }, Math.random));', {}],
+  ])('stops a run that %s, and computes the next', async (_what, deed, own) => {
+    const other = join(folder, `stuck-${Object.keys(own).length}.mjs`);
+    writeFileSync(
+      other,
+      `export default (task) => { if (task.pinned.length > 0) return { ok: false, problems: [] }; ${deed} };`,
+    );
+    const runner = pooledRunner(other, { ...limits, mostMegabytes: 64, ...own });
+    await expect(runner.run(task)).rejects.toMatchObject({ status: 422, code: 'does-not-compute' });
+    const pinned = [{}] as unknown as RunTask['pinned'];
+    expect(await runner.run({ ...task, pinned })).toMatchObject({ ok: false });
+    await runner.close();
+  });
+
   it('computes in a thread, and turns away what would wait behind too many', async () => {
-    const runner = pooledRunner(file, { threads: 1, longestQueue: 2 });
+    const runner = pooledRunner(file, { ...limits, longestQueue: 2 });
     const all = await Promise.allSettled(Array.from({ length: 6 }, () => runner.run(task)));
     const done = all.filter((one) => one.status === 'fulfilled');
     const refused = all.filter((one) => one.status === 'rejected');

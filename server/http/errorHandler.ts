@@ -31,6 +31,7 @@ export function toHttpError(error: unknown): HttpError | null {
     error instanceof Error &&
     (error.name === 'MulterError' ||
       error.message.startsWith('Multipart:') ||
+      error.message === 'Malformed part header' ||
       error.message === 'Unexpected end of form')
   ) {
     return new HttpError(400, 'unreadable', 'The form could not be read. Expected: one file in the field "file".');

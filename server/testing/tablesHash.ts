@@ -1,18 +1,14 @@
 import { createHash } from 'node:crypto';
 
-import { tableColumns } from '#shared/contracts/tableColumns';
-import type { TableName } from '#shared/engineering/input';
+import type { TestDatabase } from '../db/testing/openTestDatabase.ts';
 
-import type { Gate } from '../db/gate.ts';
-
-/** One hash over all rows, versions and counters of a building: moves with everything that is stored of it. */
-export async function tablesHash(gate: Gate, buildingId: string): Promise<string> {
-  const stored = await gate.read(async (store) => {
-    const tables: unknown[] = [await store.buildings.get(buildingId)];
-    for (const table of Object.keys(tableColumns) as TableName[]) {
-      tables.push(await store.tables.rows(buildingId, table), await store.tables.version(buildingId, table));
-    }
-    return tables;
-  });
-  return createHash('sha256').update(JSON.stringify(stored)).digest('hex');
+/** One hash over all rows of all tables of the database, whatever they belong to. */
+export async function tablesHash({ dataSource }: TestDatabase): Promise<string> {
+  const hash = createHash('sha256');
+  for (const { tableName } of dataSource.entityMetadatas) {
+    const rows: unknown[] = await dataSource.query(`SELECT * FROM "${tableName}"`);
+    hash.update(tableName);
+    for (const row of rows.map((one) => JSON.stringify(one)).sort()) hash.update(row);
+  }
+  return hash.digest('hex');
 }

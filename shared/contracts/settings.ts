@@ -2,7 +2,7 @@ import { z } from 'zod';
 
 import { nearestName } from './nearestName.ts';
 import { notDesignedYet } from './notDesignedYet.ts';
-import { barSizes, settingsDefaults } from './settingsDefaults.ts';
+import { barSizes, settingsDefaults, spacingLimits } from './settingsDefaults.ts';
 import { settingsMessage } from './settingsMessage.ts';
 
 import type { Settings, UnitSystem } from '../engineering/input.ts';
@@ -139,6 +139,14 @@ function checkTogether(typed: Partial<TypedSettings>): SettingProblem[] {
       problems.push({
         column: `bars.${use}.sizes`,
         message: `bars.${use}.sizes reads ${wrong.join(', ')}, expected bar numbers of units ${units}: ${barSizes[units].join(' ')}; correct them`,
+      });
+    }
+    const [least, most, unit] = spacingLimits[units];
+    const apart = (list?.spacings ?? []).filter((spacing) => spacing < least || spacing > most);
+    if (apart.length > 0) {
+      problems.push({
+        column: `bars.${use}.spacings`,
+        message: `bars.${use}.spacings reads ${apart.join(', ')}, expected ${least} to ${most} ${unit} in a building with units ${units}; correct them`,
       });
     }
   }

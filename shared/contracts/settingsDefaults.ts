@@ -6,6 +6,12 @@ export const barSizes: Readonly<Record<UnitSystem, readonly number[]>> = {
   si: [10, 13, 16, 19, 22, 25, 29, 32, 36, 43, 57],
 };
 
+/** Spacings that bars can be placed at, in in or mm; outside of them a length was meant, or another unit. */
+export const spacingLimits: Readonly<Record<UnitSystem, readonly [least: number, most: number, unit: string]>> = {
+  us: [1, 120, 'in'],
+  si: [25, 3000, 'mm'],
+};
+
 const barLists: Readonly<Record<UnitSystem, BarLists>> = {
   us: {
     web: { sizes: [4, 5, 6, 7, 8], spacings: [6, 8, 9, 10, 12, 14, 16, 18] },

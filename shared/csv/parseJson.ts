@@ -1,3 +1,5 @@
+import { nestsTooDeep } from '../contracts/nestsTooDeep.ts';
+
 import { decodeText } from './decodeText.ts';
 
 export type JsonReading =
@@ -10,6 +12,11 @@ export function parseJson(bytes: Uint8Array): JsonReading {
   if (!decoded.ok) return decoded;
   try {
     const json: unknown = JSON.parse(decoded.text);
+    if (nestsTooDeep(json)) {
+      const message =
+        'the file nests lists or objects deeper than 32 levels, expected one object; take the inner ones out';
+      return { ok: false, row: null, message };
+    }
     return { ok: true, json };
   } catch (error) {
     const reason = error instanceof Error ? error.message.replace(/\s+/g, ' ') : 'not JSON';

@@ -128,6 +128,13 @@ describe('readFolder', () => {
     expect(reading.notices.map(({ code }) => code)).toEqual(['file-notice', 'forces-added']);
   });
 
+  it('refuses a building.json that nests without end', () => {
+    const text = `{"name":"a","units":"us","basis":${'['.repeat(20_000)}${']'.repeat(20_000)}}`;
+    const reading = readFolder(new Map([['building.json', new TextEncoder().encode(text)]]));
+    const problems = reading.ok ? [] : reading.problems;
+    expect(problems.find(({ file }) => file === 'building.json')?.message).toContain('deeper than 32 levels');
+  });
+
   it('never throws, whatever one of its files holds or loses', () => {
     const name = fc.constantFrom(
       'building.json',

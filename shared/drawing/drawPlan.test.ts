@@ -4,9 +4,9 @@ import { expect, it } from 'vitest';
 import { drawPlan, placePlanWalls } from './drawPlan.ts';
 import type { DrawingElement, TextElement } from './elements.ts';
 import { overlaps } from './labelBoxes.ts';
-import { scaleBarPart } from './planFurniture.ts';
 import { planScale } from './planScale.ts';
 import type { PlanInput, PlanWall } from './planTypes.ts';
+import { scaleBarPart } from './scaleBarPart.ts';
 import { textWidth } from './textWidth.ts';
 
 const wall = (name: string, x1: number, y1: number, x2: number, y2: number, share = 0.2): PlanWall => ({
@@ -85,6 +85,35 @@ it('takes a part of the scale bar that is round and can be seen', () => {
   expect(scaleBarPart(4.36, 'us')).toBe(10);
   expect(scaleBarPart(1.2, 'us')).toBe(50);
   expect(scaleBarPart(15, 'si')).toBe(2);
+});
+
+it('keeps scale bar, legend and axes apart and on the page, for slabs of any shape', () => {
+  const extents = fc.record({ x: fc.integer({ min: 20, max: 400 }), y: fc.integer({ min: 20, max: 200 }) });
+  fc.assert(
+    fc.property(extents, fc.constantFrom(690, 500), ({ x, y }, width) => {
+      const plan = input({
+        walls: [],
+        force: null,
+        width,
+        extent: { x, y, edgeX: 0, edgeY: 0 },
+        mass: { x: x / 2, y: y / 2 },
+      });
+      const drawing = drawPlan({ ...plan, rigidity: null });
+      const from = planScale(plan).slab.bottom + 20;
+      const texts = drawing.elements.filter(
+        (element): element is TextElement => element.shape === 'text' && element.y > from,
+      );
+      const boxes = texts.map((text) => {
+        const long = textWidth(text.text, text.size, text.weight);
+        const left = text.anchor === 'end' ? text.x - long : text.anchor === 'middle' ? text.x - long / 2 : text.x;
+        return { left, right: left + long, top: text.y - 9, bottom: text.y };
+      });
+      boxes.forEach((box, index) => {
+        expect(box.right).toBeLessThanOrEqual(width);
+        expect(boxes.slice(index + 1).some((other) => overlaps(box, other))).toBe(false);
+      });
+    }),
+  );
 });
 
 it('keeps marks apart in a plan with room, for walls anywhere', () => {

@@ -36,6 +36,19 @@ it('draws bars from zero to the largest value over 46 px', () => {
   expect(bars.map((bar) => bar.y)).toEqual([44, 100, 156]);
 });
 
+it('keeps labels and bars in the rail of a tablet, without elevation and values', () => {
+  const { width, elements } = drawStack(input({ rail: true }));
+  expect(width).toBe(80);
+  expect(
+    rects(elements, 'ink')
+      .filter((rect) => rect.x === 42)
+      .map((bar) => bar.width),
+  ).toEqual([8.5, 17, 34]);
+  expect(texts(elements)).toEqual(expect.arrayContaining(['Top', 'Mid', 'Low']));
+  expect(texts(elements)).not.toContain('400');
+  expect(elements.some((element) => element.shape === 'rect' && element.fillOpacity !== undefined)).toBe(false);
+});
+
 it('scales ratios to 1.25, or to the worst above it', () => {
   expect(stackBarScale([story('A', 10, 0.5)], 1)).toBeCloseTo(46 / 1.25, 9);
   expect(stackBarScale([story('A', 10, 2)], 1)).toBeCloseTo(23, 9);

@@ -5,19 +5,21 @@ import { heightScale, type HeightScale, type StoryBox } from './heightScale.ts';
 import { round2 } from './round2.ts';
 import { drawStackWalls } from './stackElevation.ts';
 import { labelDensity, sparseLabels, type LabelDensity } from './stackLabels.ts';
-import { stackWidth, type StackInput, type StackStory } from './stackTypes.ts';
+import { stackColumns, type StackColumns, type StackInput, type StackStory } from './stackTypes.ts';
 import { fitText } from './textWidth.ts';
 
 const labelRight = 30;
 const tagWidth = 38;
 const floorLeft = 40;
 const floorRight = 118;
-const zero = 126;
-const barLength = 46;
 const valueRight = 217;
 
 /** Bars run from 0 to the largest value; ratios from 0 to the larger of 1.25 and the worst. */
-export function stackBarScale(stories: readonly StackStory[], limit: number | undefined): number {
+export function stackBarScale(
+  stories: readonly StackStory[],
+  limit: number | undefined,
+  { barLength }: StackColumns = stackColumns(false),
+): number {
   let most = limit === undefined ? 0 : 1.25;
   for (const story of stories) most = Math.max(most, Math.abs(story.value ?? 0));
   return most > 0 ? barLength / most : 0;
@@ -82,7 +84,13 @@ function drawValue(input: StackInput, story: StackStory, box: StoryBox, density:
   };
 }
 
-function drawBar(story: StackStory, box: StoryBox, perValue: number, density: LabelDensity): DrawingElement[] {
+function drawBar(
+  story: StackStory,
+  box: StoryBox,
+  perValue: number,
+  density: LabelDensity,
+  zero: number,
+): DrawingElement[] {
   const middle = (box.top + box.bottom) / 2;
   const thick = Math.max(2, Math.min(8, (box.bottom - box.top) * 0.7));
   const length = round2(Math.abs(story.value ?? 0) * perValue);
@@ -97,21 +105,25 @@ function drawBar(story: StackStory, box: StoryBox, perValue: number, density: La
   ];
 }
 
-function drawChosen(input: StackInput, scale: HeightScale): { under: DrawingElement[]; over: DrawingElement[] } {
+function drawChosen(
+  input: StackInput,
+  scale: HeightScale,
+  width: number,
+): { under: DrawingElement[]; over: DrawingElement[] } {
   const levels = new Set(input.range ?? (input.chosen === null ? [] : [input.chosen]));
   const boxes = scale.boxes.filter((box) => levels.has(box.level));
   if (boxes.length === 0) return { under: [], over: [] };
   const top = Math.min(...boxes.map((box) => box.top));
   const bottom = Math.max(...boxes.map((box) => box.bottom));
   const height = round2(bottom - top);
-  const under: DrawingElement = { shape: 'rect', x: 0, y: top, width: stackWidth, height, fill: 'choose' };
+  const under: DrawingElement = { shape: 'rect', x: 0, y: top, width, height, fill: 'choose' };
   const over: DrawingElement = input.range
     ? { shape: 'path', d: `M1 ${top + 1.25}H-4.75V${bottom - 1.25}H1`, fill: 'none', stroke: 'ink', strokeWidth: 2.5 }
     : {
         shape: 'rect',
         x: 0.75,
         y: top,
-        width: stackWidth - 1.5,
+        width: width - 1.5,
         height,
         fill: 'none',
         stroke: 'ink',
@@ -120,15 +132,18 @@ function drawChosen(input: StackInput, scale: HeightScale): { under: DrawingElem
   return { under: [under], over: [over] };
 }
 
-/** The elevation that runs down every page, with the quantity of the page as bars; 224 px wide, drawn at its final size. */
+/** The elevation that runs down every page, with the quantity of the page as bars; 224 px wide, as a rail 80, drawn at its final size. */
 export function drawStack(input: StackInput): Drawing {
   const scale = heightScale(input.stories);
   const density = labelDensity(scale.typicalCell);
   const named = density === 'sparse' ? sparseLabels(input, scale) : null;
-  const perValue = stackBarScale(input.stories, input.limit);
-  const chosen = drawChosen(input, scale);
+  const rail = input.rail === true;
+  const columns = stackColumns(rail);
+  const { width, zero } = columns;
+  const perValue = stackBarScale(input.stories, input.limit, columns);
+  const chosen = drawChosen(input, scale, width);
   const elements: DrawingElement[] = [...chosen.under];
-  for (const box of scale.boxes) {
+  for (const box of rail ? [] : scale.boxes) {
     const y = Math.floor(box.top) + 0.5;
     elements.push({
       shape: 'line',
@@ -140,16 +155,15 @@ export function drawStack(input: StackInput): Drawing {
       strokeWidth: density === 'sparse' ? 0.5 : 1,
     });
   }
-  elements.push(
-    ...drawStackWalls(input.walls, scale, input.chosenWall ?? null),
-    ...drawGround(stackWidth, scale.bottom),
-  );
+  if (!rail) elements.push(...drawStackWalls(input.walls, scale, input.chosenWall ?? null));
+  elements.push(...drawGround(width, scale.bottom));
   input.stories.forEach((story, index) => {
     const box = scale.boxes[index];
     if (!box) return;
-    elements.push(...drawBar(story, box, perValue, density));
+    elements.push(...drawBar(story, box, perValue, density, zero));
     if (named && !named.has(story.level) && story.level !== input.hovered) return;
-    elements.push(...drawLabel(input, story, box, density), drawValue(input, story, box, density));
+    elements.push(...drawLabel(input, story, box, density));
+    if (!rail) elements.push(drawValue(input, story, box, density));
   });
   const [top, bottom] = [scale.top, scale.bottom];
   elements.push({ shape: 'line', x1: zero - 0.5, y1: top, x2: zero - 0.5, y2: bottom, stroke: 'line', strokeWidth: 1 });
@@ -167,5 +181,5 @@ export function drawStack(input: StackInput): Drawing {
     });
   }
   elements.push(...chosen.over);
-  return { width: stackWidth, height: round2(bottom + 10), elements };
+  return { width, height: round2(bottom + 10), elements };
 }

@@ -1,8 +1,9 @@
 import { formatPlanLength } from '../format/length.ts';
 import type { DrawingElement } from './elements.ts';
-import { planMargin, type PlanScale } from './planScale.ts';
+import { legendWidths, planMargin, type PlanScale } from './planScale.ts';
 import type { PlanInput } from './planTypes.ts';
 import { round2 } from './round2.ts';
+import { scaleBarPart } from './scaleBarPart.ts';
 
 const line = (x1: number, y1: number, x2: number, y2: number, width = 0.75): DrawingElement => ({
   shape: 'line',
@@ -58,20 +59,16 @@ export function drawSlab(input: PlanInput, scale: PlanScale): DrawingElement[] {
   ];
 }
 
-/** Length of one of the four parts of the scale bar: round, and at least 28 px long. */
-export function scaleBarPart(pixelsPerLength: number, units: 'us' | 'si'): number {
-  const steps = units === 'us' ? [5, 10, 20, 50, 100, 200] : [1, 2, 5, 10, 20, 50];
-  return steps.find((step) => step * pixelsPerLength >= 28) ?? steps[steps.length - 1] ?? 1;
-}
-
 /** Scale bar, legend of the arrows, and the axes of the plan at the lower right. */
 export function drawPlanLegend(input: PlanInput, scale: PlanScale): DrawingElement[] {
-  const { left, right } = scale.slab;
+  const { right } = scale.slab;
   const y = scale.height - (scale.legendBelow ? 48 : 26);
   const legendY = scale.legendBelow ? y + 32 : y;
   const part = scaleBarPart(scale.pixelsPerLength, input.units);
   const step = part * scale.pixelsPerLength;
   const unit = input.units === 'us' ? 'ft' : 'm';
+  // under a narrow slab everything moves left, so that bar and axes stay on the page
+  const left = Math.max(8, Math.min(scale.slab.left, scale.width - 4 * step - 90));
   const elements: DrawingElement[] = [];
   for (let index = 0; index < 4; index += 1) {
     const box = { x: round2(left + index * step), y, width: round2(step), height: 4 };
@@ -96,25 +93,33 @@ export function drawPlanLegend(input: PlanInput, scale: PlanScale): DrawingEleme
     fill: 'graphite',
   });
   const legend: readonly [string, DrawingElement, number][] = [
-    ['direct', { shape: 'rect', x: 0, y: legendY, width: 22, height: 5, fill: 'ink' }, 74],
+    ['direct', { shape: 'rect', x: 0, y: legendY, width: 22, height: 5, fill: 'ink' }, legendWidths.direct],
     [
       'torsion adds',
       { shape: 'rect', x: 0, y: legendY, width: 22, height: 5, fill: 'hatch-ink', stroke: 'ink', strokeWidth: 0.75 },
-      108,
+      legendWidths.adds,
     ],
     [
       'torsion relieves',
       { shape: 'rect', x: 0, y: legendY, width: 22, height: 5, fill: 'sheet', stroke: 'ink', strokeWidth: 0.75 },
-      120,
+      legendWidths.relieves,
     ],
   ];
-  let x = round2(scale.legendBelow ? left : Math.max(left + 4 * step + 44, left + 218));
+  const legendWidth = legend.reduce((sum, [, , advance]) => sum + advance, 0);
+  // clear of the last figure of the scale bar, and where there is room clear of the axes
+  const barEnd = left + 4 * step;
+  let x = round2(
+    scale.legendBelow
+      ? Math.min(left, scale.width - legendWidth - 8)
+      : Math.max(barEnd + 32, Math.min(left + 218, right - 40 - legendWidth)),
+  );
   for (const [words, sample, advance] of legend) {
     elements.push(sample.shape === 'rect' ? { ...sample, x } : sample);
     elements.push({ shape: 'text', x: x + 28, y: legendY + 6, text: words, size: 12, fill: 'graphite' });
     x += advance;
   }
-  return [...elements, ...drawAxes(right - 22, y + 14)];
+  const axesAt = Math.max(right - 22, scale.legendBelow ? barEnd + 52 : x + 20);
+  return [...elements, ...drawAxes(axesAt, y + 14)];
 }
 
 /** The axes of the coordinates typed: the tables know x and y, not where north is. */

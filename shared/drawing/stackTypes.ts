@@ -31,6 +31,20 @@ export interface StackInput {
   readonly chosenWall?: string | null;
   /** ratios only: where the limit's dotted line stands */
   readonly limit?: number;
+  /** a narrow rail of labels and bars, without elevation and values */
+  readonly rail?: boolean;
 }
 
 export const stackWidth = 224;
+export const railWidth = 80;
+
+/** Where the columns of a stack stand, px from its left. */
+export interface StackColumns {
+  readonly width: number;
+  /** the zero line of the bars */
+  readonly zero: number;
+  readonly barLength: number;
+}
+
+export const stackColumns = (rail: boolean): StackColumns =>
+  rail ? { width: railWidth, zero: 42, barLength: 34 } : { width: stackWidth, zero: 126, barLength: 46 };

@@ -5,6 +5,7 @@ import type { UnitSystem } from '../engineering/input.ts';
 import { barNumbers } from './barNumbers.ts';
 import { parseCurtains, printCurtains } from './curtainCallout.ts';
 import { parseEnds, printEnds } from './endsCallout.ts';
+import { parseHorizontal, printHorizontal } from './horizontalCallout.ts';
 import { parseTies, printTies } from './tiesCallout.ts';
 
 const systems: UnitSystem[] = ['us', 'si'];
@@ -22,6 +23,20 @@ describe.each(systems)('round trips in %s', (units) => {
     fc.assert(
       fc.property(curtains, (value) => {
         expect(parseCurtains(printCurtains(value, units), units)).toEqual({ ok: true, value });
+      }),
+    );
+  });
+
+  it('horizontal steel with its ends', () => {
+    const horizontal = fc.record({
+      curtains: fc.constantFrom(1 as const, 2 as const),
+      bar: barOf(units),
+      spacing: spacingOf(units),
+      end: fc.constantFrom('hook' as const, 'u-bar' as const, 'in-core' as const),
+    });
+    fc.assert(
+      fc.property(horizontal, (value) => {
+        expect(parseHorizontal(printHorizontal(value, units), units)).toEqual({ ok: true, value });
       }),
     );
   });
@@ -52,6 +67,9 @@ it('prints the notation of the trade', () => {
   expect(printCurtains({ curtains: 2, bar: 5, spacing: 12 }, 'us')).toBe('#5@12 EF');
   expect(printCurtains({ curtains: 1, bar: 4, spacing: 12 }, 'us')).toBe('#4@12');
   expect(printCurtains({ curtains: 2, bar: 16, spacing: 200 }, 'si')).toBe('16@200 EF');
+  expect(printHorizontal({ curtains: 2, bar: 4, spacing: 10, end: 'hook' }, 'us')).toBe('#4@10 EF');
+  expect(printHorizontal({ curtains: 2, bar: 4, spacing: 10, end: 'u-bar' }, 'us')).toBe('#4@10 EF u-bar');
+  expect(printHorizontal({ curtains: 1, bar: 13, spacing: 250, end: 'in-core' }, 'si')).toBe('13@250 in-core');
   expect(printEnds({ bar: 9, count: 8 }, 'us')).toBe('(8)#9');
   expect(printEnds({ bar: 25, count: 8 }, 'si')).toBe('8-25');
   expect(printEnds(null, 'us')).toBe('none');
@@ -65,6 +83,16 @@ it.each(['#5@12 EF', '#5 @ 12" ef', 'no. 5 @ 12 o.c. E.F.', 'No 5 at 12 in oc ea
     expect(parseCurtains(text, 'us')).toEqual({ ok: true, value: { curtains: 2, bar: 5, spacing: 12 } });
   },
 );
+
+it.each([
+  ['#4 @ 10" EF', 'hook'],
+  ['#4@10 ef hooked', 'hook'],
+  ['#4@10EF, U bars', 'u-bar'],
+  ['no. 4 at 10 o.c. ef ubar', 'u-bar'],
+  ['#4@10 EF in core', 'in-core'],
+])('reads %s with %s ends', (text, end) => {
+  expect(parseHorizontal(text, 'us')).toEqual({ ok: true, value: { curtains: 2, bar: 4, spacing: 10, end } });
+});
 
 it.each(['(8)#9', '8#9', '8-#9', '8 no. 9', '( 8 ) # 9', '8 x #9'])('reads %s as eight No. 9', (text) => {
   expect(parseEnds(text, 'us')).toEqual({ ok: true, value: { bar: 9, count: 8 } });
@@ -84,6 +112,12 @@ describe('says what was expected', () => {
     expect(expected(parseCurtains('', 'si'))).toBe('bar @ spacing in mm, as 16@200 EF');
     expect(expected(parseEnds('89', 'us'))).toBe('(number)size, as (8)#9, or none');
     expect(expected(parseTies('#4@4', 'us'))).toBe('size @ spacing, legs, as #4@4, 7 legs, or none');
+  });
+  it('where horizontal bars end in a way that nobody knows', () => {
+    expect(expected(parseHorizontal('#4@10 EF bent', 'us'))).toBe(
+      'bar @ spacing in inches, as #5@12 EF; hook, u-bar or in-core after it for the ends',
+    );
+    expect(expected(parseHorizontal('#4@90 u-bar', 'us'))).toBe('a spacing of 1 to 60 in');
   });
   it('where a bar is of the other system', () => {
     expect(expected(parseCurtains('#16@12 EF', 'us'))).toContain('#3, #4, #5');

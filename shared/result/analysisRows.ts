@@ -27,30 +27,31 @@ export function levelRows(analysis: Analysis, units: UnitFactors): ResultLevel[]
     const story = model.stories[index];
     const center = analysis.stiffness[index];
     if (!story) throw new RangeError(`no story ${index}`);
-    const force: Record<string, { fx: number; fy: number; mz: number }> = {};
-    const shear: Record<string, { vx: number; vy: number; mz: number }> = {};
+    // maps, since a case may be named __proto__
+    const force = new Map<string, { fx: number; fy: number; mz: number }>();
+    const shear = new Map<string, { vx: number; vy: number; mz: number }>();
     for (const loadCase of model.cases) {
-      force[loadCase.name] = {
+      force.set(loadCase.name, {
         fx: (loadCase.fxKip[index] ?? 0) / units.force,
         fy: (loadCase.fyKip[index] ?? 0) / units.force,
         mz: (loadCase.mzKipIn[index] ?? 0) / units.moment,
-      };
+      });
     }
     for (const action of actions) {
       if (action.variant !== '0') continue;
-      shear[action.case] = {
+      shear.set(action.case, {
         vx: (action.storyFxKip[index] ?? 0) / units.force,
         vy: (action.storyFyKip[index] ?? 0) / units.force,
         mz: (action.storyTorqueKipIn[index] ?? 0) / units.moment,
-      };
+      });
     }
     return {
       level: story.level,
       elevation: story.elevationIn / units.planLength,
       height: story.heightIn / units.planLength,
       rigidity: center ? { x: center.centerXIn / units.planLength, y: center.centerYIn / units.planLength } : null,
-      force,
-      shear,
+      force: Object.fromEntries(force),
+      shear: Object.fromEntries(shear),
       point: { x: story.xIn / units.planLength, y: story.yIn / units.planLength },
       extent: {
         x: story.extentXIn / units.planLength,

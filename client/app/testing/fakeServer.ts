@@ -10,6 +10,8 @@ export interface Asked {
 export interface Answer {
   readonly status?: number;
   readonly body?: unknown;
+  /** the answer comes once this is over */
+  readonly after?: Promise<unknown>;
 }
 
 export type Answers = Readonly<Record<string, Answer | ((asked: Asked) => Answer)>>;
@@ -31,11 +33,12 @@ export function fakeServer(answers: Answers): FakeServer {
     const known = answers[`${method} ${path}`];
     const answer = typeof known === 'function' ? known(one) : (known ?? refusal(404, 'not-found'));
     const status = answer.status ?? 200;
-    return Promise.resolve(
-      new Response(status === 204 ? null : JSON.stringify(answer.body), {
-        status,
-        headers: { 'Content-Type': 'application/json' },
-      }),
+    return Promise.resolve(answer.after).then(
+      () =>
+        new Response(status === 204 ? null : JSON.stringify(answer.body), {
+          status,
+          headers: { 'Content-Type': 'application/json' },
+        }),
     );
   });
   return { asked, of: (route) => asked.filter((one) => `${one.method} ${one.path}` === route) };

@@ -7,6 +7,7 @@ import type { UnitSystem } from '#shared/engineering/input';
 
 import { DrawingSvg } from './DrawingSvg.tsx';
 import { storyForKey } from './stackKeys.ts';
+import { useMedia } from './useMedia.ts';
 
 export interface StackProps {
   /** from the top down */
@@ -34,7 +35,8 @@ export function Stack(props: StackProps): ReactElement {
   const typed = useRef({ text: '', at: 0 });
   const field = useRef<HTMLDivElement>(null);
   const scale = heightScale(stories);
-  const drawing = drawStack({ stories, walls, units, chosen, hovered, chosenWall, range, limit });
+  const rail = useMedia('(min-width: 640px) and (max-width: 1023px)');
+  const drawing = drawStack({ stories, walls, units, chosen, hovered, chosenWall, range, limit, rail });
   const box = scale.boxes.find((candidate) => candidate.level === chosen);
   const middle = box ? (box.top + box.bottom) / 2 : 0;
 
@@ -59,7 +61,7 @@ export function Stack(props: StackProps): ReactElement {
 
   const at = stories.findIndex((story) => story.level === chosen);
   return (
-    <figure aria-label="Stack" className="m-0 w-[224px]">
+    <figure aria-label="Stack" className="m-0" style={{ width: drawing.width }}>
       <figcaption className="cap">
         <span>{caption}</span>
         <span>{limit === undefined ? unit : `limit ${limit.toFixed(2)}`}</span>

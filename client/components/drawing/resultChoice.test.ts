@@ -1,7 +1,7 @@
-import { expect, it } from 'vitest';
+import { describe, expect, it } from 'vitest';
 
 import { sample } from '../../engine/testing/sampleBuilding.ts';
-import { levelsDown, resultChoice, sayVariant } from './resultChoice.ts';
+import { leadingWall, levelsDown, resultChoice, sayVariant } from './resultChoice.ts';
 
 const nothing = { level: null, case: null, variant: '0' } as const;
 
@@ -42,4 +42,26 @@ it('says variants by the eccentricity', () => {
     '+5 %',
     '−7.5 %',
   ]);
+});
+
+describe('leadingWall', () => {
+  const share = (caseName: string, variant: '0' | '+', level: string, wall: string, total: number) =>
+    ({ basis: 'rigid', case: caseName, variant, level, wall, total }) as const;
+  const document = {
+    ...sample.document,
+    distribution: [
+      share('EX', '0', 'L2', 'A', 10),
+      share('EX', '0', 'L2', 'B', -40),
+      share('EX', '0', 'L3', 'A', 30),
+      share('EX', '+', 'L2', 'A', 90),
+      share('EY', '0', 'L2', 'C', 99),
+    ],
+  };
+  const of = (name: string) => leadingWall(document, { basis: 'rigid', case: name, variants: ['0', '+'] });
+
+  it('is the wall with the largest force of the case as built, whatever its sign', () => {
+    expect(of('EX')).toBe('B');
+    expect(of('EY')).toBe('C');
+    expect(of('WX')).toBeNull();
+  });
 });

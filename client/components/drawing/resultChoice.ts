@@ -45,3 +45,19 @@ export function sayVariant(variant: Variant, accidental: number): string {
   const percent = `${Number((accidental * 100).toFixed(2))} %`;
   return variant === '+' ? `+${percent}` : `−${percent}`;
 }
+
+/**
+ * The wall that a page starts from: the one with the largest force of the case in any story, as built where that was computed. It
+ * does not change with the story, so that walking the stack stays with one wall.
+ */
+export function leadingWall(
+  document: ResultDocument,
+  chosen: Pick<ResultChoice, 'basis' | 'case' | 'variants'>,
+): string | null {
+  let leading: { readonly wall: string; readonly total: number } | null = null;
+  for (const one of document.distribution) {
+    if (one.basis !== chosen.basis || one.case !== chosen.case || one.variant !== chosen.variants[0]) continue;
+    if (leading === null || Math.abs(one.total) > Math.abs(leading.total)) leading = one;
+  }
+  return leading === null ? null : leading.wall;
+}

@@ -27,6 +27,7 @@ export function DataGrid<Row extends object>({
   renderGroupFoot,
   rowHeight,
   rowState,
+  pending,
   onCommit,
   onClear,
   onUndo,
@@ -311,6 +312,7 @@ export function DataGrid<Row extends object>({
                   focusColumn={here ? stop.column : -1}
                   rangeFrom={inRange ? range.fromColumn : 0}
                   rangeTo={inRange ? range.toColumn : -1}
+                  pending={pending?.get(line.key)}
                   editor={
                     editing === null || column === undefined ? null : (
                       <CellEditor

@@ -2,6 +2,7 @@ import { memo, type ReactNode } from 'react';
 
 import { isEditable } from './pastedEdits.ts';
 import type { GridColumn } from './gridTypes.ts';
+import type { CellPending, PendingRow } from './pendingCells.ts';
 
 export interface GridRowProps<Row> {
   readonly row: Row;
@@ -17,11 +18,18 @@ export interface GridRowProps<Row> {
   /** columns of the chosen range in this row; null: none, or the focused cell alone */
   readonly rangeFrom: number;
   readonly rangeTo: number;
+  /** cells of this row that wait for the server, by column */
+  readonly pending: PendingRow | undefined;
   /** the text field, in the cell at `focusColumn` */
   readonly editor: ReactNode;
 }
 
-function describe<Row>(column: GridColumn<Row>, row: Row): string | undefined {
+function describe<Row>(column: GridColumn<Row>, row: Row, waits: CellPending | undefined): string | undefined {
+  const words = [describeState(column, row), waits].filter((word) => word !== undefined);
+  return words.length === 0 ? undefined : words.join(', ');
+}
+
+function describeState<Row>(column: GridColumn<Row>, row: Row): string | undefined {
   const own = column.describe?.(row) ?? null;
   if (own !== null) return own;
   const state = column.state?.(row);
@@ -62,6 +70,7 @@ function PlainGridRow<Row>({
   focusColumn,
   rangeFrom,
   rangeTo,
+  pending,
   editor,
 }: GridRowProps<Row>) {
   return (
@@ -75,18 +84,19 @@ function PlainGridRow<Row>({
       {columns.map((column, index) => {
         const focused = index === focusColumn;
         const editing = focused && editor !== null;
-        const second = column.secondLine?.(row) ?? null;
+        const waits = pending?.get(column.id);
+        const second = waits === 'not saved' ? waits : (column.secondLine?.(row) ?? null);
         return (
           <div
             key={column.id}
             role="gridcell"
             aria-colindex={index + 1}
             aria-readonly={readOnly || !isEditable(column, row) ? true : undefined}
-            aria-description={describe(column, row)}
+            aria-description={describe(column, row, waits)}
             tabIndex={focused && !editing ? 0 : -1}
             data-row={rowIndex}
             data-column={index}
-            className={classesOf(column, row, readOnly, index >= rangeFrom && index <= rangeTo)}
+            className={`${classesOf(column, row, readOnly, index >= rangeFrom && index <= rangeTo)} ${waits === undefined ? '' : 'gw-grid-waits'}`}
           >
             {editing ? (
               editor

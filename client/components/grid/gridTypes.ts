@@ -1,5 +1,7 @@
 import type { ReactNode } from 'react';
 
+import type { PendingRows } from './pendingCells.ts';
+
 export type Parsed = { readonly ok: true; readonly value: unknown } | { readonly ok: false; readonly expected: string };
 
 export interface GridColumn<Row> {
@@ -50,6 +52,8 @@ export interface DataGridProps<Row> {
   /** px */
   readonly rowHeight: number;
   readonly rowState?: (row: Row) => { readonly over?: boolean };
+  /** cells that wait for the server, by row and column */
+  readonly pending?: PendingRows;
   readonly onCommit: (edits: readonly GridEdit[]) => void;
   /** Delete on a cell that is not being edited */
   readonly onClear?: (rowId: string, columnId: string) => void;

@@ -18,13 +18,13 @@ export function StateNote({ art, place, title, children, actions, wholePage = fa
   const Title = wholePage ? 'h1' : 'h2';
   return (
     <div className="flex flex-wrap items-center gap-6 py-6" role="status">
-      <div className="flex w-[232px] justify-center">
+      <div className="flex w-[232px] justify-center self-start">
         <StateArt name={art} />
       </div>
       <div className="min-w-[280px] flex-1">
         <div className="note">{place}</div>
         <Title className="mt-[2px] mb-2 text-[22px] leading-[28px] font-semibold tracking-[-0.01em]">{title}</Title>
-        <div className="flex max-w-[46ch] flex-col gap-2">{children}</div>
+        <div className="flex max-w-[80ch] flex-col gap-2 [&>p]:max-w-[46ch]">{children}</div>
         {actions === undefined ? null : <div className="mt-4 flex flex-wrap gap-2">{actions}</div>}
       </div>
     </div>

@@ -61,6 +61,16 @@ describe('DistributionPage', () => {
     expect(new URLSearchParams(router.state.location.search).get('wall')).toBe('P1');
   });
 
+  it('starts from the wall with the largest share, and says what there is to weigh', async () => {
+    fakeServer(computedAnswers());
+    renderAt('/buildings/b1/distribution?case=EX&level=L2');
+    // Q1 is 24 ft long and Q2 20 ft
+    expect(await screen.findByRole('option', { name: /^Q1/ })).toHaveAttribute('aria-selected', 'true');
+    const weigh = screen.getByRole('region', { name: 'What to weigh' });
+    expect(within(weigh).getByText(/Shares are by relative rigidity/)).toBeInTheDocument();
+    expect(within(weigh).queryByText(/Drift, torsion ratio/)).toBeNull();
+  });
+
   it('says what to bring first where there are no levels', async () => {
     const empty = { ...sampleTable('levels'), rows: [] };
     fakeServer({

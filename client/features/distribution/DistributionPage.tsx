@@ -11,12 +11,20 @@ import { PageFrame } from '../../app/PageFrame.tsx';
 import { useBuildingId } from '../../app/useBuildingId.ts';
 import { useChoice } from '../../app/useChoice.ts';
 import { Plan } from '../../components/drawing/Plan.tsx';
-import { levelsDown, resultChoice, sayVariant, type ResultChoice } from '../../components/drawing/resultChoice.ts';
+import {
+  leadingWall,
+  levelsDown,
+  resultChoice,
+  sayVariant,
+  type ResultChoice,
+} from '../../components/drawing/resultChoice.ts';
 import { ResultGate } from '../../components/drawing/ResultGate.tsx';
 import { Stack } from '../../components/drawing/Stack.tsx';
 import { useWallKey } from '../../components/drawing/useWallKey.ts';
 import { Segments } from '../../components/ui/Segments.tsx';
 import { StateNote } from '../../components/ui/StateNote.tsx';
+import { weighWarnings } from '../../components/warnings/heldRows.ts';
+import { WarningList } from '../../components/warnings/WarningList.tsx';
 import { useBuilding, useTable } from '../../data/queries.ts';
 import { useComparison } from '../../engine/useComparison.ts';
 import { BalanceTable } from './BalanceTable.tsx';
@@ -25,7 +33,7 @@ import { RecomputeLine } from './RecomputeLine.tsx';
 import { sayCenters } from './sayCenters.ts';
 import { ShareTable } from './ShareTable.tsx';
 import { storyBalances } from './storyBalances.ts';
-import { storyShares } from './storyShares.ts';
+import { storyShares, type WallShare } from './storyShares.ts';
 
 const planWidth = 690;
 
@@ -71,7 +79,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
   const massName = seismic ? 'center of mass' : 'point of the force';
   const { level } = chosen;
   const shares = storyShares(document, walls.rows, { ...chosen, level: level.level });
-  const wall = choice.wall ?? shares.walls[0]?.wall ?? null;
+  const wall = wallInView(shares.walls, choice.wall, leadingWall(document, chosen));
   const chooseWall = (name: string): void => choose({ wall: name });
   useWallKey(
     shares.walls.map((one) => one.wall),
@@ -162,8 +170,18 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
         ) : null}
         <DriftNote warnings={document.warnings} />
       </div>
+      <div className="mt-4">
+        <WarningList warnings={weighWarnings(document)} />
+      </div>
     </PageFrame>
   );
+}
+
+/** The wall of the address, else the page's leading wall, else the one with the largest share here. */
+function wallInView(walls: readonly WallShare[], wanted: string | null, leading: string | null): string | null {
+  if (wanted !== null) return wanted;
+  if (walls.some((one) => one.wall === leading)) return leading;
+  return [...walls].sort((a, b) => Math.abs(b.total) - Math.abs(a.total))[0]?.wall ?? null;
 }
 
 function sayStory(document: ResultDocument, { level }: ResultChoice): string {

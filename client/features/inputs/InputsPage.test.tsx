@@ -38,6 +38,29 @@ describe('the Levels grid', () => {
     ]);
   });
 
+  it('marks a cell that the server has not answered, and tells of a refusal that a quick second edit followed', async () => {
+    let answer: (value?: unknown) => void = () => undefined;
+    const after = new Promise((done) => (answer = done));
+    let refused = false;
+    fakeServer({
+      ...sampleAnswers(),
+      'PATCH /api/buildings/b1/levels': () => {
+        if (refused) return patched;
+        refused = true;
+        return { ...refusal(409, 'cell-moved'), after };
+      },
+    });
+    renderAt(address);
+    await userEvent.click(await levelCell(1, 1));
+    await userEvent.keyboard('10.25{Enter}');
+    expect(await levelCell(1, 1)).toHaveAccessibleDescription('saving');
+    await userEvent.keyboard('15{Enter}');
+    expect(await levelCell(2, 1)).toHaveAccessibleDescription('saving');
+    answer();
+    expect(await screen.findByText(/A cell was changed while you edited it/)).toBeInTheDocument();
+    expect(await levelCell(1, 1)).not.toHaveAccessibleDescription();
+  });
+
   it('refuses a height of zero and a name that is taken, before the server is asked', async () => {
     const server = fakeServer(sampleAnswers());
     renderAt(address);
@@ -121,6 +144,19 @@ describe('the Levels grid', () => {
       '/buildings/b1/schedule?level=Roof',
     );
   });
+});
+
+it('lists the combinations in force while there are none of the building', async () => {
+  fakeServer({
+    ...sampleAnswers(),
+    'GET /api/buildings/b1/combinations': { body: { rows: [], version: 1, seq: 1 } },
+  });
+  renderAt('/buildings/b1/inputs/combinations');
+  const list = await screen.findByRole('region', { name: 'Combinations in force' });
+  expect(within(list).getByRole('rowheader', { name: 'ASCE 7-22 2.3.1 (5)' }).closest('tr')).toHaveTextContent(
+    '0.9D + 1.0W',
+  );
+  expect(within(list).getByRole('link', { name: 'Settings' })).toHaveAttribute('href', '/buildings/b1/inputs/settings');
 });
 
 describe('roles', () => {

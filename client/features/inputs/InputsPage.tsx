@@ -18,6 +18,8 @@ import { elevationView } from '../../data/elevationView.ts';
 import { usePatchTable } from '../../data/mutations.ts';
 import { useBuilding } from '../../data/queries.ts';
 import { downloadText } from './downloadText.ts';
+import { CombinationsInForce } from './CombinationsInForce.tsx';
+import { lateralCases } from './countedCombinations.ts';
 import { EmptyTable } from './EmptyTable.tsx';
 import { focusRow } from './focusRow.ts';
 import { ForcesReading } from './ForcesReading.tsx';
@@ -146,6 +148,9 @@ export function InputsPage() {
               patchTable.mutate({ inserts: [{ after: null, row: newRow(table, { ...context, beside: null }) }] })
             }
           />
+          {table === 'combinations' && building.data !== undefined ? (
+            <CombinationsInForce building={building.data} cases={lateralCases(allRows.forces)} />
+          ) : null}
           {patchTable.error === null ? null : (
             <p className="gw-problem font-medium" role="alert">
               {patchTable.error.problems[0]?.message ?? sentenceOf(patchTable.error)}

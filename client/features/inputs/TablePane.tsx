@@ -6,6 +6,7 @@ import type { CellValue, TablePatch } from '#shared/contracts/tables';
 import { sentenceOf } from '../../app/errorSentences.ts';
 import { DataGrid } from '../../components/grid/DataGrid.tsx';
 import type { GridEdit } from '../../components/grid/gridTypes.ts';
+import { usePendingCells } from '../../components/grid/usePendingCells.ts';
 import { Button } from '../../components/ui/Button.tsx';
 import type { ApiError } from '../../data/ApiError.ts';
 import { usePatchTable, useUndo } from '../../data/mutations.ts';
@@ -36,6 +37,7 @@ const wordsOf = (error: ApiError): string => error.problems[0]?.message ?? sente
 export function TablePane({ buildingId, table, context, canEdit, focusRowId, onFocusRow, summary }: TablePaneProps) {
   const patchTable = usePatchTable(buildingId, table);
   const undo = useUndo(buildingId);
+  const pending = usePendingCells();
   const [notice, setNotice] = useState<string | null>(null);
   const [focusedId, setFocusedId] = useState<string | null>(null);
   const [addedId, setAddedId] = useState<string | null>(null);
@@ -46,16 +48,21 @@ export function TablePane({ buildingId, table, context, canEdit, focusRowId, onF
 
   const send = (patch: Partial<TablePatch>) => {
     setNotice(null);
-    patchTable.mutate(patch, {
-      onSuccess: (answer) => {
-        // the first new row is the chosen one, ready to be typed over
-        const added = patch.inserts === undefined ? undefined : answer.rows.find((row) => !byId.has(row.id));
-        if (added === undefined) return;
-        setAddedId(added.id);
-        setFocusedId(added.id);
-      },
-      onError: (error) => setNotice(`${wordsOf(error)} What is stored stays as it is.`),
-    });
+    const answered = pending.begin((patch.edits ?? []).map(({ id, column }) => ({ rowId: id, columnId: column })));
+    // a promise of its own for every edit: a quick second one does not silence what the server says of the first
+    void patchTable
+      .mutateAsync(patch)
+      .then(
+        (answer) => {
+          // the first new row is the chosen one, ready to be typed over
+          const added = patch.inserts === undefined ? undefined : answer.rows.find((row) => !byId.has(row.id));
+          if (added === undefined) return;
+          setAddedId(added.id);
+          setFocusedId(added.id);
+        },
+        (error: ApiError) => setNotice(`${wordsOf(error)} What is stored stays as it is.`),
+      )
+      .finally(answered);
   };
   const commit = (edits: readonly GridEdit[]) => {
     send({
@@ -116,6 +123,7 @@ export function TablePane({ buildingId, table, context, canEdit, focusRowId, onF
         rowHeight={rowHeight}
         readOnly={!canEdit}
         focusRowId={addedId ?? focusRowId}
+        pending={pending.rows}
         onCommit={commit}
         onClear={clear}
         onUndo={() => {

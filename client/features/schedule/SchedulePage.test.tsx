@@ -112,12 +112,39 @@ describe('SchedulePage', () => {
     renderAt(address);
     const cell = await cellOf(1, /^#5@10 EF/);
     expect(cell).toHaveAttribute('aria-description', 'overwritten, auto #4@18 EF');
-    expect(await cellOf(1, /^1\.04/)).toHaveTextContent(/over, /);
+    expect(await cellOf(1, /^1\.04/)).toHaveTextContent(/^1\.04over/);
     expect(screen.getByText('1 over a limit')).toBeInTheDocument();
     await userEvent.click(cell);
     await userEvent.keyboard('{Delete}');
     await waitFor(() => expect(server.of(patchRoute)).toHaveLength(1));
     expect(server.of(patchRoute)[0]?.body).toEqual({ version: 1, release: ['vertical'] });
+  });
+
+  it('finds a wall or a bar, from anywhere by its key', async () => {
+    fakeServer(computedAnswers());
+    renderAt(address);
+    await grid();
+    await userEvent.keyboard('/');
+    expect(screen.getByRole('searchbox', { name: 'Wall or bar' })).toHaveFocus();
+    await userEvent.keyboard('q2');
+    expect(within(await grid()).getAllByRole('rowheader')).toHaveLength(1);
+    await userEvent.keyboard('xx');
+    expect(screen.getByText(/No row has a wall or a bar that reads q2xx/)).toBeInTheDocument();
+    await userEvent.keyboard('{Escape}');
+    expect(within(await grid()).getAllByRole('rowheader')).toHaveLength(4);
+  });
+
+  it('shows what is not settled, and why, and the way to what there is to weigh', async () => {
+    const answers = withRow({ state: 'not settled', notDesigned: ['out-of-plane slenderness'] });
+    fakeServer(answers);
+    renderAt(address);
+    const cell = await cellOf(1, /not settled/);
+    expect(cell).toHaveAttribute('aria-description', expect.stringContaining('not settled'));
+    expect(screen.getByText('Not designed: out-of-plane slenderness')).toBeInTheDocument();
+    expect(screen.getByRole('link', { name: '3 points to weigh' })).toHaveAttribute(
+      'href',
+      '/buildings/b1/distribution?level=L2&wall=P1#what-to-weigh',
+    );
   });
 
   it('takes the automatic choice by its button', async () => {

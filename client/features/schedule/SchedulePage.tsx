@@ -11,6 +11,7 @@ import { ResultGate } from '../../components/drawing/ResultGate.tsx';
 import { Segments } from '../../components/ui/Segments.tsx';
 import { useSchedule } from '../../data/queries.ts';
 import { DownloadButton } from './DownloadButton.tsx';
+import { FindField } from './FindField.tsx';
 import { ScheduleSheet } from './ScheduleSheet.tsx';
 import { scheduleFilters, summarize, type ScheduleFilter } from './scheduleFilter.ts';
 import { ScheduleStack } from './ScheduleStack.tsx';
@@ -55,6 +56,7 @@ interface ShownProps {
 
 function Shown({ id, document, walls, schedule }: ShownProps): ReactElement {
   const [filter, setFilter] = useState<ScheduleFilter>('all');
+  const [find, setFind] = useState('');
   const choice = useScheduleChoice(document, schedule.rows);
   const { size, over, rest } = summarize(schedule.rows);
   return (
@@ -75,6 +77,7 @@ function Shown({ id, document, walls, schedule }: ShownProps): ReactElement {
       actions={
         <>
           <Segments label="Rows" options={scheduleFilters} value={filter} onChoose={setFilter} />
+          <FindField text={find} onText={setFind} />
           <DownloadButton id={id} />
         </>
       }
@@ -85,9 +88,18 @@ function Shown({ id, document, walls, schedule }: ShownProps): ReactElement {
         { keys: ['Enter'], does: 'edit' },
         { keys: ['Ctrl', 'Z'], does: 'undo' },
         { keys: ['Del'], does: 'auto selection' },
+        { keys: ['/'], does: 'find' },
       ]}
     >
-      <ScheduleSheet id={id} document={document} walls={walls} schedule={schedule} filter={filter} choice={choice} />
+      <ScheduleSheet
+        id={id}
+        document={document}
+        walls={walls}
+        schedule={schedule}
+        filter={filter}
+        find={find}
+        choice={choice}
+      />
     </PageFrame>
   );
 }

@@ -20,11 +20,13 @@ import { NotesEditor } from './NotesEditor.tsx';
 import { OrphanNotes } from './OrphanNotes.tsx';
 import type { BandElevations } from './parseColumn.ts';
 import { scheduleColumns } from './scheduleColumns.tsx';
+import { findRows } from './findRows.ts';
 import { filterRows, type ScheduleFilter } from './scheduleFilter.ts';
 import { ScheduleReading } from './ScheduleReading.tsx';
 import { ScheduleToolbar } from './ScheduleToolbar.tsx';
 import type { ScheduleChoice } from './useScheduleChoice.ts';
 import { useScheduleEdits } from './useScheduleEdits.ts';
+import { WeighLink } from './WeighLink.tsx';
 import { WallFoot } from './WallFoot.tsx';
 import { WallHead } from './WallHead.tsx';
 
@@ -34,6 +36,8 @@ export interface ScheduleSheetProps {
   walls: TableResource<'walls'>;
   schedule: ScheduleResource;
   filter: ScheduleFilter;
+  /** wall mark or bar text that rows have to show */
+  find: string;
   choice: ScheduleChoice;
 }
 
@@ -53,15 +57,26 @@ export function mergeEdits(edits: readonly GridEdit[]): ReadonlyMap<string, OwnC
 }
 
 /** The grid of the schedule with what an edit reads as, its conflicts and the way back to the automatic choice. */
-export function ScheduleSheet({ id, document, walls, schedule, filter, choice }: ScheduleSheetProps): ReactElement {
+export function ScheduleSheet({
+  id,
+  document,
+  walls,
+  schedule,
+  filter,
+  find,
+  choice,
+}: ScheduleSheetProps): ReactElement {
   const { units } = document;
   const canEdit = useCanEdit();
-  const edits = useScheduleEdits(id);
+  const edits = useScheduleEdits(id, units);
   const undo = useUndo(id);
   const input = useBuildingInput(id);
   const [cell, setCell] = useState<{ rowId: string; columnId: string } | null>(null);
   const [notesOf, setNotesOf] = useState<string | null>(null);
-  const rows = useMemo(() => filterRows(schedule.rows, filter), [schedule.rows, filter]);
+  const rows = useMemo(
+    () => findRows(filterRows(schedule.rows, filter), find, units),
+    [schedule.rows, filter, find, units],
+  );
   const { down, levelsOf } = choice;
   const bandOf = useCallback(
     ({ from, to }: Pick<ScheduleResourceRow, 'from' | 'to'>): BandElevations => {
@@ -89,6 +104,7 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
         units={units}
         canEdit={canEdit}
         saving={edits.saving}
+        toWeigh={<WeighLink buildingId={id} document={document} />}
         onTakeAuto={() => {
           if (cell) release(cell.rowId, cell.columnId);
         }}
@@ -134,7 +150,11 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
       />
       {rows.length === 0 ? (
         <p className="border-t border-ink py-3 text-graphite" role="status">
-          {filter === 'over' ? 'No band is over a limit.' : 'No cell is overwritten.'}
+          {find.trim() !== ''
+            ? `No row has a wall or a bar that reads ${find.trim()}${filter === 'all' ? '' : ' among those shown'}. Esc in the field shows all rows.`
+            : filter === 'over'
+              ? 'No band is over a limit.'
+              : 'No cell is overwritten.'}
         </p>
       ) : (
         <div ref={host} className="relative" style={gridHeight}>
@@ -151,10 +171,12 @@ export function ScheduleSheet({ id, document, walls, schedule, filter, choice }:
                 rows={schedule.rows.filter((row) => row.wall === wall)}
                 quantities={document.quantities.walls.find((one) => one.wall === wall)}
                 units={units}
+                document={document}
               />
             )}
             rowHeight={40}
             rowState={(row) => ({ over: !row.ok })}
+            pending={edits.pending}
             onCommit={(committed) => {
               for (const [row, own] of mergeEdits(committed)) edits.send({ rowId: row, own });
             }}

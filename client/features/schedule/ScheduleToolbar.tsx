@@ -1,4 +1,4 @@
-import type { ReactElement } from 'react';
+import type { ReactElement, ReactNode } from 'react';
 
 import type { ScheduleResourceRow } from '#shared/contracts/schedule';
 import type { UnitSystem } from '#shared/engineering/input';
@@ -14,6 +14,8 @@ export interface ScheduleToolbarProps {
   units: UnitSystem;
   canEdit: boolean;
   saving: boolean;
+  /** the way to what there is to weigh */
+  toWeigh: ReactNode;
   onTakeAuto: () => void;
   onEditNotes: () => void;
 }
@@ -25,13 +27,14 @@ export function ScheduleToolbar({
   units,
   canEdit,
   saving,
+  toWeigh,
   onTakeAuto,
   onEditNotes,
 }: ScheduleToolbarProps): ReactElement {
   const column = columnId !== null && isEditedColumn(columnId) ? columnId : null;
   const releasable = row !== null && column !== null && row.overwritten.includes(editedColumns[column]);
   return (
-    <div className="flex h-[32px] items-center gap-3 text-note text-graphite">
+    <div className="flex min-h-[32px] flex-wrap items-center gap-x-3 gap-y-1 text-note text-graphite">
       {canEdit ? (
         <>
           <Button
@@ -64,7 +67,8 @@ export function ScheduleToolbar({
         </span>
       ) : null}
       <span role="status">{saving ? 'saving' : ''}</span>
-      <span className="ml-auto flex items-center gap-2">
+      <span className="ml-auto">{toWeigh}</span>
+      <span className="flex items-center gap-2">
         <i className="inline-block h-[16px] w-[3px] bg-ochre" aria-hidden="true" />
         overwritten
       </span>

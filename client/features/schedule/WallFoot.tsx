@@ -1,17 +1,18 @@
 import type { ReactElement } from 'react';
 
-import type { ResultQuantities } from '#shared/contracts/result';
+import type { ResultDocument, ResultQuantities } from '#shared/contracts/result';
 import type { ScheduleResourceRow } from '#shared/contracts/schedule';
 import type { UnitSystem } from '#shared/engineering/input';
 import { unitFactors } from '#shared/engineering/units';
 import { formatNumber } from '#shared/format/number';
 
-import { wallNotes } from './wallNotes.ts';
+import { wallNotes, wallReasons } from './wallNotes.ts';
 
 export interface WallFootProps {
   rows: readonly ScheduleResourceRow[];
   quantities: ResultQuantities['walls'][number] | undefined;
   units: UnitSystem;
+  document: Pick<ResultDocument, 'warnings' | 'levels'>;
 }
 
 /** kg/m3, ordinary walls: common practice */
@@ -20,7 +21,8 @@ const { us, si } = unitFactors;
 const poundsPerCubicYard = (si.mass * us.volume) / si.volume;
 
 /** Notes that save a call, and what the wall takes of concrete and steel. */
-export function WallFoot({ rows, quantities, units }: WallFootProps): ReactElement {
+export function WallFoot({ rows, quantities, units, document }: WallFootProps): ReactElement {
+  const reasons = wallReasons(rows, document);
   const [volume, mass] = units === 'us' ? ['yd³', 'lb'] : ['m³', 'kg'];
   const perVolume = units === 'us' ? poundsPerCubicYard : 1;
   const usual = usualRates.map((rate) => formatNumber(rate * perVolume, 0)).join(' to ');
@@ -46,6 +48,19 @@ export function WallFoot({ rows, quantities, units }: WallFootProps): ReactEleme
           ))}
         </ul>
       </div>
+      {reasons.length === 0 ? null : (
+        <div className="flex min-h-[28px] items-start gap-4 pb-[6px] text-data">
+          <b className="flex-none font-semibold">Not settled</b>
+          <ul>
+            {reasons.map((reason) => (
+              <li key={reason.text}>
+                {reason.text}
+                {reason.where === null ? null : <span className="text-graphite">, {reason.where}</span>}
+              </li>
+            ))}
+          </ul>
+        </div>
+      )}
       {quantities ? (
         <div className="flex h-[32px] items-center gap-5 bg-well px-2 text-data">
           <Figure name="Concrete" value={`${formatNumber(quantities.concrete, 1)} ${volume}`} />

@@ -3,6 +3,7 @@ import type { UnitSystem } from '#shared/engineering/input';
 import type { OverwritableCell, ScheduleCells } from '#shared/engineering/wall-design/designTypes';
 import { printCurtains } from '#shared/format/curtainCallout';
 import { printEnds } from '#shared/format/endsCallout';
+import { printHorizontal } from '#shared/format/horizontalCallout';
 import { formatBarLength } from '#shared/format/length';
 import { printTies } from '#shared/format/tiesCallout';
 
@@ -32,7 +33,7 @@ export function columnText(column: EditedColumn, cells: Cells, units: UnitSystem
     case 'vertical':
       return printCurtains(cells.vertical, units);
     case 'horizontal':
-      return printCurtains(cells.horizontal, units);
+      return printHorizontal(cells.horizontal, units);
     case 'endsLength':
       return lap(cells.ends?.length ?? null, units);
     case 'endsBars':
@@ -40,8 +41,9 @@ export function columnText(column: EditedColumn, cells: Cells, units: UnitSystem
     case 'ties':
       return cells.ends === null && cells.ties === null ? '–' : printTies(cells.ties, units);
     case 'lapWeb':
-      return lap(cells.laps.web, units);
+      return cells.laps.splice === 'no lap' ? 'no lap' : lap(cells.laps.web, units);
     case 'lapEnds':
+      if (cells.laps.splice === 'no lap') return cells.ends === null ? '–' : 'no lap';
       return cells.laps.splice === 'coupler' ? 'coupler' : lap(cells.laps.ends, units);
     case 'lapHorizontal':
       return lap(cells.laps.horizontal, units);

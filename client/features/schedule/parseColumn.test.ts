@@ -13,7 +13,7 @@ const laps = { web: 16, ends: 40, horizontal: 20, splice: 'lap' } as const;
 const withEnds: RowCells = { ...row, ends, laps, ties: null };
 
 describe('parseColumn', () => {
-  it('reads distributed steel and keeps how horizontal bars end', () => {
+  it('reads distributed steel, horizontal bars with what they do at the ends', () => {
     expect(parseColumn('vertical', 'no. 5 @ 12" ef', row, 'us', band)).toEqual({
       ok: true,
       value: { vertical: { curtains: 2, bar: 5, spacing: 12 } },
@@ -21,6 +21,12 @@ describe('parseColumn', () => {
     expect(parseColumn('horizontal', '#5@10 EF', row, 'us', band)).toEqual({
       ok: true,
       value: { horizontal: { curtains: 2, bar: 5, spacing: 10, end: 'hook' } },
+    });
+    const closed = { ...row, horizontal: { ...row.horizontal, bar: 5, spacing: 10, end: 'u-bar' as const } };
+    expect(columnText('horizontal', closed, 'us')).toBe('#5@10 EF u-bar');
+    expect(parseColumn('horizontal', '#5@10 EF U-bars', row, 'us', band)).toEqual({
+      ok: true,
+      value: { horizontal: closed.horizontal },
     });
   });
 
@@ -93,10 +99,40 @@ describe('parseColumn', () => {
     });
   });
 
+  it('runs vertical bars through the row without a lap, and laps them again', () => {
+    const through = { ...withEnds, laps: { ...laps, web: null, ends: null, splice: 'no lap' as const } };
+    expect(parseColumn('lapWeb', 'No lap', withEnds, 'us', band)).toEqual({ ok: true, value: { laps: through.laps } });
+    expect(parseColumn('lapEnds', 'no laps', withEnds, 'us', band)).toEqual({
+      ok: true,
+      value: { laps: through.laps },
+    });
+    expect(columnText('lapWeb', through, 'us')).toBe('no lap');
+    expect(columnText('lapEnds', through, 'us')).toBe('no lap');
+    expect(columnText('lapEnds', { ...through, ends: null }, 'us')).toBe('–');
+    const automatic = { ...through.automatic, laps: { ...laps, ends: 41 } };
+    expect(parseColumn('lapWeb', '20', { ...through, automatic }, 'us', band)).toEqual({
+      ok: true,
+      value: { laps: { web: 20, ends: 41, horizontal: 20, splice: 'lap' } },
+    });
+    expect(parseColumn('lapEnds', 'coupler', { ...through, automatic }, 'us', band)).toEqual({
+      ok: true,
+      value: { laps: { web: 16, ends: null, horizontal: 20, splice: 'coupler' } },
+    });
+    expect(parseColumn('lapHorizontal', 'no lap', withEnds, 'us', band).ok).toBe(false);
+  });
+
   it('says what it expected', () => {
+    expect(parseColumn('lapEnds', 'long', withEnds, 'us', band)).toEqual({
+      ok: false,
+      expected: 'a length up to 240 in, none, no lap or coupler',
+    });
+    expect(parseColumn('lapHorizontal', 'long', withEnds, 'si', band)).toEqual({
+      ok: false,
+      expected: 'a length up to 6,000 mm, or none',
+    });
     expect(parseColumn('lapWeb', 'long', withEnds, 'us', band)).toEqual({
       ok: false,
-      expected: 'a length up to 240 in, or none',
+      expected: 'a length up to 240 in, none or no lap',
     });
     expect(parseColumn('lapWeb', '900', withEnds, 'us', band).ok).toBe(false);
     expect(parseColumn('vertical', '#16@12', row, 'us', band).ok).toBe(false);

@@ -3,6 +3,7 @@ import type { UnitSystem } from '#shared/engineering/input';
 import type { OwnCells, TieCell } from '#shared/engineering/wall-design/designTypes';
 import { parseCurtains } from '#shared/format/curtainCallout';
 import { parseEnds } from '#shared/format/endsCallout';
+import { parseHorizontal } from '#shared/format/horizontalCallout';
 import { parseNumber } from '#shared/format/number';
 import { refuse, type Parsed } from '#shared/format/parsed';
 import { parseTies } from '#shared/format/tiesCallout';
@@ -21,16 +22,25 @@ export interface BandElevations {
 const endZoneLength: Readonly<Record<UnitSystem, number>> = { us: 24, si: 600 };
 const tieKind = (legsAcross: number): string => (legsAcross > 2 ? 'hoop and crossties' : 'hoop');
 
-function readLength(text: string, units: UnitSystem, most: number, orNone: boolean): Parsed<number | null> {
+/** A length or `none`; `words` are what else the column reads, for the sentence that says what was expected. */
+function readLength(
+  text: string,
+  units: UnitSystem,
+  most: number,
+  words: readonly string[] = [],
+): Parsed<number | null> {
   const plain = text
     .trim()
     .replace(/\s*("|″|in\.?|mm)$/i, '')
     .toLowerCase();
-  if (orNone && (plain === 'none' || plain === '–' || plain === '-')) return { ok: true, value: null };
+  if (plain === 'none' || plain === '–' || plain === '-') return { ok: true, value: null };
   const length = parseNumber(plain);
-  const unit = units === 'us' ? 'in' : 'mm';
   if (length === null || length <= 0 || length > most) {
-    return refuse(`a length up to ${most.toLocaleString('en-US')} ${unit}${orNone ? ', or none' : ''}`);
+    const limit = `a length up to ${most.toLocaleString('en-US')} ${units === 'us' ? 'in' : 'mm'}`;
+    const others = ['none', ...words];
+    return refuse(
+      others.length === 1 ? `${limit}, or none` : `${limit}, ${others.join(', ')}`.replace(/, ([^,]*)$/, ' or $1'),
+    );
   }
   return { ok: true, value: length };
 }
@@ -52,8 +62,8 @@ export function parseColumn(
       return read.ok ? { ok: true, value: { vertical: read.value } } : read;
     }
     case 'horizontal': {
-      const read = parseCurtains(text, units);
-      return read.ok ? { ok: true, value: { horizontal: { ...read.value, end: row.horizontal.end } } } : read;
+      const read = parseHorizontal(text, units);
+      return read.ok ? { ok: true, value: { horizontal: read.value } } : read;
     }
     case 'endsBars': {
       const read = parseEnds(text, units);
@@ -64,7 +74,7 @@ export function parseColumn(
     }
     case 'endsLength': {
       if (row.ends === null) return refuse('the bars first: an end zone has no length without them');
-      const read = readLength(text, units, units === 'us' ? 480 : 12_000, true);
+      const read = readLength(text, units, units === 'us' ? 480 : 12_000);
       if (!read.ok) return read;
       return { ok: true, value: { ends: read.value === null ? null : { ...row.ends, length: read.value } } };
     }
@@ -78,15 +88,35 @@ export function parseColumn(
     }
     case 'lapWeb':
     case 'lapEnds':
-    case 'lapHorizontal': {
-      if (column === 'lapEnds' && /^couplers?$/i.test(text.trim())) {
-        return { ok: true, value: { laps: { ...row.laps, ends: null, splice: 'coupler' } } };
-      }
-      const read = readLength(text, units, units === 'us' ? 240 : 6_000, true);
-      if (!read.ok) return read;
-      const part = column === 'lapWeb' ? 'web' : column === 'lapEnds' ? 'ends' : 'horizontal';
-      const splice = part === 'ends' ? 'lap' : row.laps.splice;
-      return { ok: true, value: { laps: { ...row.laps, [part]: read.value, splice } } };
-    }
+    case 'lapHorizontal':
+      return parseLap(column, text, row, units);
   }
+}
+
+/**
+ * A lap length, `none`; `coupler` for end bars; `no lap` for the vertical bars of the row, web and ends alike. A length after any of
+ * these laps the bars again, and what it says nothing of takes its automatic lap.
+ */
+function parseLap(
+  column: 'lapWeb' | 'lapEnds' | 'lapHorizontal',
+  text: string,
+  row: RowCells,
+  units: UnitSystem,
+): Parsed<OwnCells> {
+  const { laps, automatic } = row;
+  if (column !== 'lapHorizontal' && /^no\s*laps?$/i.test(text.trim())) {
+    return { ok: true, value: { laps: { ...laps, web: null, ends: null, splice: 'no lap' } } };
+  }
+  if (column === 'lapEnds' && /^couplers?$/i.test(text.trim())) {
+    const web = laps.splice === 'no lap' ? automatic.laps.web : laps.web;
+    return { ok: true, value: { laps: { ...laps, web, ends: null, splice: 'coupler' } } };
+  }
+  const words = { lapWeb: ['no lap'], lapEnds: ['no lap', 'coupler'], lapHorizontal: [] };
+  const read = readLength(text, units, units === 'us' ? 240 : 6_000, words[column]);
+  if (!read.ok) return read;
+  const part = column === 'lapWeb' ? 'web' : column === 'lapEnds' ? 'ends' : 'horizontal';
+  if (part === 'horizontal') return { ok: true, value: { laps: { ...laps, horizontal: read.value } } };
+  const before = laps.splice === 'no lap' ? { ...laps, web: automatic.laps.web, ends: automatic.laps.ends } : laps;
+  const splice = part === 'ends' || laps.splice === 'no lap' ? 'lap' : laps.splice;
+  return { ok: true, value: { laps: { ...before, [part]: read.value, splice } } };
 }

@@ -27,10 +27,22 @@ export const sayGoverns = (row: Pick<ScheduleResourceRow, 'governs'>): string =>
 const readOnlyText = 'an input of the wall; change it in Inputs, Walls';
 const noParse: Column['parse'] = () => ({ ok: false, expected: 'no typing here' });
 
+/** words that stand after or in place of a notation: set small in sans, so that a column of figures holds them */
+const wordPattern = /(?:^|\s)(u-bar|in-core|coupler|no lap)$/;
+
 /** Bar notation is read at arm's length: 15 px, 14 on narrower screens; what is none or does not apply stays quiet. */
 function Notation({ text }: { text: string }): ReactElement {
   const quiet = text === 'none' || text === '–';
-  return <span className={`text-body min-[1400px]:text-bar ${quiet ? 'text-graphite' : ''}`}>{text}</span>;
+  const word = wordPattern.exec(text)?.[1];
+  const notation = word === undefined ? text : text.slice(0, text.length - word.length).trimEnd();
+  return (
+    <span className={`text-body min-[1400px]:text-bar ${quiet ? 'text-graphite' : ''}`}>
+      {notation}
+      {word === undefined ? null : (
+        <span className={`font-sans text-note tracking-normal ${notation === '' ? '' : 'ml-1'}`}>{word}</span>
+      )}
+    </span>
+  );
 }
 
 function fixed(id: string, column: Pick<Column, 'header' | 'text' | 'width'> & Partial<Column>): Column {
@@ -67,7 +79,7 @@ export function scheduleColumns(setting: ColumnSetting): readonly Column[] {
   return [
     fixed('levels', {
       header: 'Levels',
-      width: 104,
+      width: 102,
       text: (row) => printLevelRange(row.from, row.to),
       render: (row) => <span className="text-bar font-semibold text-ink">{printLevelRange(row.from, row.to)}</span>,
       secondLine: (row) => row.levels,
@@ -79,7 +91,7 @@ export function scheduleColumns(setting: ColumnSetting): readonly Column[] {
       group: 'Wall, inputs',
       align: 'right',
       mono: true,
-      width: 40,
+      width: 42,
       text: (row) => formatBarLength(row.thickness, units),
       render: (row) => <Notation text={formatBarLength(row.thickness, units)} />,
       describe: () => readOnlyText,
@@ -90,7 +102,7 @@ export function scheduleColumns(setting: ColumnSetting): readonly Column[] {
       group: 'Wall, inputs',
       align: 'right',
       mono: true,
-      width: 60,
+      width: 64,
       text: (row) => formatNumber(row.fc, 0),
       render: (row) => <Notation text={formatNumber(row.fc, 0)} />,
       describe: () => readOnlyText,
@@ -99,40 +111,39 @@ export function scheduleColumns(setting: ColumnSetting): readonly Column[] {
       header: 'Vertical',
       unit: `size @ ${small}`,
       group: 'Distributed steel',
-      width: 104,
+      width: 100,
     }),
     edited('horizontal', setting, {
       header: 'Horizontal',
       unit: `size @ ${small}`,
       group: 'Distributed steel',
-      width: 94,
+      width: 114,
     }),
     edited('endsLength', setting, {
       header: 'Length',
       unit: small,
       group: 'End zone, each end',
       align: 'right',
-      width: 58,
+      width: 56,
     }),
-    edited('endsBars', setting, { header: 'Bars', unit: '(no.) size', group: 'End zone, each end', width: 90 }),
-    edited('ties', setting, { header: 'Ties', unit: `size @ ${small}, legs`, group: 'End zone, each end', width: 134 }),
-    edited('lapWeb', setting, { header: 'Vert.', unit: small, group: 'Laps', align: 'right', width: 50 }),
+    edited('endsBars', setting, { header: 'Bars', unit: '(no.) size', group: 'End zone, each end', width: 84 }),
+    edited('ties', setting, { header: 'Ties', unit: `size @ ${small}, legs`, group: 'End zone, each end', width: 130 }),
+    edited('lapWeb', setting, { header: 'Vert.', unit: small, group: 'Laps', align: 'right', width: 54 }),
     edited('lapEnds', setting, { header: 'Ends', unit: small, group: 'Laps', align: 'right', width: 56 }),
-    edited('lapHorizontal', setting, { header: 'Hor.', unit: small, group: 'Laps', align: 'right', width: 50 }),
+    edited('lapHorizontal', setting, { header: 'Hor.', unit: small, group: 'Laps', align: 'right', width: 52 }),
     fixed('ratio', {
       header: 'Worst ratio',
       unit: 'check, story',
-      width: 136,
+      width: 138,
       text: (row) => (row.ratio === null ? '–' : formatRatio(row.ratio)),
-      render: (row) => <RatioBar ratio={row.ratio} over={!row.ok} note={sayState(row)} />,
+      render: (row) => (
+        <RatioBar ratio={row.ratio} over={!row.ok} open={row.state === 'not settled'} note={sayGoverns(row)} />
+      ),
       state: (row) => ({ over: !row.ok }),
       describe: (row) => sayVerdict(row),
     }),
   ];
 }
-
-const sayState = (row: ScheduleResourceRow): string =>
-  row.ok && row.state === 'not settled' ? `not settled, ${sayGoverns(row)}` : sayGoverns(row);
 
 /** The verdict in words for the accessible description. */
 export function sayVerdict(row: ScheduleResourceRow): string {

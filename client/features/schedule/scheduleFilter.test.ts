@@ -1,7 +1,7 @@
 import { expect, it } from 'vitest';
 
 import { sample } from '../../engine/testing/sampleBuilding.ts';
-import { applyChange } from './applyChange.ts';
+import { applyChange, changedColumns } from './applyChange.ts';
 import { mergeRows } from './mergeRows.ts';
 import { readNotes } from './readNotes.ts';
 import { filterRows, summarize } from './scheduleFilter.ts';
@@ -61,6 +61,8 @@ it('shows a change before it is answered: cells, marks and what is given back', 
   const vertical = { curtains: 2, bar: 6, spacing: 12 } as const;
   const after = applyChange(first, { rowId: first.id, own: { vertical } });
   expect(after).toMatchObject({ vertical, overwritten: ['vertical'], ratio: first.ratio });
+  expect(changedColumns(first, { rowId: first.id, own: { vertical } }, 'us')).toEqual(['vertical']);
+  expect(changedColumns(after, { rowId: first.id, own: { vertical } }, 'us')).toEqual([]);
   const back = applyChange(after, { rowId: first.id, release: ['vertical'] });
   expect(back).toMatchObject({ vertical: first.automatic.vertical, overwritten: [] });
 });

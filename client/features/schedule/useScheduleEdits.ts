@@ -2,11 +2,14 @@ import { useQueryClient } from '@tanstack/react-query';
 import { useCallback, useRef, useState } from 'react';
 
 import type { ScheduleResource, ScheduleResourceRow } from '#shared/contracts/schedule';
+import type { UnitSystem } from '#shared/engineering/input';
 
+import type { PendingRows } from '../../components/grid/pendingCells.ts';
+import { usePendingCells } from '../../components/grid/usePendingCells.ts';
 import { ApiError } from '../../data/ApiError.ts';
 import { keys } from '../../data/keys.ts';
 import { usePatchSchedule } from '../../data/mutations.ts';
-import { applyChange } from './applyChange.ts';
+import { applyChange, changedColumns } from './applyChange.ts';
 import { mergeRows } from './mergeRows.ts';
 import type { ScheduleChange } from './scheduleChange.ts';
 import { toPatch } from './toPatch.ts';
@@ -20,6 +23,8 @@ export interface ScheduleConflict {
 export interface ScheduleEdits {
   readonly send: (change: ScheduleChange) => void;
   readonly saving: boolean;
+  /** cells that wait for the server */
+  readonly pending: PendingRows;
   readonly conflict: ScheduleConflict | null;
   readonly keepMine: () => void;
   readonly takeTheirs: () => void;
@@ -35,11 +40,12 @@ const isRow = (value: unknown): value is ScheduleResourceRow =>
  * Sends edits one after the other, each with the version that the answer before it left, so that two quick edits of one person
  * never conflict with each other. A conflict with someone else stops there and shows both values.
  */
-export function useScheduleEdits(id: string): ScheduleEdits {
+export function useScheduleEdits(id: string, units: UnitSystem): ScheduleEdits {
   const client = useQueryClient();
   const { mutateAsync } = usePatchSchedule(id);
   const queue = useRef<Promise<void>>(Promise.resolve());
   const [open, setOpen] = useState(0);
+  const { rows: pending, begin } = usePendingCells();
   const [conflict, setConflict] = useState<ScheduleConflict | null>(null);
   const [error, setError] = useState<ApiError | null>(null);
   const [alsoChanged, setAlsoChanged] = useState<readonly ScheduleResourceRow[]>([]);
@@ -71,6 +77,11 @@ export function useScheduleEdits(id: string): ScheduleEdits {
   const enqueue = useCallback(
     (change: ScheduleChange, version: number | null) => {
       setOpen((count) => count + 1);
+      const shown = client
+        .getQueryData<ScheduleResource>(keys.schedule(id))
+        ?.rows.find((row) => row.id === change.rowId);
+      const columns = shown === undefined ? [] : changedColumns(shown, change, units);
+      const answered = begin(columns.map((columnId) => ({ rowId: change.rowId, columnId })));
       setError(null);
       setAlsoChanged([]);
       queue.current = queue.current.then(async () => {
@@ -81,14 +92,16 @@ export function useScheduleEdits(id: string): ScheduleEdits {
         if (before) store([applyChange(before, change)]);
         if (stored !== undefined) await sendNow(change, stored, before);
         setOpen((count) => count - 1);
+        answered();
       });
     },
-    [client, id, sendNow, store],
+    [begin, client, id, units, sendNow, store],
   );
 
   return {
     send: (change) => enqueue(change, null),
     saving: open > 0,
+    pending,
     conflict,
     keepMine: () => {
       if (conflict) enqueue(conflict.change, conflict.stored.version);

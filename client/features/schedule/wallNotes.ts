@@ -1,5 +1,8 @@
+import type { ResultDocument } from '#shared/contracts/result';
 import type { ScheduleResourceRow } from '#shared/contracts/schedule';
 import { printLevelRange } from '#shared/format/levelRange';
+
+import { reasonsOf } from '../../components/warnings/heldRows.ts';
 
 export interface WallNote {
   readonly text: string;
@@ -11,18 +14,38 @@ export interface WallNote {
 
 const withoutStop = (note: string): string => note.replace(/\.$/, '');
 
+type Places = Map<string, ScheduleResourceRow[]>;
+
+function gather(
+  rows: readonly ScheduleResourceRow[],
+  textsOf: (row: ScheduleResourceRow) => readonly string[],
+): Places {
+  const places: Places = new Map();
+  for (const row of rows) {
+    for (const text of new Set(textsOf(row).map(withoutStop))) places.set(text, [...(places.get(text) ?? []), row]);
+  }
+  return places;
+}
+
+const sayWhere = (own: readonly ScheduleResourceRow[], all: readonly ScheduleResourceRow[]): string | null =>
+  own.length === all.length ? null : own.map((row) => printLevelRange(row.from, row.to)).join(', ');
+
 /** Notes of a wall's rows, each once, with the rows that it belongs to. */
 export function wallNotes(rows: readonly ScheduleResourceRow[]): readonly WallNote[] {
-  const places = new Map<string, ScheduleResourceRow[]>();
-  for (const row of rows) {
-    const open = row.notDesigned.map((part) => `not designed: ${part}`);
-    for (const note of new Set([...row.notes, ...open].map(withoutStop))) {
-      places.set(note, [...(places.get(note) ?? []), row]);
-    }
-  }
-  return [...places].map(([text, own]) => ({
+  return [...gather(rows, (row) => row.notes)].map(([text, own]) => ({
     text,
     own: own.some((row) => row.overwritten.includes('notes') && !row.automatic.notes.map(withoutStop).includes(text)),
-    where: own.length === rows.length ? null : own.map((row) => printLevelRange(row.from, row.to)).join(', '),
+    where: sayWhere(own, rows),
+  }));
+}
+
+/** Why rows of a wall are not settled, each reason once, with the rows that it belongs to. */
+export function wallReasons(
+  rows: readonly ScheduleResourceRow[],
+  document: Pick<ResultDocument, 'warnings' | 'levels'>,
+): readonly Omit<WallNote, 'own'>[] {
+  return [...gather(rows, (row) => reasonsOf(row, document))].map(([text, own]) => ({
+    text,
+    where: sayWhere(own, rows),
   }));
 }

@@ -4,6 +4,7 @@ import { describe, expect, it } from 'vitest';
 
 import { fakeServer } from '../../app/testing/fakeServer.ts';
 import { renderAt } from '../../app/testing/renderAt.tsx';
+import { sample } from '../../engine/testing/sampleBuilding.ts';
 import { computedAnswers } from '../../engine/testing/sampleServer.ts';
 
 const address = '/buildings/b1/takedown?case=EY&wall=P1&level=L2';
@@ -26,6 +27,22 @@ describe('TakedownPage', () => {
     await userEvent.selectOptions(await screen.findByLabelText('Wall'), 'Q1');
     expect(await screen.findByRole('heading', { name: 'Takedown, wall Q1' })).toBeInTheDocument();
     expect(router.state.location.search).toContain('wall=Q1');
+  });
+
+  it('starts from the wall with the largest share, and lists walls that stop', async () => {
+    const warnings = [
+      { code: 'rigid-only', message: 'Shares are by relative rigidity.' },
+      { code: 'wall-stops-below-roof', level: 'L3', wall: 'Q2', message: 'Q2 stops at L3.' },
+    ];
+    fakeServer({
+      ...computedAnswers(),
+      'GET /api/buildings/b1/results': { body: { ...sample.document, warnings } },
+    });
+    renderAt('/buildings/b1/takedown?case=EX');
+    expect(await screen.findByRole('heading', { name: 'Takedown, wall Q1' })).toBeInTheDocument();
+    const weigh = screen.getByRole('region', { name: 'What to weigh' });
+    expect(within(weigh).getByText('Q2 stops at L3.').closest('tr')).toHaveTextContent('L3Q2');
+    expect(within(weigh).queryByText(/relative rigidity/)).toBeNull();
   });
 
   it('chooses a story from the table', async () => {

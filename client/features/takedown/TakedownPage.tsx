@@ -12,12 +12,20 @@ import { PageFrame } from '../../app/PageFrame.tsx';
 import { useBuildingId } from '../../app/useBuildingId.ts';
 import { useChoice } from '../../app/useChoice.ts';
 import { DownTheHeight } from '../../components/drawing/DownTheHeight.tsx';
-import { levelsDown, resultChoice, sayVariant, type ResultChoice } from '../../components/drawing/resultChoice.ts';
+import {
+  leadingWall,
+  levelsDown,
+  resultChoice,
+  sayVariant,
+  type ResultChoice,
+} from '../../components/drawing/resultChoice.ts';
 import { ResultGate } from '../../components/drawing/ResultGate.tsx';
 import { Stack } from '../../components/drawing/Stack.tsx';
 import { useWallKey } from '../../components/drawing/useWallKey.ts';
 import { Segments } from '../../components/ui/Segments.tsx';
 import { StateNote } from '../../components/ui/StateNote.tsx';
+import { weighWarnings } from '../../components/warnings/heldRows.ts';
+import { WarningList } from '../../components/warnings/WarningList.tsx';
 import { useBuilding } from '../../data/queries.ts';
 import { heightDiagrams } from './heightDiagrams.ts';
 import { ReactionTable } from './ReactionTable.tsx';
@@ -28,6 +36,9 @@ import { shareSteps } from './shareSteps.ts';
 import { StoryTable } from './StoryTable.tsx';
 import { variantOf, wallStories } from './wallStories.ts';
 
+/** walls that start above the base or stop below the roof: there a takedown has to be looked at by hand */
+const warningsOfTakedown = ['transfer-not-assigned', 'wall-stops-below-roof'];
+
 /** What comes down each wall, story by story, to its foot. */
 export function TakedownPage(): ReactElement {
   const id = useBuildingId();
@@ -37,8 +48,9 @@ export function TakedownPage(): ReactElement {
       {(document, walls) => {
         const chosen = resultChoice(document, choice);
         const names = [...new Set(walls.rows.map((row) => row.wall))];
-        const wall = names.find((name) => name === choice.wall) ?? names[0];
-        if (chosen === null || wall === undefined) return <NoForces />;
+        if (chosen === null) return <NoForces />;
+        const wall = names.find((name) => name === choice.wall) ?? leadingWall(document, chosen) ?? names[0];
+        if (wall === undefined) return <NoForces />;
         return <Shown id={id} document={document} walls={walls} chosen={chosen} wall={wall} names={names} />;
       }}
     </ResultGate>
@@ -166,6 +178,11 @@ function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactE
           units={units}
           chosenLevel={chosen.level.level}
           onChooseLevel={(level) => choose({ level })}
+        />
+      </div>
+      <div className="mt-4">
+        <WarningList
+          warnings={weighWarnings(document).filter(({ warning }) => warningsOfTakedown.includes(warning.code))}
         />
       </div>
     </PageFrame>

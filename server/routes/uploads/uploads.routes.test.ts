@@ -61,7 +61,7 @@ describe('uploads', () => {
   it.each(tables)('refuses $folder ($about) at its row and column, and stores nothing of it', async (one) => {
     const id = valid[one.base] ?? '';
     const bytes = readFileSync(join(fixtures, 'broken', one.folder, one.file));
-    const before = await tablesHash(server.gate, id);
+    const before = await tablesHash(server.database);
     for (const dryRun of ['true', 'false']) {
       const answer = await engineer
         .post(`/api/buildings/${id}/uploads`)
@@ -76,12 +76,12 @@ describe('uploads', () => {
       expect(error.problems.map(({ row, column }) => ({ row, column }))).toEqual(one.expected);
       expect(new Set(error.problems.map((problem) => problem.file))).toEqual(new Set([one.file]));
     }
-    expect(await tablesHash(server.gate, id)).toBe(before);
+    expect(await tablesHash(server.database)).toBe(before);
   });
 
   it('stores nothing in a dry run and tells what would change', async () => {
     const id = await newSmallBuilding(engineer);
-    const before = await tablesHash(server.gate, id);
+    const before = await tablesHash(server.database);
     const text =
       'Level,Case,Kind,FX (kN),fy,remark\nRoof,WX,wind,4.4482216152605,0,x\nL2,WX,wind,26,0,\nL2,WZ,other,1,2,\n';
     const answer = await upload(engineer, id, 'forces', text, { dryRun: 'true' });
@@ -91,7 +91,7 @@ describe('uploads', () => {
     expect(body.rows[0]).toMatchObject({ level: 'Roof', case: 'WX', fx: 1 });
     expect(body.columns).toContainEqual({ header: 'remark', column: null });
     expect(body.notices.some((notice) => notice.includes('remark'))).toBe(true);
-    expect(await tablesHash(server.gate, id)).toBe(before);
+    expect(await tablesHash(server.database)).toBe(before);
     const taken = (await upload(engineer, id, 'forces', text)).body as UploadAnswer;
     expect(taken.changes).toEqual(body.changes);
     expect(taken.version).toBe(body.version + 1);

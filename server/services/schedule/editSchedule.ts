@@ -10,7 +10,7 @@ import type { Context } from '../Context.ts';
 import { keyBuilding } from '../results/LoadedBuilding.ts';
 import type { Published, ResultService } from '../results/ResultService.ts';
 
-import { checkBarSizes } from './checkBarSizes.ts';
+import { checkBars } from './checkBars.ts';
 import { refuseInputCells } from './refuseInputCells.ts';
 import { scheduleState } from './scheduleState.ts';
 
@@ -55,7 +55,7 @@ export async function editSchedule(
   if (record === undefined) throw notFound();
   refuseInputCells(body);
   const patch = validate(schedulePatchSchema, body);
-  checkBarSizes(patch, before.loaded.input.settings.units);
+  checkBars(patch, before.loaded.input.settings.units);
   const shown = (published: Published): unknown => published.rows.find((row) => row.id === rowId) ?? null;
   if (record.version !== patch.version) throw moved(shown(before));
 

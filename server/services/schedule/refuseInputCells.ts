@@ -12,7 +12,7 @@ const inputCells: Readonly<Record<string, string>> = {
 
 export function refuseInputCells(body: unknown): void {
   if (typeof body !== 'object' || body === null) return;
-  const found = Object.keys(body).filter((name) => name in inputCells);
+  const found = Object.keys(body).filter((name) => Object.hasOwn(inputCells, name));
   if (found.length === 0) return;
   throw new HttpError(
     422,

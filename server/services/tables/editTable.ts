@@ -126,6 +126,17 @@ export async function editTable(
         before[row.id] = null;
         after[row.id] = wholeState(row);
       }
+      const nothingChanges = update.length === 0 && insert.length === 0 && remove.length === 0;
+      if (nothingChanges) {
+        // no change to record: an undo would have nothing to turn back
+        return {
+          rows: [],
+          deleted: [],
+          version: await store.tables.version(buildingId, table),
+          seq,
+          alsoChanged: [],
+        };
+      }
       for (const { id, position } of moved) await store.tables.setPosition(table, id, position);
       if (!(await writeRows(store, buildingId, table, { insert, update, remove }))) {
         throw new HttpError(409, 'version', 'A row has been changed at the same moment.');

@@ -72,7 +72,7 @@ export function readRow(
     else problems.push({ table, row, column: column.name, message: reading.message });
   }
   for (const name of Object.keys(given)) {
-    if (!(name in cells) && !notCells.has(name) && !problems.some((problem) => problem.column === name)) {
+    if (!Object.hasOwn(cells, name) && !notCells.has(name) && !problems.some((problem) => problem.column === name)) {
       problems.push({ table, row, column: name, message: `${name} is no column of ${table}` });
     }
   }

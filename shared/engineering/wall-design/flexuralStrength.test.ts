@@ -148,6 +148,15 @@ describe('designStrength', () => {
       const expected = naiveStrength(lean, axialKip, 1);
       expect(Math.abs((designStrength(leanCurve, axialKip)?.phiMnKipIn ?? 0) - expected)).toBeLessThan(1e-7 * expected);
     }
+    // 1,315 kip is carried near c 35.3 in with phi Mn 51,000 and near c 45.2 in, phi fallen, with 46,000 kip-in
+    const first = naive(lean, 35.32, 1);
+    const second = naive(lean, 45.2, 1);
+    expect(Math.abs(first.phi * first.pn - 1315)).toBeLessThan(1);
+    expect(Math.abs(second.phi * second.pn - 1315)).toBeLessThan(1);
+    expect(second.phi * second.mn).toBeLessThan(0.91 * first.phi * first.mn);
+    const least = designStrength(leanCurve, 1315)?.phiMnKipIn ?? 0;
+    expect(Math.abs(least - second.phi * second.mn)).toBeLessThan(0.01 * least);
+    expect(Math.abs(least - naiveStrength(lean, 1315, 1))).toBeLessThan(1e-7 * least);
   });
 
   it('leaves bars without compression out of the block: by hand, 2 in2 at 5 in and at 95 in, Pu 0', () => {

@@ -17,6 +17,9 @@ const strengthLimits: Readonly<Record<UnitSystem, readonly [number, number, stri
   si: [3, 210, 'MPa'],
 };
 
+/** A longer wall line was typed in another unit, and its bars alone would keep the solver for minutes: [most, unit]. */
+const longestWall: Readonly<Record<UnitSystem, readonly [number, string]>> = { us: [2000, 'ft'], si: [600, 'm'] };
+
 /** Each row of walls.csv by itself and against the levels; bands are looked at in checkBands. */
 export function checkWalls(
   walls: readonly WallRow[],
@@ -26,10 +29,20 @@ export function checkWalls(
 ): (WallSpan | null)[] {
   const tolerance = geometryTolerance[units];
   const [least, most, unit] = strengthLimits[units];
+  const [longest, lengthUnit] = longestWall[units];
   return walls.map((row, index) => {
     const dx = row.x2 - row.x1;
     const dy = row.y2 - row.y1;
-    if (Math.sqrt(dx * dx + dy * dy) <= tolerance) {
+    const length = Math.sqrt(dx * dx + dy * dy);
+    if (length > longest) {
+      findings.refuse(
+        'walls',
+        index,
+        'x2',
+        `wall ${row.wall} is ${Number(length.toPrecision(6))} ${lengthUnit} long, expected at most ${longest} ${lengthUnit}; convert its points or name their unit in the header`,
+      );
+    }
+    if (length <= tolerance) {
       findings.refuse(
         'walls',
         index,
