@@ -10,6 +10,10 @@ export interface LateralState {
 const signs = [1, -1] as const;
 const signText = (sign: number): string => (sign > 0 ? '+' : '−');
 
+/** What decides the states: the actions' cases, directions and variants, not their forces. */
+export type StateAction = Pick<LateralAction, 'caseIndex' | 'case' | 'kind' | 'direction' | 'variant'>;
+export type StateSettings = Pick<ModelSettings, 'windCases' | 'orthogonal' | 'strengthFactor'>;
+
 /** Indices of a case's actions by variant. */
 type ByVariant = Readonly<Partial<Record<LateralAction['variant'], number>>>;
 
@@ -19,7 +23,7 @@ interface CaseActions {
   readonly by: ByVariant;
 }
 
-function casesOf(actions: readonly LateralAction[], kind: LateralAction['kind']): CaseActions[] {
+function casesOf(actions: readonly StateAction[], kind: LateralAction['kind']): CaseActions[] {
   const cases = new Map<number, { name: string; direction: 'x' | 'y'; by: Partial<Record<string, number>> }>();
   actions.forEach((action, index) => {
     if (action.kind !== kind) return;
@@ -35,8 +39,8 @@ function casesOf(actions: readonly LateralAction[], kind: LateralAction['kind'])
  * own extent, 0.75 of every x case with every y case, 0.563 of both with torsion; all signs. `eccentric` false (flexible): no torsion.
  */
 export function windStates(
-  actions: readonly LateralAction[],
-  settings: ModelSettings,
+  actions: readonly StateAction[],
+  settings: StateSettings,
   eccentric: boolean,
 ): LateralState[] {
   const cases = casesOf(actions, 'wind');
@@ -101,8 +105,8 @@ export function windStates(
  * (ASCE/SEI 7 12.5, 12.8.4.2). A case that finds none across it acts alone. `eccentric` false (flexible): variant 0 only.
  */
 export function seismicStates(
-  actions: readonly LateralAction[],
-  settings: ModelSettings,
+  actions: readonly StateAction[],
+  settings: StateSettings,
   eccentric: boolean,
 ): LateralState[] {
   const cases = casesOf(actions, 'seismic');
@@ -149,7 +153,7 @@ export function seismicStates(
 }
 
 /** Each `other` case in turn is H, with its own sign. */
-export function otherStates(actions: readonly LateralAction[]): LateralState[] {
+export function otherStates(actions: readonly StateAction[]): LateralState[] {
   return casesOf(actions, 'other').map(({ name, by }) => ({
     label: `H = ${name}`,
     parts: [{ action: by['0'] ?? 0, factor: 1 }],
