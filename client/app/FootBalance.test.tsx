@@ -8,6 +8,7 @@ import { sampleAnswers } from './testing/sampleBuilding.ts';
 const results = (residual: number) => ({
   body: {
     units: 'us',
+    distribution: [],
     levels: [{ level: 'L2', elevation: 14.5 }],
     balance: [
       {

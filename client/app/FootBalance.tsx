@@ -1,4 +1,6 @@
-import { useResults } from '../data/queries.ts';
+import { useMemo } from 'react';
+
+import { useResults, useTable } from '../data/queries.ts';
 import { balanceInView } from './balanceInView.ts';
 import { useChoice } from './useChoice.ts';
 
@@ -12,7 +14,12 @@ const residualText = (value: number): string =>
 export function FootBalance({ buildingId }: { readonly buildingId: string }) {
   const results = useResults(buildingId);
   const [choice] = useChoice();
-  const balance = results.data === undefined || results.isError ? null : balanceInView(results.data, choice);
+  const walls = useTable(buildingId, 'walls').data?.rows;
+  const document = results.isError ? undefined : results.data;
+  const balance = useMemo(
+    () => (document === undefined ? null : balanceInView(document, { case: choice.case }, walls)),
+    [document, choice.case, walls],
+  );
   if (balance === null) {
     return (
       <div className="gw-balance">
@@ -23,6 +30,18 @@ export function FootBalance({ buildingId }: { readonly buildingId: string }) {
   }
   const unit = results.data?.units === 'si' ? 'kN' : 'kip';
   const residual = residualText(balance.worst.residual);
+  if (balance.lost !== null) {
+    const { basis, level, direction, sum, resisted, residual: open } = balance.lost;
+    return (
+      <div className="gw-balance gw-balance-broken" role="alert">
+        <b>Balance broken</b>
+        <span>
+          {balance.case}, {level}, {basis}: the shares in {direction} add up to {force(sum)}, resisted are{' '}
+          {force(resisted)} {unit}; residual {residualText(open)}, over 1e−9. A load is lost on the way.
+        </span>
+      </div>
+    );
+  }
   if (!balance.closed) {
     return (
       <div className="gw-balance gw-balance-broken" role="alert">

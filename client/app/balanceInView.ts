@@ -1,5 +1,7 @@
 import type { ResultBalance, ResultDocument } from '#shared/contracts/result';
+import type { WallRow } from '#shared/engineering/input';
 
+import { shareSums, type ShareSum } from './shareSums.ts';
 import type { Choice } from './useChoice.ts';
 
 /** Largest residual that still counts as closed. */
@@ -12,12 +14,18 @@ export interface BalanceInView {
   /** base shear of the case as applied and resisted, in the direction with the larger force */
   readonly base: { readonly applied: number; readonly resisted: number } | null;
   readonly closed: boolean;
+  /** shares that do not add up to what the balance says is resisted, the worst of them; null where all do */
+  readonly lost: ShareSum | null;
 }
 
-/** The balance of the case in the URL, or of the first case; null where nothing was computed. */
+/**
+ * The balance of the case in the URL, or of the first case, with the shares added up once more against the walls in plan; null
+ * where nothing was computed.
+ */
 export function balanceInView(
-  document: Pick<ResultDocument, 'balance' | 'levels'>,
+  document: Pick<ResultDocument, 'balance' | 'levels' | 'distribution'>,
   choice: Pick<Choice, 'case'>,
+  walls: readonly WallRow[] = [],
 ): BalanceInView | null {
   const first = document.balance[0];
   if (first === undefined) return null;
@@ -34,5 +42,9 @@ export function balanceInView(
     (large, line) => (large === null || Math.abs(line.applied) > Math.abs(large.applied) ? line : large),
     null,
   );
-  return { case: worst.case, worst, base, closed: Math.abs(worst.residual) <= closedResidual };
+  const lost = shareSums(document, walls, worst.case).reduce<ShareSum | null>(
+    (most, one) => (one.residual > Math.max(closedResidual, most?.residual ?? 0) ? one : most),
+    null,
+  );
+  return { case: worst.case, worst, base, closed: Math.abs(worst.residual) <= closedResidual && lost === null, lost };
 }

@@ -3,15 +3,17 @@ import { useSearchParams } from 'react-router-dom';
 
 import type { Variant } from '#shared/contracts/result';
 
-/** What a colleague should see when the link is shared: story, wall, case, variant. Null: the page takes its first. */
+/** What a colleague should see when the link is shared: story, wall, case, variant, basis. Null: the page takes its first. */
 export interface Choice {
   readonly level: string | null;
   readonly wall: string | null;
   readonly case: string | null;
   readonly variant: Variant;
+  /** as the address names it; a page shows it where it was computed */
+  readonly basis: string | null;
 }
 
-const names = ['level', 'wall', 'case', 'variant'] as const;
+const names = ['level', 'wall', 'case', 'variant', 'basis'] as const;
 
 const toVariant = (text: string | null): Variant => (text === '+' || text === '-' ? text : '0');
 
@@ -24,6 +26,7 @@ export function useChoice(): readonly [Choice, (part: Partial<Choice>) => void] 
       wall: parameters.get('wall'),
       case: parameters.get('case'),
       variant: toVariant(parameters.get('variant')),
+      basis: parameters.get('basis'),
     }),
     [parameters],
   );

@@ -5,7 +5,7 @@ import type { Basis } from '#shared/engineering/input';
 export const levelsDown = (document: ResultDocument): readonly ResultLevel[] =>
   [...document.levels].sort((a, b) => b.elevation - a.elevation);
 
-/** What a page shows: the choice of the address where it exists, else the first case, as typed, in the lowest story. */
+/** What a page shows: the choice of the address where it exists, else the first basis and case, as typed, in the lowest story. */
 export interface ResultChoice {
   readonly bases: readonly Basis[];
   readonly basis: Basis;
@@ -22,6 +22,7 @@ interface Wanted {
   readonly level: string | null;
   readonly case: string | null;
   readonly variant: Variant;
+  readonly basis?: string | null;
 }
 
 /** Null where nothing was distributed. */
@@ -30,13 +31,26 @@ export function resultChoice(document: ResultDocument, wanted: Wanted): ResultCh
   const level = down.find((one) => one.level === wanted.level) ?? down.at(-1);
   const bases = unique(document.distribution.map((one) => one.basis));
   const cases = unique(document.distribution.map((one) => one.case));
-  const basis = bases[0];
+  const basis = bases.find((one) => one === wanted.basis) ?? bases[0];
   const chosen = cases.find((name) => name === wanted.case) ?? cases[0];
   if (!level || !basis || chosen === undefined) return null;
   const rows = document.distribution.filter((one) => one.case === chosen && one.basis === basis);
   const variants = unique(rows.map((one) => one.variant));
   const variant = variants.find((one) => one === wanted.variant) ?? variants[0] ?? '0';
   return { bases, basis, cases, case: chosen, variants, variant, level };
+}
+
+/** The variant in view where a basis lists it, else the case as built: flexible floors carry no eccentricity. */
+export function variantUnder(
+  document: Pick<ResultDocument, 'distribution'>,
+  basis: Basis,
+  caseName: string,
+  wanted: Variant,
+): Variant {
+  const listed = document.distribution.some(
+    (one) => one.basis === basis && one.case === caseName && one.variant === wanted,
+  );
+  return listed ? wanted : '0';
 }
 
 /** Variants of a case as words: `as typed`, `e +5 %`. */

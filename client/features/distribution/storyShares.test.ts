@@ -1,8 +1,9 @@
 import { expect, it } from 'vitest';
 
+import { bandAt } from '../../app/bandAt.ts';
 import { sample, sampleTables } from '../../engine/testing/sampleBuilding.ts';
 import { sayCenters } from './sayCenters.ts';
-import { bandAt, storyShares } from './storyShares.ts';
+import { storyShares } from './storyShares.ts';
 
 const choice = { basis: 'rigid', case: 'EY', variant: '0', level: 'L2' } as const;
 

@@ -1,6 +1,8 @@
 import type { ResultDocument, Variant } from '#shared/contracts/result';
 import type { Basis, WallRow } from '#shared/engineering/input';
 
+import { bandAt } from '../../app/bandAt.ts';
+
 export interface StoryChoice {
   readonly basis: Basis;
   readonly case: string;
@@ -15,6 +17,8 @@ export interface WallShare {
   readonly rigidity: number;
   /** of the sum of the story's rigidities */
   readonly rigidityShare: number;
+  /** the basis tells direct and torsional part apart; without, the total stands as direct */
+  readonly parted: boolean;
   readonly direct: number;
   readonly torsional: number;
   readonly total: number;
@@ -29,21 +33,6 @@ export interface StoryShares {
   readonly size: number;
   /** sum of the walls' forces along the story shear, for the foot of the table */
   readonly sum: number;
-}
-
-type Levels = ResultDocument['levels'];
-
-const elevationOf = (levels: Levels, name: string): number | undefined =>
-  levels.find((level) => level.level === name)?.elevation;
-
-/** The row of a wall that stands in the story of a level. */
-export function bandAt(levels: Levels, rows: readonly WallRow[], wall: string, level: string): WallRow | undefined {
-  const at = elevationOf(levels, level);
-  return rows.find((row) => {
-    const [from, to] = [elevationOf(levels, row.from_level), elevationOf(levels, row.to_level)];
-    if (row.wall !== wall || at === undefined || from === undefined || to === undefined) return false;
-    return at >= from && at <= to;
-  });
 }
 
 /** What each wall of a story takes of a case, in the order of the result. */
@@ -71,6 +60,7 @@ export function storyShares(document: ResultDocument, rows: readonly WallRow[], 
         geometry,
         rigidity,
         rigidityShare: rigiditySum > 0 ? rigidity / rigiditySum : 0,
+        parted: one.direct !== undefined && one.torsional !== undefined,
         direct: one.direct ?? one.total,
         torsional: one.torsional ?? 0,
         total: one.total,
