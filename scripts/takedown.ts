@@ -1,11 +1,13 @@
-import { mkdirSync, readFileSync, readdirSync, writeFileSync } from 'node:fs';
+import { once } from 'node:events';
+import { closeSync, mkdirSync, openSync, readFileSync, readdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { parseArgs } from 'node:util';
 
-import type { ResultDocument, ResultRow } from '#shared/contracts/result';
+import type { ResultRow } from '#shared/contracts/result';
 import type { ScheduleResourceRow } from '#shared/contracts/schedule';
 import { readFolder } from '#shared/csv/readFolder';
 import { checkSection } from '#shared/result/checkSection';
+import { resultChunks } from '#shared/result/resultChunks';
 import { runBuilding } from '#shared/result/runBuilding';
 
 /**
@@ -21,12 +23,17 @@ interface ProblemLine {
 
 const usage = 'usage: takedown --in DIR [--out DIR] [--json] [--all-actions] | --section FILE.json';
 
+/** The input was refused and everything said: nothing is left to do. */
+class Refused extends Error {}
+
 function refuse(problems: readonly ProblemLine[], json: boolean): never {
+  // file descriptors may be pipes that are full for the moment: everything goes through the streams, and the process ends by itself
   for (const { file, row, column, message } of problems) {
     process.stderr.write(`${file}:${row ?? ''}:${column ?? ''}: ${message}\n`);
   }
-  if (json) writeFileSync(1, `${JSON.stringify({ problems })}\n`);
-  process.exit(2);
+  if (json) process.stdout.write(`${JSON.stringify({ problems })}\n`);
+  process.exitCode = 2;
+  throw new Refused();
 }
 
 function readFiles(folder: string): Map<string, Uint8Array> {
@@ -53,7 +60,7 @@ function runSection(file: string): void {
       true,
     );
   }
-  writeFileSync(1, `${JSON.stringify(outcome.output)}\n`);
+  process.stdout.write(`${JSON.stringify(outcome.output)}\n`);
 }
 
 async function runFolder(folder: string, out: string | undefined, json: boolean, allActions: boolean): Promise<void> {
@@ -61,7 +68,6 @@ async function runFolder(folder: string, out: string | undefined, json: boolean,
   if (!reading.ok) return refuse(reading.problems, json);
   const outcome = runBuilding(reading.input, {
     now: () => performance.now(),
-    allActions,
     notices: reading.notices.filter(({ code }) => code === 'file-notice' || code === 'no-gravity'),
   });
   if (!outcome.ok) {
@@ -78,10 +84,12 @@ async function runFolder(folder: string, out: string | undefined, json: boolean,
     );
   }
   const { document } = outcome;
-  const text = resultText(document);
+  const chunks = () => resultChunks(document, allActions ? outcome.allActions() : null);
   if (out !== undefined) {
     mkdirSync(out, { recursive: true });
-    writeFileSync(join(out, 'result.json'), text);
+    const file = openSync(join(out, 'result.json'), 'w');
+    writeChunks(file, chunks());
+    closeSync(file);
     const { writeWorkbook } = await import('../server/workbook/writeWorkbook.ts');
     const workbook = await writeWorkbook({
       document,
@@ -91,12 +99,19 @@ async function runFolder(folder: string, out: string | undefined, json: boolean,
     });
     writeFileSync(join(out, 'schedule.xlsx'), workbook);
   }
-  if (json || out === undefined) writeFileSync(1, text);
+  if (json || out === undefined) await writeToOutput(chunks());
 }
 
-/** One array a line, so that no single string has to hold a large building. */
-function resultText(document: ResultDocument): string {
-  return `${JSON.stringify(document)}\n`;
+/** Writes pieces one after the other, so that no single string has to hold a large building. */
+function writeChunks(file: number, chunks: Iterable<string>): void {
+  for (const chunk of chunks) writeFileSync(file, chunk);
+}
+
+/** Waits for the reader when the pipe is full. */
+async function writeToOutput(chunks: Iterable<string>): Promise<void> {
+  for (const chunk of chunks) {
+    if (!process.stdout.write(chunk)) await once(process.stdout, 'drain');
+  }
 }
 
 function asScheduleRow(row: ResultRow, index: number): ScheduleResourceRow {
@@ -129,9 +144,13 @@ function readArguments() {
 }
 
 const values = readArguments();
-if (values.section !== undefined) runSection(values.section);
-else if (values.in !== undefined) await runFolder(values.in, values.out, values.json, values['all-actions']);
-else {
-  process.stderr.write(`${usage}\n`);
-  process.exit(1);
+try {
+  if (values.section !== undefined) runSection(values.section);
+  else if (values.in !== undefined) await runFolder(values.in, values.out, values.json, values['all-actions']);
+  else {
+    process.stderr.write(`${usage}\n`);
+    process.exitCode = 1;
+  }
+} catch (error) {
+  if (!(error instanceof Refused)) throw error;
 }

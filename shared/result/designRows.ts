@@ -67,30 +67,28 @@ export function envelopeRows(walls: readonly WallOutcome[], system: UnitSystem, 
   return [...worst.values()].map((row) => ({ ...row, basis: 'envelope' }));
 }
 
-/** Factored actions that govern an extreme or a check; every expansion with `all`. From the top down, wall by wall. */
-export function actionRows(walls: readonly WallOutcome[], units: UnitFactors, all: boolean): ResultAction[] {
-  return walls.flatMap(({ demand, design }) => {
-    const count = demand.stories.length;
-    return demand.forces.flatMap((forces) => {
-      const indexOf = new Map(forces.expansions.map((expansion, index) => [expansion.name, index] as const).reverse());
-      const named = combinationsByPlace(design.checks, forces.basis, indexOf);
-      return [...demand.stories].reverse().flatMap((section) => {
-        const story = demand.stories.indexOf(section);
-        const chosen = all
-          ? forces.expansions.map((_, index) => index)
-          : [...new Set([...governingExpansions(demand, forces, story), ...(named.get(section.level) ?? [])])].sort(
-              (a, b) => a - b,
-            );
-        return chosen.map((index) => ({
-          basis: forces.basis,
-          level: section.level,
-          wall: demand.wall,
-          combination: forces.expansions[index]?.name ?? '',
-          axial: (forces.axialKip[index * count + story] ?? 0) / units.force,
-          moment: (forces.momentKipIn[index * count + story] ?? 0) / units.moment,
-          shear: (forces.shearKip[index * count + story] ?? 0) / units.force,
-        }));
-      });
+/** Factored actions of one wall that govern an extreme or a check; every expansion with `all`. From the top down, basis by basis. */
+export function wallActions({ demand, design }: WallOutcome, units: UnitFactors, all: boolean): ResultAction[] {
+  const count = demand.stories.length;
+  return demand.forces.flatMap((forces) => {
+    const indexOf = new Map(forces.expansions.map((expansion, index) => [expansion.name, index] as const).reverse());
+    const named = combinationsByPlace(design.checks, forces.basis, indexOf);
+    return [...demand.stories].reverse().flatMap((section) => {
+      const story = demand.stories.indexOf(section);
+      const chosen = all
+        ? forces.expansions.map((_, index) => index)
+        : [...new Set([...governingExpansions(demand, forces, story), ...(named.get(section.level) ?? [])])].sort(
+            (a, b) => a - b,
+          );
+      return chosen.map((index) => ({
+        basis: forces.basis,
+        level: section.level,
+        wall: demand.wall,
+        combination: forces.expansions[index]?.name ?? '',
+        axial: (forces.axialKip[index * count + story] ?? 0) / units.force,
+        moment: (forces.momentKipIn[index * count + story] ?? 0) / units.moment,
+        shear: (forces.shearKip[index * count + story] ?? 0) / units.force,
+      }));
     });
   });
 }

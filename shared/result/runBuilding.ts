@@ -1,16 +1,10 @@
-import type { ResultDocument } from '../contracts/result.ts';
+import type { ResultAction, ResultDocument } from '../contracts/result.ts';
 import type { BuildingInput, Problem, Warning } from '../engineering/input.ts';
 import { checkTables } from '../engineering/model/check-tables/checkTables.ts';
 import { chain } from '../engineering/stages.ts';
 import type { Analysis, ChainOutcome, StageName } from '../engineering/stages.ts';
 import { unitFactors } from '../engineering/units.ts';
 import { engineVersion } from '../engineering/version.ts';
-import { baseShearWarnings, combinationWarnings, criteriaWarnings } from '../engineering/warnings/inputWarnings.ts';
-import { methodWarnings, unsettles } from '../engineering/warnings/methodWarnings.ts';
-import { basisWarnings } from '../engineering/warnings/basisWarnings.ts';
-import { driftWarnings } from '../engineering/warnings/driftWarnings.ts';
-import { planWarnings } from '../engineering/warnings/planWarnings.ts';
-import { materialNotices } from '../engineering/wall-design/materialNotices.ts';
 import type { DesignRow, PinnedBand } from '../engineering/wall-design/designTypes.ts';
 
 import {
@@ -24,10 +18,12 @@ import {
   rigidityRows,
   transferredRows,
 } from './analysisRows.ts';
-import { actionRows, checkRows, envelopeRows, quantityRows, scheduleRows } from './designRows.ts';
+import { checkRows, envelopeRows, quantityRows, scheduleRows, wallActions } from './designRows.ts';
 import { driftCheckRows } from './driftChecks.ts';
 import type { CombinationSet } from './readCombinations.ts';
 import { readCombinations } from './readCombinations.ts';
+import { unsettledRows } from './unsettledRows.ts';
+import { settleWarnings, type Acknowledged } from './warningFacts.ts';
 
 export interface RunOptions {
   /** milliseconds of any steady clock; without it `timing` reads 0 */
@@ -38,6 +34,8 @@ export interface RunOptions {
   readonly notices?: readonly Warning[];
   /** stories that carry an engineer's own cells */
   readonly pinned?: readonly PinnedBand[];
+  /** warnings that an engineer has settled; one counts while its facts stand */
+  readonly acknowledged?: readonly Acknowledged[];
 }
 
 export type RunOutcome =
@@ -46,6 +44,8 @@ export type RunOutcome =
       readonly document: ResultDocument;
       /** the rows behind `document.schedule`, in the same order, with what automatic choice says beside what stands */
       readonly rows: readonly DesignRow[];
+      /** every expanded combination, a wall at a time: for the streaming writer */
+      readonly allActions: () => Generator<readonly ResultAction[]>;
     }
   | { readonly ok: false; readonly problems: readonly Problem[] };
 
@@ -68,11 +68,19 @@ export function runBuilding(input: BuildingInput, options: RunOptions = {}): Run
     set,
     outcome,
     [...(options.notices ?? []), ...checked.notices],
-    options.allActions ?? false,
+    options,
   );
   timing.write = now() - writing;
   timing.total = now() - start;
-  return { ok: true, document: { ...answer.document, timing }, rows: answer.rows };
+  const units = unitFactors[input.settings.units];
+  return {
+    ok: true,
+    document: { ...answer.document, timing },
+    rows: answer.rows,
+    allActions: function* () {
+      for (const wall of outcome.walls) yield wallActions(wall, units, true);
+    },
+  };
 }
 
 /** Runs the stages one after the other and adds up the time of each by name. */
@@ -100,15 +108,17 @@ function write(
   set: CombinationSet,
   outcome: Extract<ChainOutcome, { ok: true }>,
   notices: readonly Warning[],
-  allActions: boolean,
+  { allActions = false, acknowledged = [] }: RunOptions,
 ): { readonly document: ResultDocument; readonly rows: readonly DesignRow[] } {
   const { analysis, walls } = outcome;
   const { settings } = building;
   const units = unitFactors[settings.units];
-  const warnings = collectWarnings(building, analysis, set, notices);
-  const waiting = warnings.map((warning) => unsettles(warning, analysis)).filter((rule) => rule !== null);
-  const { rows, schedule } = scheduleRows(analysis, walls, units, (wall, story) =>
-    waiting.some((rule) => rule(wall, story)),
+  const warnings = settleWarnings(building, collectWarnings(building, analysis, walls, set, notices), acknowledged);
+  const { rows, schedule } = scheduleRows(
+    analysis,
+    walls,
+    units,
+    unsettledRows(analysis.model.stories, walls, warnings),
   );
   const document: ResultDocument = {
     units: settings.units,
@@ -126,7 +136,7 @@ function write(
     lateral: lateralRows(analysis, units),
     gravity: gravityRows(analysis, units),
     transferred: transferredRows(analysis, units),
-    actions: actionRows(walls, units, allActions),
+    actions: walls.flatMap((wall) => wallActions(wall, units, allActions)),
     checks: [
       ...checkRows(walls, settings.units, units),
       ...(settings.basis.includes('envelope') ? envelopeRows(walls, settings.units, units) : []),
@@ -137,27 +147,4 @@ function write(
     balance: balanceRows(analysis, units),
   };
   return { document, rows };
-}
-
-function collectWarnings(
-  building: BuildingInput,
-  analysis: Analysis,
-  set: CombinationSet,
-  notices: readonly Warning[],
-): Warning[] {
-  return [
-    ...criteriaWarnings(building, analysis),
-    ...planWarnings(building, analysis),
-    ...combinationWarnings(analysis, set.combinations, set.zeroLoads),
-    ...baseShearWarnings(building, analysis),
-    ...analysis.warnings,
-    ...methodWarnings(building, analysis),
-    ...basisWarnings(analysis),
-    ...driftWarnings(analysis),
-    ...materialNotices(
-      analysis.model.settings,
-      analysis.model.walls.flatMap((wall) => wall.segments.map(({ fcPsi }) => fcPsi)),
-    ),
-    ...notices,
-  ];
 }
