@@ -39,7 +39,9 @@ for (const line of ['force x', 'force y', 'torque', 'overturning x', 'overturnin
   say(`residual ${line.padEnd(14)} ${worst.value.toExponential(2)} over ${String(rows.length)} stories and cases`);
   for (const row of rows) {
     if (!(row.value < residualLimit))
-      lines.push(`residual of ${line}, ${row.basis ?? ''} ${row.case} ${row.variant} ${row.level}: ${String(row.value)}`);
+      lines.push(
+        `residual of ${line}, ${row.basis ?? ''} ${row.case} ${row.variant} ${row.level}: ${String(row.value)}`,
+      );
   }
 }
 for (const row of result.balance) {

@@ -56,7 +56,8 @@ function compareDriftChecks(comparison, building, result, solution) {
       else raise('drift-wind', level, (drift * settings.windDriftFactor) / (service ? 0.6 : 1), 1 / 400);
     });
     const top = building.stories.at(-1);
-    const total = (Math.abs(roof) * settings.windDriftFactor) / (service ? 0.6 : 1) / (top.top - building.stories[0].bottom);
+    const total =
+      (Math.abs(roof) * settings.windDriftFactor) / (service ? 0.6 : 1) / (top.top - building.stories[0].bottom);
     if (load.kind === 'wind') raise('drift-wind-total', top.level, total, 1 / 400);
   }
   const listed = result.checks.filter(({ check }) => check.startsWith('drift'));

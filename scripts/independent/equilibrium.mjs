@@ -17,30 +17,48 @@ export function residuals(building, result, unit, solution) {
 /** Stories below an own share do not close in torque; `flexible` closes each direction by force, skew walls push sideways. */
 function ofSet(building, result, unit, { basis, load, variant, actions }) {
   const out = [];
-  const own = (rows) =>
-    rows.filter((row) => row.basis === basis && row.case === load.name && row.variant === variant);
+  const own = (rows) => rows.filter((row) => row.basis === basis && row.case === load.name && row.variant === variant);
   const shares = own(result.distribution);
   const lateral = own(result.lateral);
   const stopped = own(result.transferred);
   const belongs = (row) => row.case === undefined || row.case === load.name;
   const overrides = building.overrides.filter(belongs);
   const sideways =
-    basis === 'flexible' && [...building.walls.values()].some((wall) => Math.abs(wall.segments.get(wall.from).c * wall.segments.get(wall.from).s) > 1e-9);
+    basis === 'flexible' &&
+    [...building.walls.values()].some(
+      (wall) => Math.abs(wall.segments.get(wall.from).c * wall.segments.get(wall.from).s) > 1e-9,
+    );
   const directionOf = (row) => {
     const wall = building.walls.get(row.wall);
     return wall.segments.get(wall.from);
   };
+  const size = Math.hypot(actions[0].x, actions[0].y);
   building.stories.forEach((story, i) => {
     const here = shares.filter((row) => row.level === story.level);
     const forces = (pick) => here.map((row) => row.total * unit.force * pick(directionOf(row)));
     const add = (line, parts, applied, base) =>
       out.push({ line, basis, case: load.name, variant, level: story.level, value: relative(parts, applied, base) });
     if (sideways) return;
-    add('force x', forces(({ c }) => c), actions[i].x, actions[0].x);
-    add('force y', forces(({ s }) => s), actions[i].y, actions[0].y);
+    add(
+      'force x',
+      forces(({ c }) => c),
+      actions[i].x,
+      size,
+    );
+    add(
+      'force y',
+      forces(({ s }) => s),
+      actions[i].y,
+      size,
+    );
     const shared = overrides.some((row) => row.kind === 'share' && row.level === story.level);
     if (basis !== 'flexible' && !shared)
-      add('torque', forces(({ c, s, x, y }) => x * s - y * c), actions[i].torque, actions[0].torque);
+      add(
+        'torque',
+        forces(({ c, s, x, y }) => x * s - y * c),
+        actions[i].torque,
+        actions[0].torque,
+      );
     if (overrides.some((row) => row.kind === 'transfer')) return;
     const moments = lateral.filter((row) => row.level === story.level);
     const above = stopped.filter((row) => building.index.get(row.level) >= i);
@@ -55,7 +73,7 @@ function ofSet(building, result, unit, { basis, load, variant, actions }) {
             j < from ? sum : sum + force[component] * (building.stories[j].top - building.stories[from].bottom),
           0,
         );
-      add(line, parts, applied(i), applied(0));
+      add(line, parts, applied(i), size * (building.stories.at(-1).top - building.stories[0].bottom));
     }
   });
   return out;
@@ -69,7 +87,8 @@ function verticalResiduals(building, result, unit, basis) {
       let sum = 0;
       for (const row of building.gravity) if (building.index.get(row.level) >= from) sum += row[column] ?? 0;
       for (const row of building.overrides)
-        if (row.kind === 'transfer' && row.case === name && building.index.get(row.level) >= from) sum += row.axial ?? 0;
+        if (row.kind === 'transfer' && row.case === name && building.index.get(row.level) >= from)
+          sum += row.axial ?? 0;
       if (name !== 'D' || !building.settings.selfWeight) return sum;
       for (const wall of building.walls.values()) {
         for (const [i, { length, thickness, opening }] of wall.segments) {

@@ -10,7 +10,8 @@ export function judgeSchedule(building, result, solution) {
   const found = { lines: [], flexure: 0, shear: 0, sections: 0, worstFlexure: 0, worstShear: 0 };
   if (result.code !== 'aci318-19' || (building.settings.wallClass ?? 'ordinary') !== 'ordinary') return found;
   const checks = new Map();
-  for (const check of result.checks) checks.set(JSON.stringify([check.basis, check.wall, check.level, check.check]), check);
+  for (const check of result.checks)
+    checks.set(JSON.stringify([check.basis, check.wall, check.level, check.check]), check);
   for (const row of result.schedule) {
     const wall = building.walls.get(row.wall);
     let verdict = true;

@@ -39,15 +39,16 @@ function windCases(loads, turning) {
     ...one(load, by),
     ...(turning ? [{ load, variant: 'twist', by: by * side }] : []),
   ];
+  const sides = turning ? both : [1]; // eccentricity can't act on flexible floors
   const pairs = x.flatMap((a) => y.map((b) => [a, b]));
   return [
     ...loads.flatMap((load) => both.map((a) => one(load, a))),
-    ...loads.flatMap((load) => both.flatMap((a) => both.map((e) => turned(load, 0.75 * a, e)))),
+    ...loads.flatMap((load) => both.flatMap((a) => sides.map((e) => turned(load, 0.75 * a, e)))),
     ...pairs.flatMap(([p, q]) => both.flatMap((a) => both.map((b) => [...one(p, 0.75 * a), ...one(q, 0.75 * b)]))),
     ...pairs.flatMap(([p, q]) =>
       both.flatMap((a) =>
         both.flatMap((b) =>
-          both.flatMap((e) => both.map((f) => [...turned(p, 0.563 * a, e), ...turned(q, 0.563 * b, f)])),
+          sides.flatMap((e) => sides.map((f) => [...turned(p, 0.563 * a, e), ...turned(q, 0.563 * b, f)])),
         ),
       ),
     ),

@@ -1,10 +1,11 @@
-/**
- * The whole height at once as a plain frame: three unknowns a floor (two translations and the turn about the origin) and
- * one rotation for every wall and floor that it passes, all kept, one full matrix, elimination with row exchange.
- */
+import { ownUnits } from './siUnits.mjs';
 import { modulusOf } from './solveLateral.mjs';
 
-/** Null where a wall starts above the base: such a wall has no fixed foot. */
+/**
+ * The whole height at once as a plain frame: three unknowns a floor (two translations and the turn about the origin) and
+ * one rotation for every wall and floor that it passes, all kept, one full matrix, elimination with row exchange. Null
+ * where a wall starts above the base: such a wall has no fixed foot.
+ */
 export function makeFrame(building) {
   const walls = [...building.walls.values()];
   if (walls.some((wall) => wall.from > 0)) return null;
@@ -14,7 +15,7 @@ export function makeFrame(building) {
     wall.turns = building.stories.map((_, i) => (i <= wall.to ? size++ : null));
     const spring = building.settings.baseSprings[wall.name];
     wall.foot = spring === undefined ? null : size++;
-    wall.spring = spring;
+    wall.spring = (spring ?? 0) * ownUnits[building.system].moment;
   }
   const matrix = Array.from({ length: size }, () => new Float64Array(size));
   const pieces = walls.flatMap((wall) => Array.from({ length: wall.to + 1 }, (_, i) => makePiece(building, wall, i)));

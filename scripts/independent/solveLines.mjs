@@ -65,27 +65,29 @@ export function lineWidths(lines, low, high) {
   return widths;
 }
 
-/** Shears of all walls under the level forces of one case, from the top down; what a stopping wall brings goes on below. */
+/**
+ * Shears of all walls under the level forces of one case, from the top down. The parts along x and y are kept apart: what a
+ * wall that stops took of Fx goes on as Fx, of Fy as Fy (the balance is of the force in its own direction).
+ */
 export function solveLines(building, load) {
-  const shears = new Map();
+  const carried = new Map();
   const arriving = building.stories.map(() => ({ x: 0, y: 0 }));
   const shares = [];
   for (let i = building.stories.length - 1; i >= 0; i -= 1) {
     const force = { x: load.levels[i].fx + arriving[i].x, y: load.levels[i].fy + arriving[i].y };
     for (const axis of ['x', 'y']) {
       for (const [wall, part] of levelParts(building, i, axis)) {
-        const segment = building.walls.get(wall).segments.get(i);
-        const along = axis === 'x' ? segment.c : segment.s;
-        shears.set(wall, (shears.get(wall) ?? 0) + (part * force[axis]) / along);
+        if (!carried.has(wall)) carried.set(wall, { x: 0, y: 0 });
+        carried.get(wall)[axis] += part * force[axis];
       }
     }
     for (const { wall, segment } of building.rigidity[i].parts) {
-      const total = shears.get(wall) ?? 0;
-      shares.push({ story: i, wall, total });
+      const { x, y } = carried.get(wall) ?? { x: 0, y: 0 };
+      shares.push({ story: i, wall, total: (x === 0 ? 0 : x / segment.c) + (y === 0 ? 0 : y / segment.s) });
       if (building.walls.get(wall).from !== i || i === 0) continue;
-      arriving[i - 1].x += total * segment.c;
-      arriving[i - 1].y += total * segment.s;
-      shears.delete(wall);
+      arriving[i - 1].x += x;
+      arriving[i - 1].y += y;
+      carried.delete(wall);
     }
   }
   return shares;

@@ -29,6 +29,7 @@ import type { PinnedBand, WallDemand, WallDesign } from './wall-design/designTyp
 export interface BasisResult extends BasisForces {
   readonly shares: BasisShares;
   readonly along: { readonly xKip: Float64Array; readonly yKip: Float64Array } | null;
+  readonly openTorqueKipIn: Float64Array | null;
 }
 
 /** Everything before design, as columns. */
@@ -91,11 +92,12 @@ export function* chain(input: ChainInput): Generator<StageName, ChainOutcome, vo
   const effects = transferEffects(model, actions);
   const eccentric = expandCombinations(input.combinations, actions, model.settings, true);
   const plain = expandCombinations(input.combinations, actions, model.settings, false);
-  const bases = distribution.bases.map(({ basis, shares, along }) => {
+  const bases = distribution.bases.map(({ basis, shares, along, openTorqueKipIn }) => {
     const shearKip = plus(shares.totalKip, effects?.shearKip ?? null);
     const momentKipIn = plus(lateralMoments(model, shares.totalKip, actions.length), effects?.momentKipIn ?? null);
     const { expansions } = along ? plain : eccentric;
-    return { basis, shares, along, shearKip, momentKipIn, axialKip: effects?.axialKip ?? null, expansions };
+    const axialKip = effects?.axialKip ?? null;
+    return { basis, shares, along, openTorqueKipIn, shearKip, momentKipIn, axialKip, expansions };
   });
   yield 'takedown';
 

@@ -41,7 +41,7 @@ function residuals(fault: number) {
       model,
       action,
       index,
-      { shearKip: shear, momentKipIn: moments, shares, along: null },
+      { shearKip: shear, momentKipIn: moments, along: null, openTorqueKipIn: null },
       null,
       transferPoints(model),
     ).flatMap(({ lines }) => lines.map(({ residual }) => residual)),

@@ -60,7 +60,8 @@ export const informing = (line: BalanceLineName, value: number): BalanceLine => 
 
 /**
  * Vertical load of each gravity case at the bottom of every story: what was brought in at and above (self-weight with it)
- * against the axial loads of the walls that stand there and of those that arrived above.
+ * against the axial loads of the walls that stand there and of those that arrived above. L is applied as reduced: what the reduction
+ * took off each wall is taken off what was brought in.
  */
 export function gravityBalance(
   model: Model,
@@ -81,15 +82,18 @@ export function gravityBalance(
     const appliedAt = (from: number) => broughtIn.slice(from).reduce((sum, value) => sum + value, 0);
     return stories.map((_, story): BalanceEntry => {
       const resisted = newSum();
+      let off = 0;
+      const count = (at: number): void => {
+        addTo(resisted, gravity.axialKip[name][at] ?? 0);
+        if (name === 'L') off += gravity.reducedOffKip[at] ?? 0;
+      };
       walls.forEach((wall, wallIndex) => {
-        if (story < wall.fromStory || story > wall.toStory) return;
-        addTo(resisted, gravity.axialKip[name][story * walls.length + wallIndex] ?? 0);
+        if (story >= wall.fromStory && story <= wall.toStory) count(story * walls.length + wallIndex);
       });
       for (const { wallIndex, fromStory } of transfers) {
-        if (fromStory <= story) continue;
-        addTo(resisted, gravity.axialKip[name][fromStory * walls.length + wallIndex] ?? 0);
+        if (fromStory > story) count(fromStory * walls.length + wallIndex);
       }
-      const line = lineOf('vertical', appliedAt(story), resisted, appliedAt(0));
+      const line = lineOf('vertical', appliedAt(story) - off, resisted, appliedAt(0));
       return { case: name, variant: '0', story, lines: [line] };
     });
   });

@@ -1,5 +1,4 @@
 import type { LateralAction } from '../distribution/lateralActions.ts';
-import type { BasisShares } from '../distribution/rigidBasis.ts';
 import type { Model } from '../model/model.ts';
 import type { TransferEffects } from '../takedown/transferEffects.ts';
 import type { TransferPoint } from '../takedown/transferred.ts';
@@ -7,12 +6,12 @@ import type { TransferPoint } from '../takedown/transferred.ts';
 import type { BalanceEntry, BalanceLine } from './balanceLines.ts';
 import { addTo, informing, lineOf, newSum } from './balanceLines.ts';
 
-/** What the balance reads of a basis: final wall forces, shares before transfers, and in `flexible` the parts along each axis. */
+/** What the balance reads of a basis: final wall forces, in `flexible` the parts along each axis, and the torque that own shares leave open. */
 export interface BalancedBasis {
   readonly shearKip: Float64Array;
   readonly momentKipIn: Float64Array;
-  readonly shares: BasisShares;
   readonly along: { readonly xKip: Float64Array; readonly yKip: Float64Array } | null;
+  readonly openTorqueKipIn: Float64Array | null;
 }
 
 /**
@@ -111,7 +110,7 @@ function storyLines(question: {
   const here = applied[story] ?? noLoads;
   const base = applied[0] ?? noLoads;
   const more = assigned[story] ?? noLoads;
-  const open = basis.along ? 0 : torqueLeftOpen(model, actionIndex, story, basis.shares, here.torque);
+  const open = basis.along ? 0 : (basis.openTorqueKipIn?.[actionIndex * model.stories.length + story] ?? 0);
   const lines = [
     lineOf('force x', here.fx + more.fx, sums.x, base.fx),
     lineOf('force y', here.fy + more.fy, sums.y, base.fy),
@@ -170,27 +169,6 @@ function assignedAt(model: Model, actionIndex: number, story: number, effects: T
     sum.vertical += effects.axialKip[index] ?? 0;
   });
   return sum;
-}
-
-/** Torque of the shares less the story's, where an engineer's share leaves it open; 0 in every story without one. */
-function torqueLeftOpen(
-  model: Model,
-  actionIndex: number,
-  story: number,
-  shares: BasisShares,
-  torqueKipIn: number,
-): number {
-  if (!model.overrides.some((override) => override.kind === 'share' && override.story === story)) return 0;
-  const walls = model.walls.length;
-  const plane = model.stories.length * walls;
-  let sum = 0;
-  model.walls.forEach((wall, wallIndex) => {
-    const segment = wall.segments[story - wall.fromStory];
-    if (!segment) return;
-    const shear = shares.totalKip[actionIndex * plane + story * walls + wallIndex] ?? 0;
-    sum += shear * (segment.centroidXIn * segment.sin - segment.centroidYIn * segment.cos);
-  });
-  return sum - torqueKipIn;
 }
 
 /** Overturning of the parts along each axis, `[story * walls + wall]`, summed down. */

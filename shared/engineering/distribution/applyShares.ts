@@ -2,100 +2,112 @@ import type { Model } from '../model/model.ts';
 
 import type { LateralAction } from './lateralActions.ts';
 
+/** Wall shears of a basis, and in `flexible` their parts along each axis, `[action * stories * walls + story * walls + wall]`, kip. */
+export interface ChangingShears {
+  readonly totalKip: Float64Array;
+  readonly along: { readonly xKip: Float64Array; readonly yKip: Float64Array } | null;
+}
+
+interface Standing {
+  readonly at: number;
+  readonly wallIndex: number;
+  readonly rigidity: number;
+  readonly cos: number;
+  readonly sin: number;
+  readonly armIn: number;
+}
+
 /**
- * Puts an engineer's shares into the wall shears of a basis, in place: V = share x the story shear along the wall's own direction; what
- * that adds or takes is handed to the other walls of the story by rigidity, force and torque. Where the others can't take the torque
- * (one line, or all through one point) they take the force alone and the torque stays open in the balance.
+ * Puts an engineer's shares into the wall shears of a basis, in place: V = share x the story shear along the wall's own direction, of all
+ * such walls of a story at once; the force that this adds or takes goes to the other walls by rigidity, without turning the floor
+ * (engineering.md section 4). Gives the torque about the origin that no longer closes, `[action * stories + story]`, kip-in; null where
+ * nobody set a share. Where the others can't take the force it stays open, and the balance breaks.
  */
 export function applyShares(
   model: Model,
   rigidities: Float64Array,
   actions: readonly LateralAction[],
-  shearKip: Float64Array,
-): void {
-  const walls = model.walls.length;
-  const plane = model.stories.length * walls;
-  for (const override of model.overrides) {
-    if (override.kind !== 'share') continue;
-    const segment = segmentOf(model, override.wallIndex, override.story);
-    if (!segment) continue;
+  shears: ChangingShears,
+): Float64Array | null {
+  const overrides = model.overrides.filter(({ kind }) => kind === 'share');
+  if (overrides.length === 0) return null;
+  const openTorqueKipIn = new Float64Array(actions.length * model.stories.length);
+  for (const story of new Set(overrides.map((override) => override.story))) {
+    const standing = wallsOf(model, rigidities, story);
     actions.forEach((action, index) => {
-      if (override.caseName !== null && override.caseName !== action.case) return;
-      const at = index * plane + override.story * walls + override.wallIndex;
-      const along =
-        (action.storyFxKip[override.story] ?? 0) * segment.cos + (action.storyFyKip[override.story] ?? 0) * segment.sin;
-      const change = override.share * along - (shearKip[at] ?? 0);
-      shearKip[at] = override.share * along;
-      const arm = segment.centroidXIn * segment.sin - segment.centroidYIn * segment.cos;
-      const given = sharedAmongOthers(model, rigidities, override.story, override.wallIndex, [
-        -change * segment.cos,
-        -change * segment.sin,
-        -change * arm,
-      ]);
-      for (const [wallIndex, kip] of given) {
-        const other = index * plane + override.story * walls + wallIndex;
-        shearKip[other] = (shearKip[other] ?? 0) + kip;
+      const offset = index * model.stories.length * model.walls.length;
+      const shareOf = new Map(
+        overrides
+          .filter((row) => row.story === story && (row.caseName === null || row.caseName === action.case))
+          .map(({ wallIndex, share }) => [wallIndex, share]),
+      );
+      if (shareOf.size === 0) return;
+      const fx = action.storyFxKip[story] ?? 0;
+      const fy = action.storyFyKip[story] ?? 0;
+      const rest = { fx: 0, fy: 0 };
+      let torque = 0;
+      const set = (wall: Standing, shear: number, before: number): void => {
+        shears.totalKip[offset + wall.at] = shear;
+        torque += (shear - before) * wall.armIn;
+      };
+      for (const wall of standing) {
+        const share = shareOf.get(wall.wallIndex);
+        if (share === undefined) continue;
+        const before = shears.totalKip[offset + wall.at] ?? 0;
+        const shear = share * (fx * wall.cos + fy * wall.sin);
+        const { along } = shears;
+        rest.fx += (along ? (along.xKip[offset + wall.at] ?? 0) : before * wall.cos) - shear * wall.cos;
+        rest.fy += (along ? (along.yKip[offset + wall.at] ?? 0) : before * wall.sin) - shear * wall.sin;
+        if (along) {
+          along.xKip[offset + wall.at] = shear * wall.cos;
+          along.yKip[offset + wall.at] = shear * wall.sin;
+        }
+        set(wall, shear, before);
       }
+      const others = standing.filter(({ wallIndex }) => !shareOf.has(wallIndex));
+      const motion = translation(others, rest.fx, rest.fy);
+      for (const wall of others) {
+        const before = shears.totalKip[offset + wall.at] ?? 0;
+        const more = wall.rigidity * (wall.cos * motion.x + wall.sin * motion.y);
+        if (shears.along) {
+          shears.along.xKip[offset + wall.at] = (shears.along.xKip[offset + wall.at] ?? 0) + more * wall.cos;
+          shears.along.yKip[offset + wall.at] = (shears.along.yKip[offset + wall.at] ?? 0) + more * wall.sin;
+        }
+        set(wall, before + more, before);
+      }
+      openTorqueKipIn[index * model.stories.length + story] = torque;
     });
   }
+  return openTorqueKipIn;
 }
 
-function segmentOf(model: Model, wallIndex: number, story: number) {
-  const wall = model.walls[wallIndex];
-  return wall?.segments[story - wall.fromStory];
-}
-
-function sharedAmongOthers(
-  model: Model,
-  rigidities: Float64Array,
-  story: number,
-  except: number,
-  action: readonly [number, number, number],
-): Map<number, number> {
-  const others = model.walls.flatMap((_, index) => {
-    const segment = segmentOf(model, index, story);
-    if (!segment || index === except) return [];
-    const b = segment.centroidXIn * segment.sin - segment.centroidYIn * segment.cos;
-    return [
-      { index, k: rigidities[story * model.walls.length + index] ?? 0, b: [segment.cos, segment.sin, b] as const },
-    ];
+function wallsOf(model: Model, rigidities: Float64Array, story: number): Standing[] {
+  return model.walls.flatMap((wall, wallIndex) => {
+    const segment = wall.segments[story - wall.fromStory];
+    if (!segment) return [];
+    const { cos, sin, centroidXIn, centroidYIn } = segment;
+    const at = story * model.walls.length + wallIndex;
+    return [{ at, wallIndex, rigidity: rigidities[at] ?? 0, cos, sin, armIn: centroidXIn * sin - centroidYIn * cos }];
   });
-  const solve = (size: 2 | 3): number[] | null => {
-    const matrix = Array.from({ length: size }, (_, row) =>
-      Array.from({ length: size }, (__, column) =>
-        others.reduce((sum, wall) => sum + wall.k * (wall.b[row] ?? 0) * (wall.b[column] ?? 0), 0),
-      ),
-    );
-    return solveSmall(matrix, action.slice(0, size));
-  };
-  const motion = solve(3) ?? solve(2);
-  return new Map(
-    others.map(({ index, k, b }) => [
-      index,
-      motion === null ? 0 : k * motion.reduce((sum, value, part) => sum + value * (b[part] ?? 0), 0),
-    ]),
-  );
 }
 
-/** Gauss elimination on a matrix scaled by its diagonal; null where it is singular. */
-function solveSmall(matrix: readonly number[][], right: readonly number[]): number[] | null {
-  const size = right.length;
-  const scale = matrix.map((row, index) => 1 / Math.sqrt(row[index] ?? 0));
-  if (scale.some((value) => !Number.isFinite(value))) return null;
-  const a = matrix.map((row, i) => row.map((value, j) => value * (scale[i] ?? 0) * (scale[j] ?? 0)));
-  const x = right.map((value, index) => value * (scale[index] ?? 0));
-  for (let pivot = 0; pivot < size; pivot += 1) {
-    const diagonal = a[pivot]?.[pivot] ?? 0;
-    if (Math.abs(diagonal) < 1e-9) return null;
-    for (let row = 0; row < size; row += 1) {
-      if (row === pivot) continue;
-      const factor = (a[row]?.[pivot] ?? 0) / diagonal;
-      for (let column = pivot; column < size; column += 1) {
-        const line = a[row];
-        if (line) line[column] = (line[column] ?? 0) - factor * (a[pivot]?.[column] ?? 0);
-      }
-      x[row] = (x[row] ?? 0) - factor * (x[pivot] ?? 0);
-    }
+/** Movement of a floor that does not turn under a force; along the walls' one direction where all are parallel, none without walls. */
+function translation(walls: readonly Standing[], fx: number, fy: number): { x: number; y: number } {
+  let xx = 0;
+  let yy = 0;
+  let xy = 0;
+  for (const { rigidity, cos, sin } of walls) {
+    xx += rigidity * cos * cos;
+    yy += rigidity * sin * sin;
+    xy += rigidity * cos * sin;
   }
-  return x.map((value, index) => (value / (a[index]?.[index] ?? 1)) * (scale[index] ?? 0));
+  const sum = xx + yy;
+  const determinant = xx * yy - xy * xy;
+  if (determinant > 1e-9 * sum * sum) {
+    return { x: (yy * fx - xy * fy) / determinant, y: (xx * fy - xy * fx) / determinant };
+  }
+  const first = walls[0];
+  if (!first) return { x: 0, y: 0 };
+  const along = (fx * first.cos + fy * first.sin) / sum;
+  return { x: along * first.cos, y: along * first.sin };
 }

@@ -19,6 +19,8 @@ export interface BasisShears {
   readonly basis: Basis;
   readonly shares: BasisShares;
   readonly along: { readonly xKip: Float64Array; readonly yKip: Float64Array } | null;
+  /** what an engineer's shares leave open, `[action * stories + story]`; null without them */
+  readonly openTorqueKipIn: Float64Array | null;
 }
 
 export interface Distribution {
@@ -55,7 +57,7 @@ export function distribute(
   const solutions = amplified ? solve(actions) : first;
   const displacements = solutions.map(({ displacement }) => displacement);
 
-  const bases: BasisShears[] = [];
+  const bases: Omit<BasisShears, 'openTorqueKipIn'>[] = [];
   const missing: { readonly basis: Basis; readonly why: string; readonly wall: string | null }[] = [];
   for (const basis of wanted) {
     if (basis === 'rigid') {
@@ -109,7 +111,10 @@ export function distribute(
       message: `The basis ${basis} is left out: ${why}. The others stand.`,
     });
   }
-  for (const { shares, along } of bases) if (!along) applyShares(model, rigidities, actions, shares.totalKip);
+  const shared = bases.map((basis) => {
+    const shears = { totalKip: basis.shares.totalKip, along: basis.along };
+    return { ...basis, openTorqueKipIn: applyShares(model, rigidities, actions, shears) };
+  });
   if (!whole) {
     warnings.push({
       code: 'drift-not-available',
@@ -120,7 +125,7 @@ export function distribute(
   return {
     actions,
     stiffness: stories.stiffness,
-    bases,
+    bases: shared,
     drifts,
     displacements: whole ? { whole, solutions: displacements } : null,
     warnings,

@@ -2,6 +2,7 @@ import type { BuildingInput, Settings } from '../input.ts';
 import { unitFactors } from '../units.ts';
 
 import { buildGravity, buildLoadCases } from './buildLoads.ts';
+import { addGravityTransfers } from './addGravityTransfers.ts';
 import { buildOverrides } from './buildOverrides.ts';
 import { buildStories, buildStoryHeights } from './buildStories.ts';
 import { buildWalls } from './buildWalls.ts';
@@ -15,13 +16,17 @@ export function toModel(input: BuildingInput): Model {
   const heights = buildStoryHeights(tables.levels, settings);
   const walls = buildWalls(tables.walls, heights, settings);
   const stories = buildStories(heights, walls, settings);
+  const cases = buildLoadCases(tables.forces, stories, settings);
+  const overrides = buildOverrides(tables.overrides, stories, walls, settings);
+  const gravity = buildGravity(tables.gravity, stories, walls, settings);
+  addGravityTransfers(gravity, overrides, cases, walls.length);
   return {
     settings: toModelSettings(settings),
     stories,
     walls,
-    cases: buildLoadCases(tables.forces, stories, settings),
-    gravity: buildGravity(tables.gravity, stories, walls, settings),
-    overrides: buildOverrides(tables.overrides, stories, walls, settings),
+    cases,
+    gravity,
+    overrides,
   };
 }
 

@@ -15,6 +15,8 @@ export interface GravityTakedown {
   readonly fullLive: { readonly axialKip: Float64Array; readonly momentKipIn: Float64Array };
   /** factor on the reducible live load, `[story * walls + wall]`; 1 where nothing is reduced */
   readonly liveFactor: Float64Array;
+  /** live load that the reduction took off, summed at and above, kip; not in `axialKip.L` */
+  readonly reducedOffKip: Float64Array;
   /** self-weight of each story's wall alone, kip */
   readonly selfWeightKip: Float64Array;
 }
@@ -61,8 +63,9 @@ export function gravityTakedown(model: Model): GravityTakedown {
   const fullLive = { axialKip: column(), momentKipIn: column() };
   sumDown(model, gravity.full.axialKip, gravity.full.momentKipIn, fullLive.axialKip, fullLive.momentKipIn);
   const liveFactor = column().fill(1);
-  if (model.settings.liveReduction) reduceLive(model, axialKip.L, momentKipIn.L, liveFactor);
-  return { axialKip, momentKipIn, fullLive, liveFactor, selfWeightKip };
+  const reducedOffKip = column();
+  if (model.settings.liveReduction) reduceLive(model, axialKip.L, momentKipIn.L, liveFactor, reducedOffKip);
+  return { axialKip, momentKipIn, fullLive, liveFactor, reducedOffKip, selfWeightKip };
 }
 
 /** Sums of loads at and above; moments of their eccentricity and of the axial from above where the centroid moves. */
@@ -104,7 +107,13 @@ function addSelfWeight(model: Model, weights: Float64Array, axialKip: Float64Arr
 }
 
 /** Takes the reduction of 4.7.2 off the reducible part of L, by the area and the floors summed down to each story. */
-function reduceLive(model: Model, axialKip: Float64Array, momentKipIn: Float64Array, liveFactor: Float64Array): void {
+function reduceLive(
+  model: Model,
+  axialKip: Float64Array,
+  momentKipIn: Float64Array,
+  liveFactor: Float64Array,
+  reducedOffKip: Float64Array,
+): void {
   const walls = model.walls.length;
   const { reducible } = model.gravity;
   const sumAxial = new Float64Array(axialKip.length);
@@ -119,7 +128,8 @@ function reduceLive(model: Model, axialKip: Float64Array, momentKipIn: Float64Ar
       floors += reducible.floors[at] ?? 0;
       const factor = liveReductionFactor(areaIn2, floors, model.settings.kll);
       liveFactor[at] = factor;
-      axialKip[at] = (axialKip[at] ?? 0) - (1 - factor) * (sumAxial[at] ?? 0);
+      reducedOffKip[at] = (1 - factor) * (sumAxial[at] ?? 0);
+      axialKip[at] = (axialKip[at] ?? 0) - (reducedOffKip[at] ?? 0);
       momentKipIn[at] = (momentKipIn[at] ?? 0) - (1 - factor) * (sumMoment[at] ?? 0);
     }
   });

@@ -1,3 +1,4 @@
+import { gravityCases } from '../model.ts';
 import type { ForceRow, OverrideRow, WallRow } from '../../input.ts';
 
 import { listNames } from './findings.ts';
@@ -73,13 +74,28 @@ function checkNames(row: OverrideRow, index: number, known: Known, findings: Fin
       `wall reads ${wall}, which does not stand in the story below level ${level}; expected a wall that does; correct the level or the wall`,
     );
   }
+  checkCase(row, index, known.cases, findings);
+}
+
+/** A case of forces.csv, or in a transfer of axial and moment one of the gravity cases; blank is every case of forces.csv. */
+function checkCase(row: OverrideRow, index: number, cases: Known['cases'], findings: Findings): void {
   // an empty text is a case that could not be read
-  if (known.cases && row.case !== null && row.case !== '' && !known.cases.includes(row.case)) {
+  if (!cases || row.case === null || row.case === '' || cases.includes(row.case)) return;
+  const gravity = row.kind === 'transfer' && gravityCases.some((name) => name === row.case);
+  if (!gravity) {
+    const more = row.kind === 'transfer' ? ` or ${gravityCases.join(', ')}` : '';
     findings.refuse(
       'overrides',
       index,
       'case',
-      `case reads ${row.case}, expected a case of forces.csv: ${listNames(known.cases)}; correct the name or leave it blank for every case`,
+      `case reads ${row.case}, expected a case of forces.csv: ${listNames(cases)}${more}; correct the name or leave it blank for every case`,
+    );
+  } else if (row.shear !== null && row.shear !== 0) {
+    findings.refuse(
+      'overrides',
+      index,
+      'shear',
+      `shear reads ${row.shear} in a transfer of case ${row.case}, expected none: gravity has axial and moment only; clear the cell`,
     );
   }
 }
