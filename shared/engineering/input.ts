@@ -203,4 +203,15 @@ export interface Warning {
   readonly level?: string;
   readonly wall?: string;
   readonly message: string;
+  /** rows of the schedule that read `not settled` until an engineer has settled it; absent: none */
+  readonly holds?: HeldRows;
+  /** an engineer has settled it, on facts that still stand */
+  readonly settled?: true;
+}
+
+/** Rows of these walls (null: of every wall) that stand in a story from the lowest to the highest level, both included. */
+export interface HeldRows {
+  readonly walls: readonly string[] | null;
+  readonly from: string;
+  readonly to: string;
 }

@@ -2,7 +2,7 @@ import type { ResultAction, ResultDocument } from '../contracts/result.ts';
 import type { BuildingInput, Problem, Warning } from '../engineering/input.ts';
 import { checkTables } from '../engineering/model/check-tables/checkTables.ts';
 import { chain } from '../engineering/stages.ts';
-import type { Analysis, ChainOutcome, StageName } from '../engineering/stages.ts';
+import type { ChainOutcome, StageName } from '../engineering/stages.ts';
 import { unitFactors } from '../engineering/units.ts';
 import { engineVersion } from '../engineering/version.ts';
 import type { DesignRow, PinnedBand } from '../engineering/wall-design/designTypes.ts';
@@ -18,6 +18,7 @@ import {
   rigidityRows,
   transferredRows,
 } from './analysisRows.ts';
+import { collectWarnings } from './collectWarnings.ts';
 import { checkRows, envelopeRows, quantityRows, scheduleRows, wallActions } from './designRows.ts';
 import { driftCheckRows } from './driftChecks.ts';
 import type { CombinationSet } from './readCombinations.ts';
@@ -63,13 +64,7 @@ export function runBuilding(input: BuildingInput, options: RunOptions = {}): Run
   const outcome = drive(input, set, options.pinned ?? [], now, timing);
   if (!outcome.ok) return outcome;
   const writing = now();
-  const answer = write(
-    input,
-    set,
-    outcome,
-    [...(options.notices ?? []), ...checked.notices],
-    options,
-  );
+  const answer = write(input, set, outcome, [...(options.notices ?? []), ...checked.notices], options);
   timing.write = now() - writing;
   timing.total = now() - start;
   const units = unitFactors[input.settings.units];

@@ -11,7 +11,8 @@ export function unsettledRows(
   const storyOf = new Map(stories.map((story, index) => [story.level, index]));
   const topOf = new Map<string, number>();
   for (const { design } of walls) {
-    for (const { wall, from, to } of design.rows) topOf.set(JSON.stringify([wall, storyOf.get(from)]), storyOf.get(to) ?? 0);
+    for (const { wall, from, to } of design.rows)
+      topOf.set(JSON.stringify([wall, storyOf.get(from)]), storyOf.get(to) ?? 0);
   }
   const held = warnings.flatMap(({ holds, settled }) => {
     if (!holds || settled) return [];

@@ -9,27 +9,38 @@ export interface Acknowledged {
 }
 
 /**
- * A short name for the facts behind a warning: its sentence with its figures, the wall's rows, the level's row. It moves when they move;
- * an acknowledgment lapses then. Equal on page and server.
+ * A short name for the facts behind the warnings of one code, level and wall: their sentences with their figures, the wall's rows, the
+ * level's row. It moves when they move; an acknowledgment lapses then. Equal on page and server.
  */
-export function factsHash({ tables }: BuildingInput, { code, level, wall, message }: Warning): string {
-  const walls = wall === undefined ? [] : tables.walls.filter((row) => row.wall === wall).map(wallFacts);
-  const levels = tables.levels
-    .filter((row) => row.level === level)
-    .map(({ level: name, height, elevation, x, y, extent_x, extent_y, edge_x, edge_y, diaphragm }) => [
-      name,
-      height,
-      elevation,
-      x,
-      y,
-      extent_x,
-      extent_y,
-      edge_x,
-      edge_y,
-      diaphragm,
-    ]);
-  return hashText(JSON.stringify([code, level ?? null, wall ?? null, message, walls, levels]));
+export function factsHash({ tables }: BuildingInput, warnings: readonly Warning[]): string {
+  const [first] = warnings;
+  const walls = tables.walls.filter((row) => row.wall === first?.wall).map(wallFacts);
+  const levels = tables.levels.filter((row) => row.level === first?.level).map(levelFacts);
+  const messages = warnings.map(({ message }) => message);
+  return hashText(JSON.stringify([first?.code, first?.level ?? null, first?.wall ?? null, messages, walls, levels]));
 }
+
+/** Warnings that one acknowledgment settles together: those of its code, level and wall. */
+export function warningsNamed(
+  warnings: readonly Warning[],
+  { code, level, wall }: Pick<Acknowledged, 'code' | 'level' | 'wall'>,
+): Warning[] {
+  return warnings.filter(
+    (warning) => warning.code === code && (warning.level ?? null) === level && (warning.wall ?? null) === wall,
+  );
+}
+
+const levelFacts = (row: BuildingInput['tables']['levels'][number]): readonly unknown[] => [
+  row.height,
+  row.elevation,
+  row.x,
+  row.y,
+  row.extent_x,
+  row.extent_y,
+  row.edge_x,
+  row.edge_y,
+  row.diaphragm,
+];
 
 const wallFacts = (row: BuildingInput['tables']['walls'][number]): readonly unknown[] => [
   row.wall,
@@ -67,14 +78,11 @@ export function settleWarnings(
   warnings: readonly Warning[],
   acknowledged: readonly Acknowledged[],
 ): Warning[] {
-  if (acknowledged.length === 0) return [...warnings];
-  return warnings.map((warning): Warning => {
-    const named = acknowledged.filter(
-      ({ code, level, wall }) =>
-        code === warning.code && level === (warning.level ?? null) && wall === (warning.wall ?? null),
-    );
-    if (named.length === 0) return warning;
-    const facts = factsHash(input, warning);
-    return named.some((one) => one.factsHash === facts) ? { ...warning, settled: true } : warning;
-  });
+  const settled = new Set<Warning>();
+  for (const one of acknowledged) {
+    const named = warningsNamed(warnings, one);
+    if (named.length === 0 || factsHash(input, named) !== one.factsHash) continue;
+    for (const warning of named) settled.add(warning);
+  }
+  return warnings.map((warning) => (settled.has(warning) ? { ...warning, settled: true } : warning));
 }

@@ -45,13 +45,16 @@ describe('rows that wait for a decision', () => {
 
   it('are below the floor that a transfer arrives on, in every wall', () => {
     const { levels } = compute(held);
-    const warning = { code: 'transfer-not-assigned', level: 'L2', wall: 'Q2', message: 'arrives' };
+    const holds = { walls: null, from: 'L2', to: 'L2' };
+    const warning = { code: 'transfer-not-assigned', level: 'L2', wall: 'Q2', message: 'arrives', holds };
     expect(holdsRow(warning, { wall: 'P1', from: 'L2', to: 'L3' }, levels)).toBe(true);
     expect(holdsRow(warning, { wall: 'P1', from: 'L3', to: 'Roof' }, levels)).toBe(false);
   });
 
   it('name what was not designed first', () => {
-    const document = { warnings: [{ code: 'ordinary-class', message: 'Category D.' }], levels: [] };
+    const { levels } = compute(sampleInput);
+    const holds = { walls: null, from: 'L2', to: 'Roof' };
+    const document = { warnings: [{ code: 'ordinary-class', message: 'Category D.', holds }], levels };
     expect(reasonsOf({ wall: 'A', from: 'L2', to: 'L2', notDesigned: ['slenderness'] }, document)).toEqual([
       'Not designed: slenderness.',
       'Category D.',

@@ -7,16 +7,14 @@ type Levels = ResultDocument['levels'];
 const elevationOf = (levels: Levels, name: string | undefined): number | null =>
   levels.find((level) => level.level === name)?.elevation ?? null;
 
-/** Whether a warning keeps a row of the schedule from reading ok, by the rule that the engine goes by. */
-export function holdsRow(warning: Warning, row: Row, levels: Levels): boolean {
-  if (warning.code === 'ordinary-class') return true;
-  if (warning.code === 'opening-solid') return warning.wall === row.wall;
-  if (warning.code === 'transfer-not-assigned') {
-    // what arrives on a floor is missing in the stories below it, in whichever wall should take it
-    const [foot, arrival] = [elevationOf(levels, row.from), elevationOf(levels, warning.level)];
-    return foot !== null && arrival !== null && foot <= arrival;
-  }
-  return false;
+/** Whether a warning keeps a row of the schedule from reading ok: it names walls and stories, and nobody has settled it. */
+export function holdsRow({ holds, settled }: Warning, row: Row, levels: Levels): boolean {
+  if (holds === undefined || settled) return false;
+  if (holds.walls !== null && !holds.walls.includes(row.wall)) return false;
+  const [foot, top] = [elevationOf(levels, row.from), elevationOf(levels, row.to)];
+  const [from, to] = [elevationOf(levels, holds.from), elevationOf(levels, holds.to)];
+  if (foot === null || top === null || from === null || to === null) return false;
+  return foot <= to && top >= from;
 }
 
 /** Why a row is not settled, each reason in words. */

@@ -3,6 +3,7 @@ import { unitLabels } from '#shared/contracts/quantities';
 import { tableColumns, type Column, type EditableTable } from '#shared/contracts/tableColumns';
 import type { CellValue, StoredRow } from '#shared/contracts/tables';
 import { readCell } from '#shared/csv/readCell';
+import { gravityCases } from '#shared/engineering/model/model';
 
 import type { GridColumn, Parsed } from '../../components/grid/gridTypes.ts';
 import { cellEditText, cellText, columnDecimals } from './cellText.ts';
@@ -76,11 +77,15 @@ function checkReference(value: CellValue, known: readonly string[], what: string
   return { ok: false, expected: `one of the ${known.length} ${what}.${near === null ? '' : ` Nearest: ${near}`}` };
 }
 
+/** Names that may be referred to; a transfer may belong to a gravity case too. */
+const namesOf = (reference: 'levels' | 'walls' | 'cases', context: ColumnContext): readonly string[] =>
+  reference === 'cases' && context.cases.length > 0 ? [...context.cases, ...gravityCases] : context[reference];
+
 function parseCell(table: EditableTable, column: Column, context: ColumnContext, text: string, row: InputRow): Parsed {
   const reading = readCell(column, text);
   if (!reading.ok) return { ok: false, expected: expectedOf(reading.message) };
   const reference = references[table][column.name];
-  if (reference !== undefined) return checkReference(reading.value, context[reference], reference);
+  if (reference !== undefined) return checkReference(reading.value, namesOf(reference, context), reference);
   if (table === 'levels' && column.name === 'level') {
     const taken = context.rows.some((other) => other.id !== row.id && valueOf(other, 'level') === reading.value);
     if (taken) return { ok: false, expected: 'a name that no other level has' };
@@ -92,7 +97,7 @@ function choicesOf(table: EditableTable, column: Column, context: ColumnContext)
   const reference = references[table][column.name];
   if (column.choices !== undefined) return column.choices;
   if (reference === undefined || context[reference].length === 0) return undefined;
-  return context[reference];
+  return namesOf(reference, context);
 }
 
 /** The grid's columns for one input table: labels, units, limits and choices are the contract's. */

@@ -1,34 +1,46 @@
 import type { Warning } from '../input.ts';
 import type { Analysis } from '../stages.ts';
 
-/** Torsional irregularity by level, stability, and stability that could not be checked. */
-export function driftWarnings(analysis: Analysis): Warning[] {
-  const { model, drifts } = analysis;
+import { heldStories, levelOf, sayRun, storyRuns } from './storyRuns.ts';
+
+/** Torsional irregularity and stability by stories with the same verdict, and stability that could not be checked. */
+export function driftWarnings({ model, drifts }: Pick<Analysis, 'model' | 'drifts'>): Warning[] {
+  const { stories } = model;
+  const largest = (pick: (drift: (typeof drifts)[number]) => number | null): number[] =>
+    stories.map((_, story) =>
+      drifts.reduce((most, drift) => (drift.story === story ? Math.max(most, pick(drift) ?? 0) : most), 0),
+    );
+  const ratios = largest(({ torsionRatio }) => torsionRatio);
+  const thetas = largest(({ theta }) => theta);
+  const most = (values: readonly number[]): number => values.reduce((a, b) => Math.max(a, b), 0);
   const warnings: Warning[] = [];
-  model.stories.forEach((level, story) => {
-    const here = drifts.filter((drift) => drift.story === story);
-    const ratio = here.reduce((most, drift) => Math.max(most, drift.torsionRatio ?? 0), 0);
-    if (ratio > 1.2) {
-      warnings.push({
-        code: 'torsional-irregularity',
-        level: level.level,
-        message: `Torsion ratio ${ratio.toFixed(2)} at ${level.level}, above 1.2${ratio > 1.4 ? ' and above 1.4: extreme; rho 1.3 unless shown otherwise' : ''} (ASCE/SEI 7 Table 12.3-1). Accidental torsion is to be amplified by Ax in the categories that ask for it.`,
-      });
-    }
-    const theta = here.reduce((most, drift) => Math.max(most, drift.theta ?? 0), 0);
-    if (theta > 0.1) {
-      warnings.push({
-        code: 'p-delta',
-        level: level.level,
-        message: `Stability coefficient ${theta.toFixed(2)} at ${level.level}, above 0.10: P-delta has to be taken into account (ASCE/SEI 7 12.8.7).`,
-      });
-    }
-  });
+  const twisted = storyRuns(
+    stories.length,
+    (story) => ((ratios[story] ?? 0) > 1.2 ? (ratios[story] ?? 0) : null),
+    (ratio) => (ratio > 1.4 ? 'extreme' : ''),
+  );
+  for (const run of twisted) {
+    const ratio = most(run.facts);
+    warnings.push({
+      code: 'torsional-irregularity',
+      level: levelOf(stories, run),
+      message: `Torsion ratio up to ${ratio.toFixed(2)} at ${sayRun(stories, run)}, above 1.2${ratio > 1.4 ? ' and above 1.4: extreme; rho 1.3 unless shown otherwise' : ''} (ASCE/SEI 7 Table 12.3-1). Accidental torsion is to be amplified by Ax in the categories that ask for it.`,
+    });
+  }
+  for (const run of storyRuns(stories.length, (story) => ((thetas[story] ?? 0) > 0.1 ? (thetas[story] ?? 0) : null))) {
+    warnings.push({
+      code: 'p-delta',
+      level: levelOf(stories, run),
+      message: `Stability coefficient up to ${most(run.facts).toFixed(2)} at ${sayRun(stories, run)}, above 0.10: P-delta has to be taken into account and is not in these forces (ASCE/SEI 7 12.8.7).`,
+      holds: { walls: null, ...heldStories(stories, run) },
+    });
+  }
   const seismic = model.cases.some(({ kind }) => kind === 'seismic');
-  if (seismic && drifts.length > 0 && model.stories.some(({ gravityKip }) => gravityKip === null)) {
+  const missing = stories.filter(({ gravityKip }) => gravityKip === null).length;
+  if (seismic && missing > 0) {
     warnings.push({
       code: 'p-delta-not-checked',
-      message: 'P-delta not checked: floor gravity is not given for every level (column gravity of the levels).',
+      message: `P-delta not checked: floor gravity is not given for ${missing === stories.length ? 'any level' : 'every level'} (column gravity of the levels).`,
     });
   }
   return warnings;

@@ -8,6 +8,7 @@ const highSeismicCategories = ['D', 'E', 'F'];
 /** What the typed criteria leave open: each says why it matters. */
 export function criteriaWarnings(building: BuildingInput, analysis: Analysis): Warning[] {
   const { settings } = building;
+  const { stories } = analysis.model;
   const warnings: Warning[] = [];
   const seismic = analysis.model.cases.some((loadCase) => loadCase.kind === 'seismic');
   const missing = ['sds', 'sdc', 'rho'].filter((name) => !settings.given.includes(name));
@@ -21,6 +22,7 @@ export function criteriaWarnings(building: BuildingInput, analysis: Analysis): W
     warnings.push({
       code: 'ordinary-class',
       message: `Seismic design category ${settings.sdc} asks for special structural walls (ASCE/SEI 7 Table 12.2-1); these are designed as ordinary ones.`,
+      holds: { walls: null, from: stories[0]?.level ?? '', to: stories[stories.length - 1]?.level ?? '' },
     });
   }
   return warnings;

@@ -20,14 +20,3 @@ export function methodWarnings(building: BuildingInput, analysis: Analysis): War
   }
   return warnings;
 }
-
-/** Warnings that can make a wall unsafe: the rows they touch read `not settled` until an engineer has settled them. */
-export function unsettles(warning: Warning, analysis: Analysis): ((wall: string, fromStory: number) => boolean) | null {
-  if (warning.code === 'ordinary-class') return () => true;
-  if (warning.code === 'opening-solid') return (wall) => wall === warning.wall;
-  if (warning.code === 'transfer-not-assigned') {
-    const arrival = analysis.model.stories.findIndex((story) => story.level === warning.level);
-    return (_wall, fromStory) => fromStory <= arrival;
-  }
-  return null;
-}
