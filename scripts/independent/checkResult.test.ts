@@ -38,9 +38,9 @@ function check(folder: string, document: ResultDocument): { status: number | nul
   return { status: program.status, output: program.stdout + program.stderr };
 }
 
-function generate(seed: number): string {
-  const folder = join(workFolder, String(seed));
-  spawnSync(process.execPath, [join(scripts, 'generateBuilding.mjs'), String(seed), folder]);
+function generate(seed: number, generator = 'generateBuilding'): string {
+  const folder = join(workFolder, `${generator}${String(seed)}`);
+  spawnSync(process.execPath, [join(scripts, `${generator}.mjs`), String(seed), folder]);
   return folder;
 }
 
@@ -54,6 +54,15 @@ describe('the engine agrees with the independent solver', () => {
 
   it.each(Array.from({ length: 21 }, (_, index) => index + 1))('on generated building %d', (seed) => {
     const folder = generate(seed);
+    const { status, output } = check(folder, solve(folder));
+    expect(output).toContain('no difference');
+    expect(status).toBe(0);
+  });
+});
+
+describe('the engine agrees with the independent solver in every basis and option', () => {
+  it.each(Array.from({ length: 24 }, (_, index) => index + 1))('on generated building %d', (seed) => {
+    const folder = generate(seed, 'generateChain');
     const { status, output } = check(folder, solve(folder));
     expect(output).toContain('no difference');
     expect(status).toBe(0);
@@ -105,6 +114,40 @@ describe('the independent check sees a fault', () => {
       'vertical spacing',
     ],
   ];
+
+  it.each<[string, (document: ResultDocument) => ResultDocument, string]>([
+    [
+      'a drift that is a percent off',
+      (document) => ({
+        ...document,
+        drifts: document.drifts.map((row) => ({ ...row, x: row.x === null ? null : row.x * 1.01 })),
+      }),
+      'drifts',
+    ],
+    [
+      'a compatible share that is a millionth off',
+      (document) => ({
+        ...document,
+        distribution: document.distribution.map((row) =>
+          row.basis === 'compatible' ? { ...row, total: row.total * (row.wall === 'W0' ? 1 + 1e-6 : 1) } : row,
+        ),
+      }),
+      'residual of force x, compatible',
+    ],
+    [
+      'an envelope that is not the worst',
+      (document) => ({
+        ...document,
+        checks: document.checks.map((row) => (row.basis === 'envelope' ? { ...row, ratio: 0 } : row)),
+      }),
+      'not the worst of its bases',
+    ],
+  ])('%s', (_, spoil, sign) => {
+    const folder = generate(4, 'generateChain');
+    const { status, output } = check(folder, spoil(solve(folder)));
+    expect(output).toContain(sign);
+    expect(status).toBe(1);
+  });
 
   it.each(faults)('%s', (_, spoil, sign) => {
     const folder = generate(2);

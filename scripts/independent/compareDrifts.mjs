@@ -1,5 +1,3 @@
-import { ownUnits } from './siUnits.mjs';
-
 /** Table 12.12-1 for buildings that are neither masonry nor low with tolerant partitions. */
 const seismicLimits = { I: 0.02, II: 0.02, III: 0.015, IV: 0.01 };
 

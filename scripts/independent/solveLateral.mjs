@@ -103,6 +103,8 @@ export function takeDown(building, load, shares) {
     for (let i = wall.to; i >= wall.from; i -= 1) {
       const extra = load === null ? { shear: 0, axial: 0, moment: 0 } : transferAt(building, load, wall.name, i);
       const shear = at.get(`${String(i)} ${wall.name}`).total + extra.shear;
+      const [here, above] = [wall.segments.get(i), wall.segments.get(i + 1)];
+      if (above !== undefined) moment += axial * ((above.x - here.x) * here.c + (above.y - here.y) * here.s);
       axial += extra.axial;
       moment += shear * building.stories[i].height + extra.moment;
       lateral.push({ story: i, wall: wall.name, shear, moment, axial });
