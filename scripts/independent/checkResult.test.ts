@@ -61,7 +61,7 @@ describe('the engine agrees with the independent solver', () => {
 });
 
 describe('the engine agrees with the independent solver in every basis and option', () => {
-  it.each(Array.from({ length: 24 }, (_, index) => index + 1))('on generated building %d', (seed) => {
+  it.each(Array.from({ length: 60 }, (_, index) => index + 1))('on generated building %d', (seed) => {
     const folder = generate(seed, 'generateChain');
     const { status, output } = check(folder, solve(folder));
     expect(output).toContain('no difference');
@@ -143,7 +143,7 @@ describe('the independent check sees a fault', () => {
       'not the worst of its bases',
     ],
   ])('%s', (_, spoil, sign) => {
-    const folder = generate(4, 'generateChain');
+    const folder = generate(6, 'generateChain');
     const { status, output } = check(folder, spoil(solve(folder)));
     expect(output).toContain(sign);
     expect(status).toBe(1);
