@@ -1,6 +1,7 @@
 import type { Drawing, DrawingElement } from './elements.ts';
 import { boxAround, type LabelBox } from './labelBoxes.ts';
 import { drawCenters } from './planCenters.ts';
+import { drawDisplaced } from './planDisplaced.ts';
 import { drawPlanLegend, drawSlab } from './planFurniture.ts';
 import { drawPlanLabels } from './planLabels.ts';
 import { planScale, type PlanScale } from './planScale.ts';
@@ -108,6 +109,7 @@ export function drawPlan(input: PlanInput): Drawing {
     height: scale.height,
     elements: [
       ...drawSlab(input, scale),
+      ...drawDisplaced(input, scale),
       ...placed.flatMap((one) => drawPlanWall(one, one.wall.name === input.chosenWall)),
       ...arrows.flatMap((arrow) => arrow.elements),
       ...centers.under,

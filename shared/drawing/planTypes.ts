@@ -20,6 +20,13 @@ export interface PlanWall {
   readonly share: number | null;
 }
 
+/** Of the floor at the level's own point, in the plan's unit of length, and radians counterclockwise. */
+export interface PlanDisplacement {
+  readonly x: number;
+  readonly y: number;
+  readonly rotation: number;
+}
+
 export interface PlanInput {
   readonly units: UnitSystem;
   /** px to draw in */
@@ -33,4 +40,6 @@ export interface PlanInput {
   /** story shear of the case; the text stands at the head of its arrow */
   readonly force: { readonly x: number; readonly y: number; readonly text: string; readonly note: string } | null;
   readonly chosenWall: string | null;
+  /** draws the slab as the case moves it, exaggerated */
+  readonly displaced?: PlanDisplacement;
 }

@@ -7,7 +7,9 @@ import { formatForce, formatMoment } from '#shared/format/force';
 import { minusSign } from '#shared/format/number';
 
 import { closedResidual } from '../../app/balanceInView.ts';
+import type { ShareSum } from '../../app/shareSums.ts';
 import { Section } from '../../components/ui/Section.tsx';
+import type { BasisResidual } from './storyBalances.ts';
 
 type Line = ResultBalance['lines'][number]['line'];
 
@@ -28,15 +30,22 @@ const names: Readonly<Record<Line, string>> = {
 export interface BalanceTableProps {
   /** of the case in view, and of every gravity case: the four lines of a story */
   balances: readonly ResultBalance[];
+  /** of every basis; the one in view is told line by line */
+  residuals: readonly BasisResidual[];
+  /** shares that do not add up to what is resisted */
+  lost: ShareSum | null;
   title: string;
   units: UnitSystem;
   children?: ReactNode;
 }
 
-/** Applied against resisted at the story: force, torque, overturning and vertical, with the residual of the whole. */
-export function BalanceTable({ balances, title, units, children }: BalanceTableProps): ReactElement {
-  const residual = balances.reduce((worst, one) => Math.max(worst, Math.abs(one.residual)), 0);
-  const closed = residual <= closedResidual;
+/** lines that stand beside the balance: nothing has to close in them */
+const informs = (line: Line): boolean =>
+  line.startsWith('transfers') || line.startsWith('sideways') || line === 'torque left open';
+
+/** Applied against resisted at the story: force, torque, overturning and vertical, with the residual of every basis. */
+export function BalanceTable({ balances, residuals, lost, title, units, children }: BalanceTableProps): ReactElement {
+  const broken = residuals.filter((one) => one.residual > closedResidual);
   const lines = balances.flatMap((balance) =>
     balance.lines.map((one) => ({
       ...one,
@@ -45,6 +54,11 @@ export function BalanceTable({ balances, title, units, children }: BalanceTableP
   );
   return (
     <Section title={title} aside="applied against the sum over the walls">
+      {broken.length === 0 && lost === null ? null : (
+        <p className="gw-problem mt-2 font-semibold text-oxide" role="alert">
+          {sayBroken(broken, lost, units)}
+        </p>
+      )}
       <table className="gw-table">
         <thead>
           <tr>
@@ -57,7 +71,7 @@ export function BalanceTable({ balances, title, units, children }: BalanceTableP
         </thead>
         <tbody>
           {lines.map(({ name, line, applied, resisted }) => {
-            const isMoment = line === 'torque' || line.startsWith('overturning');
+            const isMoment = line.startsWith('torque') || line.startsWith('overturning');
             const print = isMoment ? formatMoment : formatForce;
             return (
               <tr key={name}>
@@ -65,21 +79,25 @@ export function BalanceTable({ balances, title, units, children }: BalanceTableP
                   {name}
                 </th>
                 <td className="num">{print(applied)}</td>
-                <td className="num">{print(resisted)}</td>
-                <td className="num">{sayResidual(resisted - applied)}</td>
+                <td className="num">{informs(line) ? 'informs' : print(resisted)}</td>
+                <td className="num">{informs(line) ? '–' : sayResidual(resisted - applied)}</td>
                 <td className="pl-3 text-graphite">{unitLabels[isMoment ? 'moment' : 'force'][units]}</td>
               </tr>
             );
           })}
         </tbody>
         <tfoot>
-          <tr>
-            <th scope="row" colSpan={3}>
-              Residual
-            </th>
-            <td className={`num ${closed ? '' : 'gw-problem text-oxide'}`}>{sayResidual(residual)}</td>
-            <td className="pl-3 font-normal text-graphite">{closed ? 'closed' : 'broken'}</td>
-          </tr>
+          {residuals.map(({ basis, residual }) => (
+            <tr key={basis}>
+              <th scope="row" colSpan={3}>
+                Residual, {basis}
+              </th>
+              <td className={`num ${residual <= closedResidual ? '' : 'gw-problem text-oxide'}`}>
+                {sayResidual(residual)}
+              </td>
+              <td className="pl-3 font-normal text-graphite">{residual <= closedResidual ? 'closed' : 'broken'}</td>
+            </tr>
+          ))}
         </tfoot>
       </table>
       <p className="note mt-2">
@@ -88,6 +106,15 @@ export function BalanceTable({ balances, title, units, children }: BalanceTableP
       {children}
     </Section>
   );
+}
+
+function sayBroken(broken: readonly BasisResidual[], lost: ShareSum | null, units: UnitSystem): string {
+  const sentences = broken.map((one) => `${one.basis} leaves ${sayResidual(one.residual)} open`);
+  if (lost !== null)
+    sentences.push(
+      `${lost.basis} shares at ${lost.level} add up to ${formatForce(lost.sum)} in ${lost.direction}, resisted are ${formatForce(lost.resisted)} ${unitLabels.force[units]}`,
+    );
+  return `Balance broken: ${sentences.join('; ')}. A load is lost on the way; do not use the figures of this case.`;
 }
 
 /** A difference that is rounding reads in powers of ten, not as a row of zeros. */

@@ -1,16 +1,14 @@
-import type { ReactElement } from 'react';
+import { useMemo, useState, type ReactElement } from 'react';
 
-import { unitLabels } from '#shared/contracts/quantities';
 import type { ResultDocument } from '#shared/contracts/result';
 import type { TableResource } from '#shared/contracts/tables';
-import { placeStackWalls } from '#shared/drawing/placeStackWalls';
-import { forceDecimals, formatForce, formatShare } from '#shared/format/force';
 import { formatPlanLength } from '#shared/format/length';
 
+import { balanceInView } from '../../app/balanceInView.ts';
 import { PageFrame } from '../../app/PageFrame.tsx';
 import { useBuildingId } from '../../app/useBuildingId.ts';
+import { useCanEdit } from '../../app/useCanEdit.ts';
 import { useChoice } from '../../app/useChoice.ts';
-import { Plan } from '../../components/drawing/Plan.tsx';
 import {
   leadingWall,
   levelsDown,
@@ -19,7 +17,6 @@ import {
   type ResultChoice,
 } from '../../components/drawing/resultChoice.ts';
 import { ResultGate } from '../../components/drawing/ResultGate.tsx';
-import { Stack } from '../../components/drawing/Stack.tsx';
 import { useWallKey } from '../../components/drawing/useWallKey.ts';
 import { Segments } from '../../components/ui/Segments.tsx';
 import { StateNote } from '../../components/ui/StateNote.tsx';
@@ -28,14 +25,22 @@ import { WarningList } from '../../components/warnings/WarningList.tsx';
 import { useBuilding, useTable } from '../../data/queries.ts';
 import { useComparison } from '../../engine/useComparison.ts';
 import { BalanceTable } from './BalanceTable.tsx';
-import { DriftNote } from './DriftNote.tsx';
+import { BasesTable } from './BasesTable.tsx';
+import { DistributionStack } from './DistributionStack.tsx';
+import { DriftTable } from './DriftTable.tsx';
+import { EnvelopeButton } from './EnvelopeButton.tsx';
+import { levelDrifts, totalWindDrift } from './levelDrifts.ts';
 import { RecomputeLine } from './RecomputeLine.tsx';
+import { RigidityPanel } from './RigidityPanel.tsx';
 import { sayCenters } from './sayCenters.ts';
 import { ShareTable } from './ShareTable.tsx';
-import { storyBalances } from './storyBalances.ts';
+import { quantityTexts, stackQuantities, type StackQuantity } from './stackQuantity.ts';
+import { basisResiduals, storyBalances } from './storyBalances.ts';
+import { storyBases } from './storyBases.ts';
+import { StoryPlan } from './StoryPlan.tsx';
 import { storyShares, type WallShare } from './storyShares.ts';
-
-const planWidth = 690;
+import { WallBasesSection } from './WallBasesSection.tsx';
+import { wallUnderBases } from './wallUnderBases.ts';
 
 /** What every wall takes of each story, and that nothing was lost. */
 export function DistributionPage(): ReactElement {
@@ -71,36 +76,53 @@ interface ShownProps {
 
 function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
   const [choice, choose] = useChoice();
+  const [quantity, setQuantity] = useState<StackQuantity>('shear');
   const { units } = document;
-  const accidental = useBuilding(id).data?.accidental ?? 0;
+  const building = useBuilding(id).data;
+  const canEdit = useCanEdit();
+  const accidental = building?.accidental ?? 0;
   const forces = useTable(id, 'forces').data?.rows;
   const comparison = useComparison(id, document);
   const seismic = forces?.find((row) => row.case === chosen.case)?.kind === 'seismic';
   const massName = seismic ? 'center of mass' : 'point of the force';
   const { level } = chosen;
+  const down = levelsDown(document);
   const shares = storyShares(document, walls.rows, { ...chosen, level: level.level });
-  const wall = wallInView(shares.walls, choice.wall, leadingWall(document, chosen));
+  const inView = { ...chosen, variant: choice.variant, level: level.level };
+  const bases = storyBases(document, walls.rows, inView);
+  const drifts = levelDrifts(document, down, inView);
+  const leading = leadingWall(document, { ...chosen, basis: chosen.bases[0] ?? chosen.basis });
+  const wall = wallInView(shares.walls, choice.wall, leading);
   const chooseWall = (name: string): void => choose({ wall: name });
+  const chooseLevel = (name: string): void => choose({ level: name });
   useWallKey(
     shares.walls.map((one) => one.wall),
     wall,
     chooseWall,
   );
-  const force = unitLabels.force[units];
-  const perThickness = units === 'us' ? 1 / 12 : 1 / 1000;
   const balances = storyBalances(document, chosen);
-  const sayWall = (name: string): string => {
-    const share = shares.walls.find((one) => one.wall === name);
-    if (!share) return name;
-    return `${name}, ${formatForce(share.total)} ${force}${share.share === null ? '' : `, ${formatShare(share.share)}`}`;
-  };
+  const lost = useMemo(
+    () => balanceInView(document, { case: chosen.case }, walls.rows)?.lost ?? null,
+    [document, chosen.case, walls.rows],
+  );
+  const variantText = sayVariant(chosen.variant, accidental);
   return (
     <PageFrame
       title="Distribution"
       sub={sayCenters(level, massName, units)}
+      actions={canEdit && building ? <EnvelopeButton building={building} /> : null}
       stackTitle={level.level}
       stackSub={sayStory(document, chosen)}
-      stack={<ShearStack document={document} walls={walls} chosen={chosen} wall={wall} />}
+      stack={
+        <DistributionStack
+          document={document}
+          walls={walls}
+          chosen={chosen}
+          wall={wall}
+          drifts={drifts}
+          quantity={quantity}
+        />
+      }
       keys={[
         { keys: ['↑', '↓'], does: 'story' },
         { keys: ['W'], does: 'next wall' },
@@ -123,58 +145,101 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
                 onChoose={(variant) => choose({ variant })}
               />
             ) : null}
+            {chosen.bases.length > 1 ? (
+              <Segments
+                label="Basis"
+                options={bases.bases.map((one) => ({ value: one, text: one }))}
+                value={chosen.basis}
+                onChoose={(basis) => choose({ basis })}
+              />
+            ) : null}
+            <Segments
+              label="Bars of the stack"
+              options={stackQuantities.map((one) => ({ value: one, text: quantityTexts[one] }))}
+              value={quantity}
+              onChoose={setQuantity}
+            />
           </div>
-          <Plan
-            input={{
-              units,
-              width: planWidth,
-              extent: level.extent,
-              walls: shares.walls.map((one) => ({
-                ...one.geometry,
-                name: one.wall,
-                thickness: one.geometry.thickness * perThickness,
-                direct: one.direct,
-                torsional: one.torsional,
-                total: one.total,
-                share: one.share,
-              })),
-              mass: level.point,
-              massName,
-              rigidity: level.rigidity,
-              force: {
-                x: shares.vx,
-                y: shares.vy,
-                text: `${formatForce(shares.size)} ${force}`,
-                note: `story shear, ${chosen.case}`,
-              },
-              chosenWall: wall,
-            }}
-            sayWall={sayWall}
+          <StoryPlan
+            document={document}
+            chosen={{ ...chosen, variant: choice.variant }}
+            shares={shares}
+            drift={drifts.find((one) => one.level === level.level)}
+            massName={massName}
+            wall={wall}
             onChooseWall={chooseWall}
           />
         </div>
+        <BasesTable
+          bases={bases}
+          units={units}
+          level={level.level}
+          caseName={chosen.case}
+          chosenBasis={chosen.basis}
+          onChooseBasis={(basis) => choose({ basis })}
+          chosenWall={wall}
+          onChooseWall={chooseWall}
+        >
+          <p className="note mt-2 max-w-[68ch] pl-2">{sayUse(document)}</p>
+        </BasesTable>
+      </div>
+      <div className="mt-4 grid items-start gap-5 min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
         <ShareTable
           shares={shares}
           units={units}
           level={level.level}
           caseName={chosen.case}
+          basis={chosen.basis}
           chosenWall={wall}
           onChooseWall={chooseWall}
         />
-      </div>
-      <div className="mt-4 grid gap-5 min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
         {balances.length > 0 ? (
-          <BalanceTable balances={balances} title={`Balance, ${level.level}, ${chosen.case}`} units={units}>
+          <BalanceTable
+            balances={balances}
+            residuals={basisResiduals(document, chosen)}
+            lost={lost}
+            title={`Balance, ${level.level}, ${chosen.case}`}
+            units={units}
+          >
             <RecomputeLine comparison={comparison} />
           </BalanceTable>
         ) : null}
-        <DriftNote warnings={document.warnings} />
       </div>
-      <div className="mt-4">
+      <div className="mt-4 grid gap-4">
+        {wall !== null && bases.bases.length > 1 ? (
+          <WallBasesSection
+            wall={wall}
+            caseText={`${chosen.case}${chosen.variants.length > 1 ? `, ${variantText}` : ''}`}
+            down={down}
+            bases={bases.bases}
+            rows={wallUnderBases(document, down, wall, { ...inView, bases: bases.bases })}
+            units={units}
+            chosenLevel={level.level}
+            onChooseLevel={chooseLevel}
+          />
+        ) : null}
+        <DriftTable
+          rows={drifts}
+          total={totalWindDrift(document)}
+          caseText={`${chosen.case}${chosen.variants.length > 1 ? `, ${variantText}` : ''}`}
+          warnings={document.warnings}
+          chosenLevel={level.level}
+          onChooseLevel={chooseLevel}
+        />
+        <RigidityPanel buildingId={id} level={level.level} chosenWall={wall} onChooseWall={chooseWall} />
         <WarningList warnings={weighWarnings(document)} />
       </div>
     </PageFrame>
   );
+}
+
+/** What the building does with the bases that it has. */
+function sayUse({ basis }: ResultDocument): string {
+  const own = basis.filter((one) => one !== 'envelope');
+  if (own.length < 2) return `The building has one basis, ${own[0] ?? ''}. Another can be added in its settings.`;
+  return basis.includes('envelope')
+    ? 'The envelope is in use: of each check the worst basis is listed, never mixed between bases.'
+    : 'Every check runs for each basis and the worse governs. The envelope lists the worst of each check on its own.';
 }
 
 /** The wall of the address, else the page's leading wall, else the one with the largest share here. */
@@ -188,32 +253,4 @@ function sayStory(document: ResultDocument, { level }: ResultChoice): string {
   const unit = document.units === 'us' ? 'ft' : 'm';
   const print = (length: number): string => `${formatPlanLength(length, document.units)} ${unit}`;
   return `elevation ${print(level.elevation)}, story ${print(level.height)}`;
-}
-
-function ShearStack({ document, walls, chosen, wall }: Omit<ShownProps, 'id'> & { wall: string | null }): ReactElement {
-  const [, choose] = useChoice();
-  const levels = levelsDown(document);
-  const shears = levels.map((level) => {
-    const { vx = 0, vy = 0 } = level.shear[chosen.case] ?? {};
-    return Math.sqrt(vx * vx + vy * vy);
-  });
-  const decimals = forceDecimals(shears);
-  return (
-    <Stack
-      stories={levels.map((level, index) => ({
-        level: level.level,
-        elevation: level.elevation,
-        height: level.height,
-        value: shears[index] ?? 0,
-        text: formatForce(shears[index] ?? 0, decimals),
-      }))}
-      walls={placeStackWalls(levels, walls.rows)}
-      caption={`Story shear ${chosen.case}`}
-      unit={unitLabels.force[document.units]}
-      units={document.units}
-      chosen={chosen.level.level}
-      onChoose={(level) => choose({ level })}
-      chosenWall={wall}
-    />
-  );
 }

@@ -1,6 +1,7 @@
 import type { ResultBalance, ResultDocument } from '#shared/contracts/result';
+import type { Basis } from '#shared/engineering/input';
 
-import type { ResultChoice } from '../../components/drawing/resultChoice.ts';
+import { variantUnder, type ResultChoice } from '../../components/drawing/resultChoice.ts';
 
 /** The case in view at its story, then the vertical line of each gravity case that brings anything there. */
 export function storyBalances(document: ResultDocument, chosen: ResultChoice): readonly ResultBalance[] {
@@ -12,4 +13,18 @@ export function storyBalances(document: ResultDocument, chosen: ResultChoice): r
       one.lines.some((line) => line.applied !== 0 || line.resisted !== 0),
   );
   return [...lateral, ...vertical];
+}
+
+export interface BasisResidual {
+  readonly basis: Basis;
+  readonly residual: number;
+}
+
+/** The residual of the case at its story under every basis, gravity cases with it. */
+export function basisResiduals(document: ResultDocument, chosen: ResultChoice): readonly BasisResidual[] {
+  return chosen.bases.map((basis) => {
+    const variant = variantUnder(document, basis, chosen.case, chosen.variant);
+    const balances = storyBalances(document, { ...chosen, basis, variant });
+    return { basis, residual: balances.reduce((worst, one) => Math.max(worst, Math.abs(one.residual)), 0) };
+  });
 }

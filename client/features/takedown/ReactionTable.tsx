@@ -4,6 +4,7 @@ import { unitLabels } from '#shared/contracts/quantities';
 import type { UnitSystem } from '#shared/engineering/input';
 import { forceDecimals, formatForce, formatMoment } from '#shared/format/force';
 
+import { WallButton } from '../../components/drawing/WallButton.tsx';
 import { Section } from '../../components/ui/Section.tsx';
 import { gravityCases, type GravityCase } from './wallStories.ts';
 
@@ -67,17 +68,7 @@ export function ReactionTable(props: ReactionTableProps): ReactElement {
               onClick={() => onChooseWall(one.wall)}
             >
               <th scope="row">
-                <button
-                  type="button"
-                  className="-my-[2px] min-h-[24px] min-w-[24px] px-2 text-left font-medium hover:underline"
-                  aria-pressed={one.wall === chosenWall}
-                  onClick={(event) => {
-                    event.stopPropagation();
-                    onChooseWall(one.wall);
-                  }}
-                >
-                  {one.wall}
-                </button>
+                <WallButton wall={one.wall} chosen={one.wall === chosenWall} onChoose={onChooseWall} />
                 {one.atBase ? null : <small className="text-note font-normal text-graphite">from {one.level}</small>}
               </th>
               {shown.map((name) => (

@@ -4,6 +4,7 @@ import { describe, expect, it } from 'vitest';
 
 import { fakeServer } from '../../app/testing/fakeServer.ts';
 import { renderAt } from '../../app/testing/renderAt.tsx';
+import { threeBases } from '../../components/drawing/testing/threeBases.ts';
 import { sample } from '../../engine/testing/sampleBuilding.ts';
 import { computedAnswers } from '../../engine/testing/sampleServer.ts';
 
@@ -51,5 +52,73 @@ describe('TakedownPage', () => {
     const stories = await screen.findByRole('region', { name: 'P1, story by story' });
     await userEvent.click(within(stories).getByRole('rowheader', { name: 'L3' }));
     expect(router.state.location.search).toContain('level=L3');
+  });
+});
+
+describe('TakedownPage under several bases', () => {
+  const answers = () => ({ ...computedAnswers(), 'GET /api/buildings/b1/results': { body: threeBases } });
+
+  it('lays the bases over each other and says what governs by keys', async () => {
+    fakeServer(answers());
+    const { router } = renderAt(address);
+    const figure = await screen.findByRole('figure', { name: 'Down the height' });
+    for (const basis of ['rigid', 'flexible', 'compatible']) expect(within(figure).getAllByText(basis)).toHaveLength(2);
+    const governs = screen.getByRole('region', { name: 'What governs' });
+    expect(governs).toHaveTextContent('P1 at L2, what governs under rigid');
+    within(figure).getByRole('listbox', { name: 'Down the wall' }).focus();
+    await userEvent.keyboard('{ArrowUp}');
+    expect(router.state.location.search).toContain('level=L3');
+    expect(governs).toHaveTextContent('P1 at L3, what governs under rigid');
+    // 1.4 x (80 kip typed + 24 ft x 1 ft x 24 ft x 0.15 kcf) against 1.2 x 166.4 + 1.6 x 20 = 231.7
+    expect(within(governs).getByRole('rowheader', { name: 'Pmax' }).closest('tr')).toHaveTextContent(
+      /233\.0 kip.*1\.4D, rigid/,
+    );
+  });
+
+  it('follows the pointer without choosing', async () => {
+    fakeServer(answers());
+    const { router } = renderAt(address);
+    const figure = await screen.findByRole('figure', { name: 'Down the height' });
+    await userEvent.hover(within(figure).getByRole('option', { name: /^Roof/ }));
+    expect(screen.getByRole('region', { name: 'What governs' })).toHaveTextContent('P1 at Roof, what governs');
+    expect(router.state.location.search).toContain('level=L2');
+  });
+
+  it('gives the foundation its reactions, and each floor its collectors', async () => {
+    fakeServer(answers());
+    renderAt(address);
+    const foundation = await screen.findByRole('region', { name: 'Reactions for the foundation' });
+    expect(within(foundation).getByRole('button', { name: 'P1' })).toBeInTheDocument();
+    const collectors = screen.getByRole('region', { name: 'Collectors' });
+    // half of 60 kip
+    expect(within(collectors).getByRole('rowheader', { name: 'Roof' }).closest('tr')).toHaveTextContent('30.0');
+    const foot = screen.getByRole('region', { name: 'P1 at its foot, L2, by case and basis' });
+    expect(within(foot).getAllByRole('rowheader', { name: 'EY' })).toHaveLength(3);
+    // 3 x 40 kip typed, 24 ft x 1 ft x 39 ft x 0.15 kcf
+    expect(
+      await screen.findByText(/P1: dead 260.4 kip at its foot, 120.0 of it typed, 140.4 self-weight/),
+    ).toBeInTheDocument();
+  });
+
+  it('lists what engineers assigned on lines of its own', async () => {
+    const rows = [
+      {
+        id: 'o1',
+        version: 1,
+        kind: 'transfer',
+        level: 'L3',
+        wall: 'P1',
+        case: 'EY',
+        shear: 12,
+        axial: null,
+        moment: null,
+        share: null,
+        reason: 'Wall above the lobby',
+      },
+    ];
+    fakeServer({ ...answers(), 'GET /api/buildings/b1/overrides': { body: { rows, version: 1, seq: 7 } } });
+    renderAt(address);
+    const assigned = await screen.findByRole('region', { name: 'Transfers and assigned shares' });
+    expect(within(assigned).getByText('Wall above the lobby').closest('tr')).toHaveTextContent('L3P1EY–12.0');
   });
 });

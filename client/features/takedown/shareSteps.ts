@@ -46,5 +46,15 @@ export function shareSteps(
       added: true,
     });
   }
-  return [...steps, { text: `Wall shear, ${chosen.basis}`, value: row.total, added: false }];
+  const lateral = document.lateral.find(
+    (one) =>
+      one.wall === wall &&
+      one.level === level &&
+      one.case === chosen.case &&
+      one.basis === chosen.basis &&
+      one.variant === chosen.variant,
+  );
+  const own = lateral?.shear ?? row.total;
+  if (own !== row.total) steps.push({ text: 'Assigned by transfers', value: own - row.total, added: true });
+  return [...steps, { text: `Wall shear, ${chosen.basis}`, value: own, added: false }];
 }
