@@ -92,9 +92,13 @@ function drawMarks(
   return [{ shape: 'circle', cx: xOf(value), cy: round2(y), r: 3.5, fill: 'sheet', stroke: 'ink', strokeWidth: 1.5 }];
 }
 
-/** Where the legend has its room: in the upper right, or beside a zero line that stands inside. */
-function legendSpan(zero: number): { readonly x: number; readonly right: number } {
-  if (zero <= 72) return { x: 84, right: heightDiagramWidth - 4 };
+const legendLine = 26;
+
+/** Where the legend has its room: in the upper right, wider where its words ask for it, or beside a zero line that stands inside. */
+function legendSpan(zero: number, curves: readonly HeightCurve[]): { readonly x: number; readonly right: number } {
+  const right = heightDiagramWidth - 4;
+  const words = curves.map((curve) => legendLine + textWidth(curve.name, 12) + 8 + textWidth(curve.text, 12, 600));
+  if (zero <= 72) return { x: Math.max(zero + 8, Math.min(84, Math.floor(right - Math.max(...words)))), right };
   if (zero <= heightDiagramWidth / 2) return { x: zero + 12, right: heightDiagramWidth - 4 };
   return { x: 4, right: zero - 12 };
 }
@@ -102,7 +106,7 @@ function legendSpan(zero: number): { readonly x: number; readonly right: number 
 /** Legend with the values of the chosen story; sheet behind it, so that no line runs through. */
 function drawLegend(input: HeightDiagramInput, zero: number): DrawingElement[] {
   if (input.curves.length === 0) return [];
-  const { x, right } = legendSpan(zero);
+  const { x, right } = legendSpan(zero, input.curves);
   const top = 28;
   const height = 16 * input.curves.length + (input.chosenNote === '' ? 4 : 20);
   const elements: DrawingElement[] = [{ shape: 'rect', x: x - 4, y: top, width: right - x + 8, height, fill: 'sheet' }];
@@ -114,7 +118,7 @@ function drawLegend(input: HeightDiagramInput, zero: number): DrawingElement[] {
   for (const curve of input.curves) {
     elements.push(
       { shape: 'line', x1: x, y1: y - 4, x2: x + 20, y2: y - 4, stroke: 'ink', ...lines[curve.style] },
-      { shape: 'text', x: x + 26, y, text: curve.name, size: 12, fill: 'ink' },
+      { shape: 'text', x: x + legendLine, y, text: curve.name, size: 12, fill: 'ink' },
       {
         shape: 'text',
         x: right,

@@ -110,7 +110,17 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
     <PageFrame
       title="Distribution"
       sub={sayCenters(level, massName, units)}
-      actions={canEdit && building ? <EnvelopeButton building={building} /> : null}
+      actions={
+        <>
+          <Segments
+            label="Bars of the stack"
+            options={stackQuantities.map((one) => ({ value: one, text: quantityTexts[one] }))}
+            value={quantity}
+            onChoose={setQuantity}
+          />
+          {canEdit && building ? <EnvelopeButton building={building} /> : null}
+        </>
+      }
       stackTitle={level.level}
       stackSub={sayStory(document, chosen)}
       stack={
@@ -153,12 +163,6 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
                 onChoose={(basis) => choose({ basis })}
               />
             ) : null}
-            <Segments
-              label="Bars of the stack"
-              options={stackQuantities.map((one) => ({ value: one, text: quantityTexts[one] }))}
-              value={quantity}
-              onChoose={setQuantity}
-            />
           </div>
           <StoryPlan
             document={document}
@@ -234,12 +238,14 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
 }
 
 /** What the building does with the bases that it has. */
-function sayUse({ basis }: ResultDocument): string {
+function sayUse({ basis, warnings }: ResultDocument): string {
   const own = basis.filter((one) => one !== 'envelope');
   if (own.length < 2) return `The building has one basis, ${own[0] ?? ''}. Another can be added in its settings.`;
-  return basis.includes('envelope')
+  const left = warnings.filter((one) => one.code === 'basis-unavailable').map((one) => ` ${one.message}`);
+  const use = basis.includes('envelope')
     ? 'The envelope is in use: of each check the worst basis is listed, never mixed between bases.'
     : 'Every check runs for each basis and the worse governs. The envelope lists the worst of each check on its own.';
+  return `${use}${left.join('')}`;
 }
 
 /** The wall of the address, else the page's leading wall, else the one with the largest share here. */

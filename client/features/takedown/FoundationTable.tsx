@@ -85,7 +85,9 @@ export function FoundationTable({ rows, units, chosenWall, onChooseWall }: Found
                     </>
                   )}
                 </td>
-                <td className={row.lifts ? 'font-semibold' : 'text-graphite'}>{row.lifts ? 'one edge' : 'none'}</td>
+                <td className={row.lifts ? 'font-semibold whitespace-nowrap!' : 'text-graphite'}>
+                  {row.lifts ? 'one edge' : 'none'}
+                </td>
               </tr>
             ))}
           </tbody>

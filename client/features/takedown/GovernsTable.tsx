@@ -15,8 +15,8 @@ export interface GovernsTableProps {
 const effects: Readonly<Record<Effect, string>> = {
   Pmax: 'Pmax',
   Pmin: 'Pmin',
-  moment: 'Moment, largest',
-  shear: 'Shear, largest',
+  moment: 'Moment',
+  shear: 'Shear',
 };
 
 /** What governs a story of the wall: value and combination of each effect. It follows pointer and keys in the diagrams. */
@@ -31,7 +31,7 @@ export function GovernsTable({ title, rows, units }: GovernsTableProps): ReactEl
           <tbody>
             {rows.map(({ effect, value, action }) => (
               <tr key={effect}>
-                <th scope="row" className="font-normal">
+                <th scope="row" className="align-top! font-normal">
                   {effects[effect]}
                 </th>
                 <td className="num font-medium whitespace-nowrap!">
