@@ -12,9 +12,10 @@ function generator(seed: number): () => number {
 
 /**
  * A seeded building for measuring: walls both ways at scattered places, every fifth one cut off at half height, two thickness
- * steps, two wind and two seismic cases each way, gravity on every wall and level. US units.
+ * steps, two wind and two seismic cases each way, gravity on every wall and level. Wind cases, 30 % orthogonal and amplified accidental
+ * eccentricity unless `plain`. US units.
  */
-export function generateBuilding(levelCount: number, wallCount: number, seed: number): BuildingInput {
+export function generateBuilding(levelCount: number, wallCount: number, seed: number, plain = false): BuildingInput {
   const random = generator(seed);
   const between = (low: number, high: number) => Math.round((low + (high - low) * random()) * 10) / 10;
   const names = Array.from({ length: levelCount }, (_, index) => `N${index + 1}`);
@@ -94,7 +95,11 @@ export function generateBuilding(levelCount: number, wallCount: number, seed: nu
       });
     }
   }
-  const reading = readSettings({ name: `Bench ${levelCount} x ${wallCount}`, units: 'us', sds: 0.3, sdc: 'C', rho: 1 });
+  const ways = plain ? { basis: ['rigid'] } : { windCases: true, orthogonal: 0.3, accidental: 0.05, amplify: true };
+  const reading = readSettings({
+    ...{ name: `Bench ${levelCount} x ${wallCount}`, units: 'us', sds: 0.3, sdc: 'C', rho: 1 },
+    ...ways,
+  });
   if (!reading.ok) throw new Error('the bench settings were refused');
   return { settings: reading.settings, tables: { levels, walls, forces, gravity, combinations: [], overrides: [] } };
 }
