@@ -19,6 +19,7 @@ import { refuseOtherBodies } from './http/refuseOtherBodies.ts';
 import { requestLog } from './http/requestLog.ts';
 import { securityHeaders } from './http/securityHeaders.ts';
 import { servePages } from './http/servePages.ts';
+import { acknowledgmentsRoutes } from './routes/acknowledgments/acknowledgments.routes.ts';
 import { buildingsRoutes } from './routes/buildings/buildings.routes.ts';
 import { healthRoutes } from './routes/health/health.routes.ts';
 import { resultsRoutes } from './routes/results/results.routes.ts';
@@ -67,6 +68,7 @@ export function createApp(dependencies: AppDependencies): App {
   uploadsRoutes(api, services);
   resultsRoutes(api, services);
   scheduleRoutes(api, services);
+  acknowledgmentsRoutes(api, services);
   undoRoutes(api, services);
 
   const app = express();

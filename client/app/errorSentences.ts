@@ -51,6 +51,11 @@ export const errorSentences: Readonly<Record<ClientErrorCode, Sentence>> = {
     title: 'This cell is an input',
     text: 'Thickness, strength and levels of a row come from the walls table; change them in Inputs.',
   },
+  'no-such-warning': {
+    title: 'This warning does not stand any more',
+    text: 'What it was about has changed since it was shown. Nothing was stored; read the warnings again.',
+  },
+  'already-settled': { title: 'This warning is settled', text: 'Somebody has given a reason before; read it there.' },
   'if-match-missing': { title: 'The table was not replaced', text: 'Reload the page and repeat the step.' },
   version: {
     title: 'This was changed while you edited it',
@@ -96,6 +101,7 @@ const telling: ReadonlySet<ClientErrorCode> = new Set([
   'cell-moved',
   'moved-on',
   'does-not-compute',
+  'no-such-warning',
 ]);
 
 /** One line for a notice beside the place where it happened. */

@@ -8,5 +8,6 @@ export const keys = {
   settings: (id: string) => ['building', id, 'settings'] as const,
   table: (id: string, table: EditableTable) => ['building', id, 'table', table] as const,
   results: (id: string) => ['building', id, 'results'] as const,
+  acknowledgments: (id: string) => ['building', id, 'acknowledgments'] as const,
   schedule: (id: string) => ['building', id, 'schedule'] as const,
 };

@@ -1,5 +1,6 @@
 import { useMutation, useQueryClient, type QueryClient, type UseMutationResult } from '@tanstack/react-query';
 
+import type { AcknowledgmentBody, AcknowledgmentRow } from '#shared/contracts/acknowledgments';
 import type { BuildingResource } from '#shared/contracts/buildings';
 import type { SchedulePatch, SchedulePatchAnswer } from '#shared/contracts/schedule';
 import type { Session, SignIn } from '#shared/contracts/session';
@@ -136,6 +137,16 @@ export function usePatchSchedule(id: string): UseMutationResult<SchedulePatchAns
   return useMutation<SchedulePatchAnswer, ApiError, ScheduleEdit>({
     mutationFn: ({ rowId, patch }) => api<SchedulePatchAnswer>('PATCH', routes.scheduleRow(id, rowId), { body: patch }),
     scope: { id: `schedule-${id}` },
+    onSettled: () => invalidateBuilding(client, id),
+  });
+}
+
+/** Settles the warnings of a code, level and wall with a reason. */
+export function useAcknowledge(id: string): UseMutationResult<AcknowledgmentRow, ApiError, AcknowledgmentBody> {
+  const client = useQueryClient();
+  return useMutation<AcknowledgmentRow, ApiError, AcknowledgmentBody>({
+    mutationFn: (body) => api<AcknowledgmentRow>('POST', routes.acknowledgments(id), { body }),
+    scope: { id: `acknowledgments-${id}` },
     onSettled: () => invalidateBuilding(client, id),
   });
 }

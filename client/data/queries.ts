@@ -1,5 +1,6 @@
 import { keepPreviousData, useQuery, type UseQueryResult } from '@tanstack/react-query';
 
+import type { AcknowledgmentList } from '#shared/contracts/acknowledgments';
 import type { BuildingListRow, BuildingResource } from '#shared/contracts/buildings';
 import type { ResultDocument } from '#shared/contracts/result';
 import type { ScheduleResource } from '#shared/contracts/schedule';
@@ -56,5 +57,13 @@ export function useSchedule(id: string): UseQueryResult<ScheduleResource, ApiErr
     queryKey: keys.schedule(id),
     queryFn: ({ signal }) => api<ScheduleResource>('GET', routes.schedule(id), { signal }),
     placeholderData: keepPreviousData,
+  });
+}
+
+/** Warnings that engineers have settled, lapsed ones included. */
+export function useAcknowledgments(id: string): UseQueryResult<AcknowledgmentList, ApiError> {
+  return useQuery<AcknowledgmentList, ApiError>({
+    queryKey: keys.acknowledgments(id),
+    queryFn: ({ signal }) => api<AcknowledgmentList>('GET', routes.acknowledgments(id), { signal }),
   });
 }

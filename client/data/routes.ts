@@ -10,6 +10,7 @@ export const routes = {
   results: (id: string) => `/api/buildings/${id}/results`,
   schedule: (id: string) => `/api/buildings/${id}/schedule`,
   scheduleRow: (id: string, rowId: string) => `/api/buildings/${id}/schedule/${rowId}`,
+  acknowledgments: (id: string) => `/api/buildings/${id}/acknowledgments`,
   undo: (id: string) => `/api/buildings/${id}/undo`,
   workbook: (id: string) => `/api/buildings/${id}/schedule.xlsx`,
 } as const;

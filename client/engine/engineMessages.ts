@@ -1,12 +1,13 @@
 import type { ResultDocument } from '#shared/contracts/result';
 import type { BuildingInput, Problem } from '#shared/engineering/input';
 import type { DesignRow, PinnedBand } from '#shared/engineering/wall-design/designTypes';
+import type { Acknowledged } from '#shared/result/warningFacts';
 
 /** What the page asks of its worker; functions do not cross, so the clock stays out of it. */
 export interface EngineRequest {
   readonly id: number;
   readonly input: BuildingInput;
-  readonly options: { readonly pinned: readonly PinnedBand[] };
+  readonly options: { readonly pinned: readonly PinnedBand[]; readonly acknowledged?: readonly Acknowledged[] };
 }
 
 export type EngineOutcome =

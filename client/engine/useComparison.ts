@@ -2,7 +2,7 @@ import { useEffect, useState } from 'react';
 
 import type { ResultDocument } from '#shared/contracts/result';
 
-import { useSchedule } from '../data/queries.ts';
+import { useAcknowledgments, useSchedule } from '../data/queries.ts';
 import { differingParts, type ComparedPart } from './comparedParts.ts';
 import { engine } from './engine.ts';
 import { pinnedBands } from './pinnedBands.ts';
@@ -20,9 +20,10 @@ const waiting: Comparison = { kind: 'waiting' };
 export function useComparison(id: string, there: ResultDocument | undefined): Comparison {
   const input = useBuildingInput(id);
   const rows = useSchedule(id).data?.rows;
+  const acknowledged = useAcknowledgments(id).data?.rows;
   const [said, setSaid] = useState<{ for: ResultDocument; comparison: Comparison } | null>(null);
   useEffect(() => {
-    if (!input || !rows || !there) return undefined;
+    if (!input || !rows || !acknowledged || !there) return undefined;
     let current = true;
     const say = (comparison: Comparison): void => {
       if (current) setSaid({ for: there, comparison });
@@ -32,7 +33,7 @@ export function useComparison(id: string, there: ResultDocument | undefined): Co
       say({ kind: 'none', reason: 'this browser runs no workers' });
       return undefined;
     }
-    void client.run(input, { pinned: pinnedBands(rows) }).then((outcome) => {
+    void client.run(input, { pinned: pinnedBands(rows), acknowledged }).then((outcome) => {
       if (outcome.kind === 'failed') say({ kind: 'none', reason: outcome.message });
       if (outcome.kind === 'refused') say({ kind: 'none', reason: outcome.problems[0]?.message ?? 'refused' });
       if (outcome.kind !== 'computed') return;
@@ -42,6 +43,6 @@ export function useComparison(id: string, there: ResultDocument | undefined): Co
     return () => {
       current = false;
     };
-  }, [input, rows, there]);
+  }, [input, rows, acknowledged, there]);
   return said !== null && said.for === there ? said.comparison : waiting;
 }

@@ -1,6 +1,8 @@
 import type { EditableTable } from '#shared/contracts/tableColumns';
 import type { CellValue } from '#shared/contracts/tables';
 
+import type { AcknowledgmentState } from '../db/repositories/AcknowledgmentRepository.ts';
+
 /** The changed cells of one row; `position` stands among them where the row is new, gone or moved. Null: no such row. */
 export type RowState = Readonly<Record<string, CellValue>> | null;
 export type TableState = Readonly<Record<string, RowState>>;
@@ -23,6 +25,8 @@ export interface DeltaSide {
   readonly schedule?: Readonly<Record<string, ScheduleState>>;
   /** building.json as typed */
   readonly settings?: Readonly<Record<string, unknown>>;
+  /** by id; null: no such acknowledgment */
+  readonly acknowledgments?: Readonly<Record<string, AcknowledgmentState | null>>;
   /** names of schedule rows follow without a guard */
   readonly renames?: readonly Rename[];
 }
@@ -32,11 +36,12 @@ export interface Delta {
   readonly after: DeltaSide;
 }
 
-/** What an edit touched: names of tables, `schedule`, `settings`. */
+/** What an edit touched: names of tables, `schedule`, `settings`, `acknowledgments`. */
 export function targetsOf(side: DeltaSide): string[] {
   const targets: string[] = Object.keys(side.tables ?? {});
   if (side.schedule !== undefined) targets.push('schedule');
   if (side.settings !== undefined) targets.push('settings');
+  if (side.acknowledgments !== undefined) targets.push('acknowledgments');
   return targets;
 }
 

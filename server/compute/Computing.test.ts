@@ -32,7 +32,7 @@ const runner: Runner = {
 beforeEach(() => {
   folder = mkdtempSync(join(tmpdir(), 'groundward-cache-'));
   runs = 0;
-  answer = { ok: true, result: new Uint8Array([1, 2, 3]), schedule: [], rows: [] };
+  answer = { ok: true, result: new Uint8Array([1, 2, 3]), schedule: [], rows: [], warnings: [] };
 });
 afterEach(() => {
   rmSync(folder, { recursive: true, force: true });

@@ -4,7 +4,7 @@ import { gunzipSync, gzipSync } from 'node:zlib';
 
 import type { Computed } from './Runner.ts';
 
-type ScheduleFile = Pick<Computed, 'schedule' | 'rows'>;
+type ScheduleFile = Pick<Computed, 'schedule' | 'rows' | 'warnings'>;
 
 const gigabyte = 1024 * 1024 * 1024;
 /** writes between two looks at the size of the folder */
@@ -23,21 +23,21 @@ export class ResultFiles {
   async read(key: string): Promise<Computed | null> {
     try {
       const result = await readFile(this.place(key, 'result'));
-      const { schedule, rows } = JSON.parse(
+      const { schedule, rows, warnings } = JSON.parse(
         gunzipSync(await readFile(this.place(key, 'schedule'))).toString('utf8'),
       ) as ScheduleFile;
-      return { ok: true, result: new Uint8Array(result), schedule, rows };
+      return { ok: true, result: new Uint8Array(result), schedule, rows, warnings };
     } catch {
       return null;
     }
   }
 
   /** Complete or not there: written beside, then renamed. A full disk costs the file and nothing else. */
-  async write(key: string, { result, schedule, rows }: Computed): Promise<void> {
+  async write(key: string, { result, schedule, rows, warnings }: Computed): Promise<void> {
     try {
       await mkdir(this.folder, { recursive: true });
       await this.put(this.place(key, 'result'), result);
-      await this.put(this.place(key, 'schedule'), gzipSync(JSON.stringify({ schedule, rows })));
+      await this.put(this.place(key, 'schedule'), gzipSync(JSON.stringify({ schedule, rows, warnings })));
       if (this.written % prunedEvery === 0) await this.prune();
       this.written += 1;
     } catch {

@@ -1,12 +1,14 @@
 import type { ResultRow } from '#shared/contracts/result';
 import type { ScheduleResourceRow } from '#shared/contracts/schedule';
-import type { BuildingInput, Problem, Settings } from '#shared/engineering/input';
+import type { BuildingInput, Problem, Settings, Warning } from '#shared/engineering/input';
 import type { DesignRow, PinnedBand } from '#shared/engineering/wall-design/designTypes';
+import type { Acknowledged } from '#shared/result/warningFacts';
 
 export interface RunTask {
   readonly kind: 'run';
   readonly input: BuildingInput;
   readonly pinned: readonly PinnedBand[];
+  readonly acknowledged?: readonly Acknowledged[];
 }
 
 export interface WorkbookTask {
@@ -25,6 +27,7 @@ export interface Computed {
   readonly result: Uint8Array;
   readonly schedule: readonly ResultRow[];
   readonly rows: readonly DesignRow[];
+  readonly warnings: readonly Warning[];
 }
 
 export type RunAnswer = Computed | { readonly ok: false; readonly problems: readonly Problem[] };

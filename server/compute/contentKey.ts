@@ -4,13 +4,19 @@ import { tableColumns } from '#shared/contracts/tableColumns';
 import type { BuildingInput, TableName } from '#shared/engineering/input';
 import { engineVersion } from '#shared/engineering/version';
 import type { PinnedBand } from '#shared/engineering/wall-design/designTypes';
+import type { Acknowledged } from '#shared/result/warningFacts';
 
 import { canonicalJson } from '../change-log/canonicalJson.ts';
 
-/** Name of a result: equal for equal engine, settings, tables and pinned bands, and for nothing else. */
-export function contentKey(engineBuild: string, input: BuildingInput, pinned: readonly PinnedBand[]): string {
+/** Name of a result: equal for equal engine, settings, tables, pinned bands and settled warnings, and for nothing else. */
+export function contentKey(
+  engineBuild: string,
+  input: BuildingInput,
+  pinned: readonly PinnedBand[],
+  acknowledged: readonly Acknowledged[] = [],
+): string {
   const hash = createHash('sha256');
-  hash.update(canonicalJson({ engineVersion, engineBuild, settings: input.settings, pinned }));
+  hash.update(canonicalJson({ engineVersion, engineBuild, settings: input.settings, pinned, acknowledged }));
   for (const table of Object.keys(tableColumns) as TableName[]) {
     // cells in the order of the columns: sorting the keys of 50,000 rows would take longer than hashing them
     const names = tableColumns[table].map((column) => column.name);

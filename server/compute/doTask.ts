@@ -6,11 +6,12 @@ import { runBuilding } from '#shared/result/runBuilding';
 import type { RunAnswer, RunTask, WorkbookTask } from './Runner.ts';
 
 /** The whole chain on one building; runs in a pool thread, or in line. */
-export function runTask({ input, pinned }: RunTask): RunAnswer {
-  const outcome = runBuilding(input, { pinned, now: () => performance.now() });
+export function runTask({ input, pinned, acknowledged = [] }: RunTask): RunAnswer {
+  const outcome = runBuilding(input, { pinned, acknowledged, now: () => performance.now() });
   if (!outcome.ok) return { ok: false, problems: outcome.problems };
   const result = gzipSync(JSON.stringify(outcome.document), { level: 4 });
-  return { ok: true, result: new Uint8Array(result), schedule: outcome.document.schedule, rows: outcome.rows };
+  const { schedule, warnings } = outcome.document;
+  return { ok: true, result: new Uint8Array(result), schedule, rows: outcome.rows, warnings };
 }
 
 /** The workbook library takes most of a second to load, so it is loaded where and when it is needed. */

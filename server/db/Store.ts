@@ -1,5 +1,6 @@
 import type { EntityManager } from 'typeorm';
 
+import { AcknowledgmentRepository } from './repositories/AcknowledgmentRepository.ts';
 import { BuildingRepository } from './repositories/BuildingRepository.ts';
 import { ChangeRepository } from './repositories/ChangeRepository.ts';
 import { PersonRepository } from './repositories/PersonRepository.ts';
@@ -15,6 +16,7 @@ export class Store {
   readonly tables: TableRepository;
   readonly changes: ChangeRepository;
   readonly schedule: ScheduleRepository;
+  readonly acknowledgments: AcknowledgmentRepository;
 
   constructor(manager: EntityManager) {
     this.people = new PersonRepository(manager);
@@ -23,5 +25,6 @@ export class Store {
     this.tables = new TableRepository(manager);
     this.changes = new ChangeRepository(manager);
     this.schedule = new ScheduleRepository(manager);
+    this.acknowledgments = new AcknowledgmentRepository(manager);
   }
 }

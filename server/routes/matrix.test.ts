@@ -73,6 +73,9 @@ async function call(agent: Agent, line: MatrixLine, id: string): Promise<number>
       .expect(200);
     return (await agent.post(path).send({})).status;
   }
+  if (line.action === 'acknowledgments.add') {
+    return (await agent.post(path).send({ code: 'collectors', reason: 'designed with the slab' })).status;
+  }
   if (line.action === 'schedule.edit') {
     const { rows } = (await server.as('engineer').get(`/api/buildings/${id}/schedule`)).body as ScheduleResource;
     const row = rows[0];

@@ -1,6 +1,7 @@
 import type { PasswordHasher } from '../auth/PasswordHasher.ts';
 import type { Computing } from '../compute/Computing.ts';
 
+import { AcknowledgmentService } from './acknowledgments/AcknowledgmentService.ts';
 import { BuildingService } from './buildings/BuildingService.ts';
 import type { Context } from './Context.ts';
 import { ResultService } from './results/ResultService.ts';
@@ -18,6 +19,7 @@ export interface Services {
   readonly uploads: UploadService;
   readonly results: ResultService;
   readonly schedule: ScheduleService;
+  readonly acknowledgments: AcknowledgmentService;
   readonly undo: UndoService;
 }
 
@@ -36,6 +38,7 @@ export function createServices(
     uploads: new UploadService(context),
     results,
     schedule: new ScheduleService(context, results),
+    acknowledgments: new AcknowledgmentService(context, results),
     undo: new UndoService(context),
   };
 }

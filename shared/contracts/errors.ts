@@ -20,6 +20,8 @@ export const errorCodes = [
   'units-fixed',
   'nothing-to-undo',
   'moved-on',
+  'no-such-warning',
+  'already-settled',
   'too-many-requests',
   'busy',
   'storage-full',

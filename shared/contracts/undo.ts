@@ -3,6 +3,6 @@ export interface UndoAnswer {
   readonly seq: number;
   /** seq of the edit that was taken back */
   readonly undone: number;
-  /** what the edit had touched: names of tables, `schedule`, `settings` */
+  /** what the edit had touched: names of tables, `schedule`, `settings`, `acknowledgments` */
   readonly targets: readonly string[];
 }

@@ -71,6 +71,8 @@ export const matrix = [
   line('results.read', 'GET', '/api/buildings/:id/results', readers),
   line('schedule.read', 'GET', '/api/buildings/:id/schedule', readers),
   line('schedule.edit', 'PATCH', '/api/buildings/:id/schedule/:rowId', engineers(200)),
+  line('acknowledgments.read', 'GET', '/api/buildings/:id/acknowledgments', readers),
+  line('acknowledgments.add', 'POST', '/api/buildings/:id/acknowledgments', engineers(201)),
   line('workbook.read', 'GET', '/api/buildings/:id/schedule.xlsx', readers),
   line('edit.undo', 'POST', '/api/buildings/:id/undo', engineers(200)),
 ] satisfies readonly MatrixLine[];

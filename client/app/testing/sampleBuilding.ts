@@ -63,6 +63,7 @@ export const sampleAnswers = (role = 'engineer'): Answers => ({
   'GET /api/buildings/b1/gravity': empty,
   'GET /api/buildings/b1/combinations': empty,
   'GET /api/buildings/b1/overrides': empty,
+  'GET /api/buildings/b1/acknowledgments': { body: { rows: [], seq: 7 } },
   'GET /api/buildings/b1/results': {
     status: 422,
     body: { error: { code: 'does-not-compute', message: 'walls has no rows', problems: [] } },

@@ -1,6 +1,7 @@
 import { tableColumns } from '#shared/contracts/tableColumns';
 import type { BuildingInput, TableName, Tables } from '#shared/engineering/input';
 import type { PinnedBand } from '#shared/engineering/wall-design/designTypes';
+import type { Acknowledged } from '#shared/result/warningFacts';
 
 import { contentKey } from '../../compute/contentKey.ts';
 import type { ScheduleRecord } from '../../db/repositories/ScheduleRepository.ts';
@@ -18,6 +19,7 @@ export interface LoadedBuilding {
   readonly rowIds: Readonly<Record<TableName, readonly string[]>>;
   readonly records: readonly ScheduleRecord[];
   readonly pinned: readonly PinnedBand[];
+  readonly acknowledged: readonly Acknowledged[];
   readonly key: string;
 }
 
@@ -44,6 +46,12 @@ export async function readBuilding(store: Store, id: string, engineBuild: string
     input: { settings, tables: tables as unknown as Tables },
     rowIds: rowIds as Readonly<Record<TableName, readonly string[]>>,
     records: await store.schedule.rows(id),
+    acknowledged: (await store.acknowledgments.rows(id)).map(({ code, level, wall, factsHash }) => ({
+      code,
+      level,
+      wall,
+      factsHash,
+    })),
     engineBuild,
   };
 }
@@ -51,5 +59,5 @@ export async function readBuilding(store: Store, id: string, engineBuild: string
 /** Outside the gate: pinned bands and the content key. */
 export function keyBuilding({ engineBuild, ...raw }: RawBuilding, records = raw.records): LoadedBuilding {
   const pinned = pinnedBands(records, raw.input.tables);
-  return { ...raw, records, pinned, key: contentKey(engineBuild, raw.input, pinned) };
+  return { ...raw, records, pinned, key: contentKey(engineBuild, raw.input, pinned, raw.acknowledged) };
 }

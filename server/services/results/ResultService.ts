@@ -53,8 +53,8 @@ export class ResultService {
   }
 
   /** The chain, or 422 with what stands in its way, each problem with the id of its row. */
-  async compute({ key, input, pinned, rowIds }: LoadedBuilding): Promise<Computed> {
-    const answer = await this.computing.compute(key, input, pinned);
+  async compute({ key, input, pinned, acknowledged, rowIds }: LoadedBuilding): Promise<Computed> {
+    const answer = await this.computing.compute(key, input, pinned, acknowledged);
     if (answer.ok) return answer;
     throw new HttpError(422, 'does-not-compute', 'The tables do not fit together yet; nothing was computed.', {
       problems: answer.problems.map((problem) => placed(problem, rowIds)),

@@ -17,7 +17,13 @@ const tables = { levels, walls: [wall('W', 'L1', 'L5')] };
 const cells = { vertical: { curtains: 2, bar: 5, spacing: 12 }, notes: [] } as unknown as ScheduleCells;
 const design = (from: string, to: string, overwritten: readonly OverwritableCell[] = []): DesignRow =>
   ({ wall: 'W', from, to, cells, automatic: cells, overwritten, ratio: 0.5, ok: true }) as unknown as DesignRow;
-const computed = (...rows: DesignRow[]): Computed => ({ ok: true, result: new Uint8Array(), schedule: [], rows });
+const computed = (...rows: DesignRow[]): Computed => ({
+  ok: true,
+  result: new Uint8Array(),
+  schedule: [],
+  rows,
+  warnings: [],
+});
 
 const record = (id: string, stories: readonly string[], own: ScheduleRecord['own'] = {}): ScheduleRecord => ({
   id,

@@ -15,6 +15,7 @@ import { ownOfState, scheduleState } from '../schedule/scheduleState.ts';
 import { renameSchedule } from '../tables/cascadeRename.ts';
 
 import { movedOn } from './movedOn.ts';
+import { restoreAcknowledgments } from './restoreAcknowledgments.ts';
 import { restoreTable } from './restoreTable.ts';
 
 /** A new edit made of the reversed delta of the person's own last edit; refused where a cell has moved on since. */
@@ -45,6 +46,8 @@ export class UndoService {
     }
     await renameSchedule(store, buildingId, after.renames ?? []);
     await this.restoreSchedule(store, buildingId, before.schedule ?? {}, after.schedule ?? {});
+    if (after.acknowledgments !== undefined)
+      await restoreAcknowledgments(store, buildingId, before.acknowledgments ?? {}, after.acknowledgments);
     if (after.settings !== undefined)
       await this.restoreSettings(store, buildingId, before.settings ?? {}, after.settings);
   }
