@@ -1,11 +1,16 @@
 import { useEffect, useRef, useState, type ReactElement } from 'react';
 import { useLocation } from 'react-router-dom';
 
+import { useCanEdit } from '../../app/useCanEdit.ts';
+import { useAcknowledgments } from '../../data/queries.ts';
 import { Button } from '../ui/Button.tsx';
 import { Section } from '../ui/Section.tsx';
+import { acknowledgmentOf } from './acknowledgmentOf.ts';
 import type { WeighedWarning } from './heldRows.ts';
+import { Judgement } from './Judgement.tsx';
 
 export interface WarningListProps {
+  buildingId: string;
   warnings: readonly WeighedWarning[];
 }
 
@@ -17,8 +22,10 @@ const shownAtFirst = 10;
 const sayRows = (count: number): string => (count === 1 ? '1 row not settled' : `${count} rows not settled`);
 
 /** What an engineer has to judge: where, what, and which rows wait for it. Nothing where there is nothing to judge. */
-export function WarningList({ warnings }: WarningListProps): ReactElement | null {
+export function WarningList({ buildingId, warnings }: WarningListProps): ReactElement | null {
   const { hash } = useLocation();
+  const judged = useAcknowledgments(buildingId).data?.rows ?? [];
+  const canEdit = useCanEdit();
   const place = useRef<HTMLDivElement>(null);
   const [all, setAll] = useState(false);
   useEffect(() => {
@@ -47,8 +54,18 @@ export function WarningList({ warnings }: WarningListProps): ReactElement | null
               <tr key={`${warning.code} ${warning.level ?? ''} ${warning.wall ?? ''} ${index}`}>
                 <td className="font-medium">{warning.level ?? <NoPlace />}</td>
                 <td className="font-medium">{warning.wall ?? <NoPlace />}</td>
-                <td>{warning.message}</td>
-                <td className={holds > 0 ? 'font-semibold' : 'text-graphite'}>{holds > 0 ? sayRows(holds) : '–'}</td>
+                <td>
+                  {warning.message}
+                  <Judgement
+                    buildingId={buildingId}
+                    warning={warning}
+                    last={acknowledgmentOf(warning, judged)}
+                    canAccept={canEdit}
+                  />
+                </td>
+                <td className={holds > 0 ? 'font-semibold' : 'text-graphite'}>
+                  {holds > 0 ? sayRows(holds) : warning.settled ? 'settled' : '–'}
+                </td>
               </tr>
             ))}
           </tbody>

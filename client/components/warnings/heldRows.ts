@@ -33,7 +33,7 @@ export interface WeighedWarning {
   readonly holds: number;
 }
 
-/** Warnings with those that hold rows first, otherwise in the order of the engine. Drift has a note of its own. */
+/** Warnings with those that hold rows first and settled ones last, otherwise in the order of the engine. Drift has a note of its own. */
 export function weighWarnings(
   document: Pick<ResultDocument, 'warnings' | 'levels' | 'schedule'>,
 ): readonly WeighedWarning[] {
@@ -42,5 +42,6 @@ export function weighWarnings(
     warning,
     holds: document.schedule.filter((row) => holdsRow(warning, row, document.levels)).length,
   }));
-  return [...weighed.filter((one) => one.holds > 0), ...weighed.filter((one) => one.holds === 0)];
+  const rank = ({ warning, holds }: WeighedWarning): number => (warning.settled ? 2 : holds > 0 ? 0 : 1);
+  return [0, 1, 2].flatMap((place) => weighed.filter((one) => rank(one) === place));
 }

@@ -231,7 +231,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
           onChooseLevel={chooseLevel}
         />
         <RigidityPanel buildingId={id} level={level.level} chosenWall={wall} onChooseWall={chooseWall} />
-        <WarningList warnings={weighWarnings(document)} />
+        <WarningList buildingId={id} warnings={weighWarnings(document)} />
       </div>
     </PageFrame>
   );

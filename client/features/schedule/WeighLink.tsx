@@ -16,7 +16,7 @@ export interface WeighLinkProps {
 /** How many points there are to weigh, and the way to them. */
 export function WeighLink({ buildingId, document }: WeighLinkProps): ReactElement | null {
   const { search } = useLocation();
-  const count = weighWarnings(document).length;
+  const count = weighWarnings(document).filter(({ warning }) => !warning.settled).length;
   if (count === 0) return null;
   return (
     <Link

@@ -257,6 +257,7 @@ function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactE
           units={units}
         />
         <WarningList
+          buildingId={id}
           warnings={weighWarnings(document).filter(({ warning }) => warningsOfTakedown.includes(warning.code))}
         />
       </div>
