@@ -28,6 +28,7 @@ import { InputStack } from './InputStack.tsx';
 import { InputTabs } from './InputTabs.tsx';
 import { newRow } from './newRow.ts';
 import { SettingsPane } from './SettingsPane.tsx';
+import { StoryForceHelp } from './StoryForceHelp.tsx';
 import { TablePane } from './TablePane.tsx';
 import { tabLines } from './tabNames.ts';
 import { tableSummary } from './tableSummary.ts';
@@ -248,6 +249,15 @@ export function InputsPage() {
           {pane}
           {tab === 'forces' && rows.length > 0 && building.data !== undefined ? (
             <ForcesReading building={building.data} levels={allRows.levels} forces={allRows.forces} canEdit={canEdit} />
+          ) : null}
+          {tab === 'forces' && canEdit && building.data !== undefined ? (
+            <StoryForceHelp
+              buildingId={id}
+              units={units}
+              forcesAre={building.data.forcesAre}
+              levels={allRows.levels}
+              forces={allRows.forces}
+            />
           ) : null}
         </div>
         {uploading && canEdit ? (
