@@ -48,6 +48,7 @@ export function expandCombinations(
   const other = otherStates(actions);
   const expansions: ExpandedCombination[] = [];
   const gravitySets = new Map<string, number>();
+  const statesFor = { W: factoredStates(wind), E: factoredStates(seismic), H: factoredStates(other) };
   for (const combination of combinations) {
     const { D, L, Lr, S, W, E, H } = combination.factors;
     // live load that keeps its full value: the standard's reduced factor on L is not for it
@@ -55,9 +56,9 @@ export function expandCombinations(
     const key = [D, L, Lr, S, fullL].join(' ');
     const gravitySet = gravitySets.get(key) ?? gravitySets.size;
     gravitySets.set(key, gravitySet);
-    for (const first of statesOf(W, wind)) {
-      for (const second of statesOf(E, seismic)) {
-        for (const third of statesOf(H, other)) {
+    for (const first of statesFor.W(W)) {
+      for (const second of statesFor.E(E)) {
+        for (const third of statesFor.H(H)) {
           const states = [first, second, third].filter((state) => state !== null);
           const labels = states.map((state) => state.label);
           expansions.push({
@@ -67,7 +68,8 @@ export function expandCombinations(
             factors: { D, L, Lr, S },
             fullL,
             gravitySet,
-            lateral: states.flatMap((state) => state.parts),
+            // one and the same list wherever one state acts alone, so that its forces are added up once
+            lateral: states.length === 1 && states[0] ? states[0].parts : states.flatMap((state) => state.parts),
           });
         }
       }
@@ -81,11 +83,18 @@ function nameOf(combination: FactoredCombination, labels: readonly string[]): st
   return labels.length === 0 ? named : `${named}; ${labels.join(', ')}`;
 }
 
-/** The states a term runs through, its factor applied; one empty state where the term is absent or has no case. */
-function statesOf(factor: number, states: readonly LateralState[]): (LateralState | null)[] {
-  if (factor === 0 || states.length === 0) return [null];
-  return states.map((state) => ({
-    label: state.label,
-    parts: state.parts.map((part) => ({ action: part.action, factor: part.factor * factor })),
-  }));
+/** The states a term runs through, its factor applied, made once a factor; one empty state where the term is absent or has no case. */
+function factoredStates(states: readonly LateralState[]): (factor: number) => readonly (LateralState | null)[] {
+  const made = new Map<number, readonly LateralState[]>();
+  return (factor) => {
+    if (factor === 0 || states.length === 0) return [null];
+    const known =
+      made.get(factor) ??
+      states.map((state) => ({
+        label: state.label,
+        parts: state.parts.map((part) => ({ action: part.action, factor: part.factor * factor })),
+      }));
+    made.set(factor, known);
+    return known;
+  };
 }

@@ -57,39 +57,97 @@ function factoredForces(model: Model, gravity: GravityTakedown, basis: BasisForc
   const { expansions } = basis;
   const wall = model.walls[wallIndex];
   const count = wall?.segments.length ?? 0;
-  const from = wall?.fromStory ?? 0;
   const walls = model.walls.length;
-  const plane = model.stories.length * walls;
+  const first = (wall?.fromStory ?? 0) * walls + wallIndex;
   const axialKip = new Float64Array(expansions.length * count);
   const momentKipIn = new Float64Array(expansions.length * count);
   const shearKip = new Float64Array(expansions.length * count);
-  const { axialKip: axial, momentKipIn: moment, fullLive: full } = gravity;
-  expansions.forEach(({ factors, fullL, lateral }, expansion) => {
+  const vertical = new Map<number, GravityForces>();
+  const sideways = new Map<ExpandedCombination['lateral'], LateralForces>();
+  expansions.forEach((expansion, index) => {
+    const { gravitySet, lateral } = expansion;
+    let down = vertical.get(gravitySet);
+    if (!down) {
+      down = gravityForces(gravity, expansion, first, walls, count);
+      vertical.set(gravitySet, down);
+    }
+    let across = sideways.get(lateral);
+    if (!across) {
+      across = lateralForces(basis, lateral, model.stories.length * walls, first, walls, count);
+      sideways.set(lateral, across);
+    }
+    const target = index * count;
     for (let story = 0; story < count; story += 1) {
-      const source = (from + story) * walls + wallIndex;
-      const target = expansion * count + story;
-      let p =
-        factors.D * (axial.D[source] ?? 0) +
-        factors.L * (axial.L[source] ?? 0) +
-        factors.Lr * (axial.Lr[source] ?? 0) +
-        factors.S * (axial.S[source] ?? 0) +
-        (fullL - factors.L) * (full.axialKip[source] ?? 0);
-      let m =
-        factors.D * (moment.D[source] ?? 0) +
-        factors.L * (moment.L[source] ?? 0) +
-        factors.Lr * (moment.Lr[source] ?? 0) +
-        factors.S * (moment.S[source] ?? 0) +
-        (fullL - factors.L) * (full.momentKipIn[source] ?? 0);
-      let v = 0;
-      for (const part of lateral) {
-        m += part.factor * (basis.momentKipIn[part.action * plane + source] ?? 0);
-        v += part.factor * (basis.shearKip[part.action * plane + source] ?? 0);
-        if (basis.axialKip) p += part.factor * (basis.axialKip[part.action * plane + source] ?? 0);
-      }
-      axialKip[target] = p;
-      momentKipIn[target] = m;
-      shearKip[target] = v;
+      const axial = down.axialKip[story] as number;
+      axialKip[target + story] = across.axialKip ? axial + (across.axialKip[story] as number) : axial;
+      momentKipIn[target + story] = (down.momentKipIn[story] as number) + (across.momentKipIn[story] as number);
+      shearKip[target + story] = across.shearKip[story] as number;
     }
   });
   return { basis: basis.basis, expansions, axialKip, momentKipIn, shearKip };
+}
+
+interface GravityForces {
+  readonly axialKip: Float64Array;
+  readonly momentKipIn: Float64Array;
+}
+
+interface LateralForces {
+  /** null where no transfer brings axial */
+  readonly axialKip: Float64Array | null;
+  readonly momentKipIn: Float64Array;
+  readonly shearKip: Float64Array;
+}
+
+/** Gravity of one set of factors in every story of a wall: once a set, since many expansions share it. */
+function gravityForces(
+  gravity: GravityTakedown,
+  { factors, fullL }: ExpandedCombination,
+  first: number,
+  walls: number,
+  count: number,
+): GravityForces {
+  const { axialKip: axial, momentKipIn: moment, fullLive: full } = gravity;
+  const axialKip = new Float64Array(count);
+  const momentKipIn = new Float64Array(count);
+  for (let story = 0; story < count; story += 1) {
+    const source = first + story * walls;
+    axialKip[story] =
+      factors.D * (axial.D[source] ?? 0) +
+      factors.L * (axial.L[source] ?? 0) +
+      factors.Lr * (axial.Lr[source] ?? 0) +
+      factors.S * (axial.S[source] ?? 0) +
+      (fullL - factors.L) * (full.axialKip[source] ?? 0);
+    momentKipIn[story] =
+      factors.D * (moment.D[source] ?? 0) +
+      factors.L * (moment.L[source] ?? 0) +
+      factors.Lr * (moment.Lr[source] ?? 0) +
+      factors.S * (moment.S[source] ?? 0) +
+      (fullL - factors.L) * (full.momentKipIn[source] ?? 0);
+  }
+  return { axialKip, momentKipIn };
+}
+
+/** Lateral actions of one list of parts in every story of a wall: once a list. */
+function lateralForces(
+  basis: BasisForces,
+  lateral: ExpandedCombination['lateral'],
+  plane: number,
+  first: number,
+  walls: number,
+  count: number,
+): LateralForces {
+  const axialKip = basis.axialKip ? new Float64Array(count) : null;
+  const momentKipIn = new Float64Array(count);
+  const shearKip = new Float64Array(count);
+  for (const { action, factor } of lateral) {
+    for (let story = 0; story < count; story += 1) {
+      const source = action * plane + first + story * walls;
+      momentKipIn[story] = (momentKipIn[story] as number) + factor * (basis.momentKipIn[source] ?? 0);
+      shearKip[story] = (shearKip[story] as number) + factor * (basis.shearKip[source] ?? 0);
+      if (axialKip && basis.axialKip)
+        axialKip[story] = (axialKip[story] as number) + factor * (basis.axialKip[source] ?? 0);
+    }
+  }
+  return { axialKip, momentKipIn, shearKip };
 }

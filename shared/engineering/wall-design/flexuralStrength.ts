@@ -98,15 +98,15 @@ function turningDepths(pieces: Float64Array, at: number, from: number, to: numbe
     (pieces[at + 8] as number) * (pieces[at + 4] as number) + (pieces[at + 9] as number) * (pieces[at + 3] as number);
   const square = cubic === 0 ? -1 : linear / (3 * cubic);
   const star = square > from * from && square < to * to ? Math.sqrt(square) : from;
-  const turns: number[] = [];
-  const search = (low: number, high: number): void => {
-    if (slopeAt(pieces, at, low) * slopeAt(pieces, at, high) < 0) {
-      turns.push(close(slopeAt, pieces, at, low, high, 0));
-    }
-  };
-  if (star > from) search(from, star);
-  search(star, to);
-  return turns.length === 0 ? noTurns : turns;
+  const first = star > from ? turnBetween(pieces, at, from, star) : null;
+  const second = turnBetween(pieces, at, star, to);
+  if (first === null) return second === null ? noTurns : [second];
+  return second === null ? [first] : [first, second];
+}
+
+function turnBetween(pieces: Float64Array, at: number, low: number, high: number): number | null {
+  if (!(slopeAt(pieces, at, low) * slopeAt(pieces, at, high) < 0)) return null;
+  return close(slopeAt, pieces, at, low, high, 0);
 }
 
 /** Stretches of a curve in which phi Pn (or Pn) only grows or only falls: piece, from, to and the values at both, five numbers a run. */
@@ -134,16 +134,10 @@ function monotoneRuns({ pieces, count }: SectionCurve, reduced: boolean): Runs {
   return runs;
 }
 
-const knownRuns = { reduced: new WeakMap<SectionCurve, Runs>(), nominal: new WeakMap<SectionCurve, Runs>() };
-
 function runsOf(curve: SectionCurve, reduced: boolean): Runs {
-  const known = reduced ? knownRuns.reduced : knownRuns.nominal;
-  let runs = known.get(curve);
-  if (!runs) {
-    runs = monotoneRuns(curve, reduced);
-    known.set(curve, runs);
-  }
-  return runs;
+  const { runs } = curve;
+  if (reduced) return (runs.reduced ??= monotoneRuns(curve, true));
+  return (runs.nominal ??= monotoneRuns(curve, false));
 }
 
 /**

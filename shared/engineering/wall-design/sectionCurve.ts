@@ -38,14 +38,19 @@ export interface SectionCurve {
   readonly phiTensionKip: number;
   /** the same without phi */
   readonly tensionKip: number;
+  /** stretches between the turns of phi Pn and of Pn, kept by flexuralStrength once it has found them */
+  readonly runs: { reduced: readonly number[] | null; nominal: readonly number[] | null };
 }
 
 export const pieceWidth = 11;
+const layerWidth = 3;
 
 /** Room in which curves are made one after another without new arrays; a curve made in it lives until the next one. */
 export class CurveStore {
   depths = new Float64Array(0);
   pieces = new Float64Array(0);
+  /** layers as columns: position, area and 1 where the bars take compression */
+  layers = new Float64Array(0);
 
   /** Grows to the room that so many layers need. */
   reserve(layers: number): this {
@@ -53,6 +58,7 @@ export class CurveStore {
     if (this.depths.length < depths) {
       this.depths = new Float64Array(depths);
       this.pieces = new Float64Array(depths * pieceWidth);
+      this.layers = new Float64Array(layers * layerWidth);
     }
     return this;
   }
@@ -127,7 +133,13 @@ export function sectionCurve(
   store.reserve(layers.length);
   const depths = breakpoints(section, yieldStrain, rules, beta1, farIn, store.depths);
   const count = depths.length - 1;
-  const { pieces } = store;
+  const { pieces, layers: columns } = store;
+  const columnsEnd = layers.length * layerWidth;
+  layers.forEach(({ positionIn, areaIn2, compression }, index) => {
+    columns[index * layerWidth] = positionIn;
+    columns[index * layerWidth + 1] = areaIn2;
+    columns[index * layerWidth + 2] = compression ? 1 : 0;
+  });
   const compressionDepthIn = (farIn * ecu) / (ecu + yieldStrain);
   const tensionControlled = rules.tensionControlledStrain(yieldStrain);
   const tensionDepthIn = (farIn * ecu) / (ecu + tensionControlled);
@@ -151,10 +163,12 @@ export function sectionCurve(
     } else {
       p0 = blockKsi * thicknessIn * lengthIn;
     }
-    for (const { positionIn: x, areaIn2, compression } of layers) {
+    for (let layer = 0; layer < columnsEnd; layer += layerWidth) {
+      const x = columns[layer] as number;
+      const areaIn2 = columns[layer + 1] as number;
       const arm = halfIn - x;
       const strain = (ecu * (c - x)) / c;
-      if (strain > 0 && !compression) continue;
+      if (strain > 0 && columns[layer + 2] === 0) continue;
       let constantKip: number;
       if (strain >= yieldStrain) constantKip = areaIn2 * fyKsi;
       else if (strain <= -yieldStrain) constantKip = -areaIn2 * fyKsi;
@@ -196,5 +210,6 @@ export function sectionCurve(
     phiAxialCapKip: rules.phiCompression * rules.axialCapFactor * squashKip,
     phiTensionKip: -rules.phiTension * steelIn2 * fyKsi,
     tensionKip: -steelIn2 * fyKsi,
+    runs: { reduced: null, nominal: null },
   };
 }

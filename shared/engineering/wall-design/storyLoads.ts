@@ -14,7 +14,35 @@ export interface LoadGroup {
   shearExpansion: number;
 }
 
-/** Adds one action to the groups of a section. Groups are few (one per gravity set), so the search is linear. */
+/** The group of an axial force among those of a section, made where there is none. Groups are few, so the search is linear. */
+function groupOf(groups: LoadGroup[], axialKip: number, seismic: boolean, expansion: number): LoadGroup {
+  for (const group of groups) if (group.axialKip === axialKip && group.seismic === seismic) return group;
+  const group = {
+    axialKip,
+    seismic,
+    momentKipIn: -1,
+    momentExpansion: expansion,
+    shearKip: -1,
+    shearExpansion: expansion,
+  };
+  groups.push(group);
+  return group;
+}
+
+function addTo(group: LoadGroup, momentKipIn: number, shearKip: number, expansion: number): void {
+  const moment = Math.abs(momentKipIn);
+  const shear = Math.abs(shearKip);
+  if (moment > group.momentKipIn) {
+    group.momentKipIn = moment;
+    group.momentExpansion = expansion;
+  }
+  if (shear > group.shearKip) {
+    group.shearKip = shear;
+    group.shearExpansion = expansion;
+  }
+}
+
+/** Adds one action to the groups of a section. */
 export function addAction(
   groups: LoadGroup[],
   axialKip: number,
@@ -23,46 +51,29 @@ export function addAction(
   seismic: boolean,
   expansion: number,
 ): void {
-  const moment = Math.abs(momentKipIn);
-  const shear = Math.abs(shearKip);
-  for (const group of groups) {
-    if (group.axialKip !== axialKip || group.seismic !== seismic) continue;
-    if (moment > group.momentKipIn) {
-      group.momentKipIn = moment;
-      group.momentExpansion = expansion;
-    }
-    if (shear > group.shearKip) {
-      group.shearKip = shear;
-      group.shearExpansion = expansion;
-    }
-    return;
-  }
-  groups.push({
-    axialKip,
-    seismic,
-    momentKipIn: moment,
-    momentExpansion: expansion,
-    shearKip: shear,
-    shearExpansion: expansion,
-  });
+  addTo(groupOf(groups, axialKip, seismic, expansion), momentKipIn, shearKip, expansion);
 }
 
-/** Groups of every story of a wall in one basis, `[story]`, in the order in which expansions first bring an axial force. */
+/**
+ * Groups of every story of a wall in one basis, `[story]`, in the order in which expansions first bring an axial force. Expansions of one
+ * combination follow each other, so the group of the last one is asked first.
+ */
 export function storyLoads(demand: WallDemand, forces: WallForces): LoadGroup[][] {
   const count = demand.stories.length;
   const stories: LoadGroup[][] = demand.stories.map(() => []);
+  const last: (LoadGroup | undefined)[] = demand.stories.map(() => undefined);
+  const { axialKip, momentKipIn, shearKip } = forces;
   for (let index = 0; index < forces.expansions.length; index += 1) {
     const { seismic } = forces.expansions[index] as Expansion;
     for (let story = 0; story < count; story += 1) {
       const at = index * count + story;
-      addAction(
-        stories[story] as LoadGroup[],
-        forces.axialKip[at] as number,
-        forces.momentKipIn[at] as number,
-        forces.shearKip[at] as number,
-        seismic,
-        index,
-      );
+      const axial = axialKip[at] as number;
+      let group = last[story];
+      if (!group || group.axialKip !== axial || group.seismic !== seismic) {
+        group = groupOf(stories[story] as LoadGroup[], axial, seismic, index);
+        last[story] = group;
+      }
+      addTo(group, momentKipIn[at] as number, shearKip[at] as number, index);
     }
   }
   return stories;
