@@ -197,7 +197,7 @@ describe('rules of every building', () => {
     const [foot, inch, kip] = [0.3048, 25.4, 4.4482216152605];
     holds((shape) => {
       const us = makeBuilding(shape);
-      const si = siTwin(us);
+      const si = siTwin(us, settingsDefaults('si'));
       const here = solve(us);
       const there = solve(si);
       expect(deviation(there.rigidities, here.rigidities, 'k', kip / inch)).toBeLessThan(1e-9);

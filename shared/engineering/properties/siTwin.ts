@@ -1,15 +1,13 @@
-import { settingsDefaults } from '../../contracts/settingsDefaults.ts';
-import type { BuildingInput } from '../input.ts';
+import type { BuildingInput, Settings } from '../input.ts';
 
 const [foot, inch, kip] = [0.3048, 25.4, 4.4482216152605];
 const psi = kip / (inch * inch);
 
 const by = (value: number | null, factor: number): number | null => (value === null ? null : value * factor);
 
-/** A building in US units written down in SI by exact factors; settings without units stay, sizes of bars are left out. */
-export function siTwin({ settings, tables }: BuildingInput): BuildingInput {
+/** A building in US units written down in SI by exact factors; what only reinforcement depends on comes from the SI defaults. */
+export function siTwin({ settings, tables }: BuildingInput, si: Settings): BuildingInput {
   const { fc, concreteWeight, baseSprings, stiffness, ...plain } = settings;
-  const si = settingsDefaults('si');
   const { units, fy, fyt, cover, edge, slabThickness, bars, oopEccentricity } = si;
   return {
     settings: {

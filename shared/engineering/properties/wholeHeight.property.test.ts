@@ -178,7 +178,7 @@ describe('rules of the whole-height solution', () => {
           ],
         },
       };
-      const [here, there] = [solve(us), solve(siTwin(us))];
+      const [here, there] = [solve(us), solve(siTwin(us, settingsDefaults('si')))];
       for (const column of ['x', 'y', 'edge']) expect(deviation(there.drifts, here.drifts, column)).toBeLessThan(1e-9);
       const named = (document: ResultDocument) => document.drifts.filter(({ ax }) => ax !== null);
       for (const column of ['torsionRatio', 'ax', 'theta'])
