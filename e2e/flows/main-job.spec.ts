@@ -38,9 +38,9 @@ test('the main job: from nothing to a workbook', async ({ page }) => {
   await page.getByRole('navigation', { name: 'Building' }).getByRole('link', { name: 'Distribution' }).click();
   await page.getByRole('listbox', { name: 'Stories' }).getByRole('option', { name: /^L2/ }).click();
   const row = page
+    .getByRole('region', { name: /^Shares, L2/ })
     .getByRole('row')
-    .filter({ has: page.getByRole('rowheader', { name: 'Y2', exact: true }) })
-    .first();
+    .filter({ has: page.getByRole('rowheader', { name: 'Y2', exact: true }) });
   await expect(row).toContainText(`${shareOfY2.toFixed(1)}`);
   await expect(page.getByRole('figure', { name: 'Plan' })).toBeVisible();
   await expect(page.getByText('Computed here and on the server: equal')).toBeVisible();

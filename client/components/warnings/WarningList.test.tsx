@@ -43,17 +43,18 @@ const open = async () => {
 };
 
 describe('What to weigh', () => {
-  it('ranks what holds rows first and what is settled last', async () => {
+  it('ranks what holds rows first, then what held them until it was settled', async () => {
     const core: Warning = { code: 'core', message: 'A core.' };
-    fakeServer(answers([{ ...stopping, settled: true }, core, holding], []));
+    const held = { walls: ['Q2'], from: 'L2', to: 'L3' };
+    fakeServer(answers([core, { ...stopping, holds: held, settled: true }, holding], []));
     const list = await open();
     const rows = within(list).getAllByRole('row').slice(1);
     expect(rows.map((one) => one.textContent)).toEqual([
       expect.stringContaining('Q1 arrives on L2.'),
-      expect.stringContaining('A core.'),
       expect.stringContaining('Q2 stops at L3.'),
+      expect.stringContaining('A core.'),
     ]);
-    expect(rows[2]).toHaveTextContent('settled');
+    expect(rows[1]).toHaveTextContent('settled');
   });
 
   it('takes a reason and accepts the warning by its code, level and wall', async () => {

@@ -33,7 +33,10 @@ export interface WeighedWarning {
   readonly holds: number;
 }
 
-/** Warnings with those that hold rows first and settled ones last, otherwise in the order of the engine. Drift has a note of its own. */
+/**
+ * Warnings with those that hold rows first, then those that held some until they were settled, otherwise in the order of the engine: what
+ * was just accepted stays where it can be seen. Drift has a note of its own.
+ */
 export function weighWarnings(
   document: Pick<ResultDocument, 'warnings' | 'levels' | 'schedule'>,
 ): readonly WeighedWarning[] {
@@ -42,6 +45,6 @@ export function weighWarnings(
     warning,
     holds: document.schedule.filter((row) => holdsRow(warning, row, document.levels)).length,
   }));
-  const rank = ({ warning, holds }: WeighedWarning): number => (warning.settled ? 2 : holds > 0 ? 0 : 1);
+  const rank = ({ warning, holds }: WeighedWarning): number => (holds > 0 ? 0 : warning.holds ? 1 : 2);
   return [0, 1, 2].flatMap((place) => weighed.filter((one) => rank(one) === place));
 }

@@ -138,9 +138,9 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
         { keys: ['W'], does: 'next wall' },
       ]}
     >
-      <div className="grid gap-x-5 gap-y-4 min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
+      <div className="grid gap-x-5 gap-y-4 max-[1399px]:max-w-[690px] min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
         <div>
-          <div className="flex flex-wrap gap-3">
+          <div className="flex flex-wrap gap-3 max-[1399px]:pt-2">
             <Segments
               label="Case"
               options={chosen.cases.map((name) => ({ value: name, text: name }))}
@@ -187,7 +187,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
           <p className="note mt-2 max-w-[68ch] pl-2">{sayUse(document)}</p>
         </BasesTable>
       </div>
-      <div className="mt-4 grid items-start gap-5 min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
+      <div className="mt-4 grid items-start gap-5 max-[1399px]:max-w-[690px] min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
         <ShareTable
           shares={shares}
           units={units}
