@@ -7,7 +7,12 @@ import { basisWarnings } from '../engineering/warnings/basisWarnings.ts';
 import { crackedStateWarnings } from '../engineering/warnings/crackedStateWarnings.ts';
 import { driftWarnings } from '../engineering/warnings/driftWarnings.ts';
 import { flexibleWarnings } from '../engineering/warnings/flexibleWarnings.ts';
-import { baseShearWarnings, combinationWarnings, criteriaWarnings } from '../engineering/warnings/inputWarnings.ts';
+import {
+  baseShearWarnings,
+  combinationWarnings,
+  criteriaWarnings,
+  storyShearWarnings,
+} from '../engineering/warnings/inputWarnings.ts';
 import { liveWarnings } from '../engineering/warnings/liveWarnings.ts';
 import { methodWarnings } from '../engineering/warnings/methodWarnings.ts';
 import { planWarnings } from '../engineering/warnings/planWarnings.ts';
@@ -34,13 +39,14 @@ export function collectWarnings(
     ...assemblyWarnings(analysis),
     ...storyWarnings(analysis),
     ...combinationWarnings(analysis, set.combinations, set.zeroLoads),
+    ...storyShearWarnings(building),
     ...baseShearWarnings(building, analysis),
     ...liveWarnings(building, analysis),
     ...analysis.warnings,
     ...methodWarnings(building, analysis),
     ...flexibleWarnings(analysis),
     ...basisWarnings(analysis),
-    ...driftWarnings(analysis),
+    ...driftWarnings(analysis, building.settings.loads),
     ...crackedStateWarnings(analysis, walls),
     ...materialNotices(
       model.settings,

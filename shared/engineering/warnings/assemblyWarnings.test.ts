@@ -38,6 +38,12 @@ describe('flanged', () => {
     expect(plan({ A: [0, 0, 20, 0], B: [10, 0.75, 10, 20] })).toEqual([]);
   });
 
+  it('finds walls that cross between their ends', () => {
+    expect(plan({ A: [0, 0, 20, 0], B: [8, -9, 8, 14] })).toHaveLength(2);
+    expect(plan({ A: [0, 0, 20, 0], B: [20.9, -9, 20.9, 14] })).toEqual([]);
+    expect(plan({ A: [0, 0, 20, 20], B: [4, 16, 16, 4] })).toHaveLength(2);
+  });
+
   it('stands only where both walls stand', () => {
     expect(plan({ A: [0, 0, 20, 0], B: [10, 0, 10, 20] }, { B: ['L2', 'L3'] })[0]).toEqual([
       'flanged',

@@ -31,7 +31,7 @@ export function assemblyWarnings({ model }: Pick<Analysis, 'model'>): Warning[] 
         code: 'flanged',
         level: levelOf(stories, run),
         wall: wall.name,
-        message: `${wall.name} meets ${sayNames(others)} within its thickness at ${sayRun(stories, run)}, and each is computed as a rectangle by itself: the joined section is stiffer, draws more shear, and its flange adds compression or tension that no check here counts. Design the joined section, or show that the joint is cut.`,
+        message: `${wall.name} meets or crosses ${sayNames(others)} at ${sayRun(stories, run)}, and each is computed as a rectangle by itself: the joined section is stiffer, draws more shear, and its flange adds compression or tension that no check here counts. Design the joined section, or show that the joint is cut.`,
         holds: { walls: [wall.name], ...heldStories(stories, run) },
       });
     }

@@ -1,10 +1,16 @@
-import type { Warning } from '../input.ts';
+import type { LoadStandard, Warning } from '../input.ts';
 import type { Analysis } from '../stages.ts';
 
 import { heldStories, levelOf, sayRun, storyRuns } from './storyRuns.ts';
 
-/** Torsional irregularity and stability by stories with the same verdict, and stability that could not be checked. */
-export function driftWarnings({ model, drifts }: Pick<Analysis, 'model' | 'drifts'>): Warning[] {
+/**
+ * Torsional irregularity and stability by stories with the same verdict, and stability that could not be checked. Classes of torsion: 7-16
+ * has 1a above 1.2 and 1b above 1.4; 7-22 has one above 1.2, with rho 1.3 above 1.4 unless shown otherwise (engineering.md section 3).
+ */
+export function driftWarnings(
+  { model, drifts }: Pick<Analysis, 'model' | 'drifts'>,
+  loads: LoadStandard = 'asce7-22',
+): Warning[] {
   const { stories } = model;
   const largest = (pick: (drift: (typeof drifts)[number]) => number | null): number[] =>
     stories.map((_, story) =>
@@ -24,7 +30,7 @@ export function driftWarnings({ model, drifts }: Pick<Analysis, 'model' | 'drift
     warnings.push({
       code: 'torsional-irregularity',
       level: levelOf(stories, run),
-      message: `Torsion ratio up to ${ratio.toFixed(2)} at ${sayRun(stories, run)}, above 1.2${ratio > 1.4 ? ' and above 1.4: extreme; rho 1.3 unless shown otherwise' : ''} (ASCE/SEI 7 Table 12.3-1). Accidental torsion is to be amplified by Ax in the categories that ask for it.`,
+      message: `Torsion ratio up to ${ratio.toFixed(2)} at ${sayRun(stories, run)}, ${torsionClass(ratio, loads)} (ASCE/SEI ${loads === 'asce7-16' ? '7-16' : '7-22'} Table 12.3-1). Accidental torsion is to be amplified by Ax in the categories that ask for it.`,
     });
   }
   for (const run of storyRuns(stories.length, (story) => ((thetas[story] ?? 0) > 0.1 ? (thetas[story] ?? 0) : null))) {
@@ -44,4 +50,9 @@ export function driftWarnings({ model, drifts }: Pick<Analysis, 'model' | 'drift
     });
   }
   return warnings;
+}
+
+function torsionClass(ratio: number, loads: LoadStandard): string {
+  if (loads === 'asce7-16') return ratio > 1.4 ? 'above 1.4: extreme, type 1b' : 'above 1.2: type 1a';
+  return ratio > 1.4 ? 'above 1.2, and above 1.4: rho 1.3 unless shown otherwise' : 'above 1.2';
 }

@@ -80,3 +80,17 @@ export function baseShearWarnings(building: BuildingInput, analysis: Analysis): 
     ];
   });
 }
+
+/** Story shears act at each level's own point: a point typed beside one moves nothing (engineering.md section 5). */
+export function storyShearWarnings({ settings, tables }: BuildingInput): Warning[] {
+  if (settings.forcesAre !== 'story-shear') return [];
+  const pointed = tables.forces.filter(({ x, y }) => x !== null || y !== null);
+  const cases = [...new Set(pointed.map((row) => row.case))];
+  if (cases.length === 0) return [];
+  return [
+    {
+      code: 'points-not-used',
+      message: `x and y of ${cases.join(', ')} are stored but not used: forces are entered as story shears, and the level forces made of them act at each level's own point. Give the torque as mz.`,
+    },
+  ];
+}

@@ -7,7 +7,7 @@ import { building, force, gravity, level, wall } from '../testing/handBuilding.t
 import { assumptionWarnings } from './assumptionWarnings.ts';
 import { driftWarnings } from './driftWarnings.ts';
 import { flexibleWarnings } from './flexibleWarnings.ts';
-import { criteriaWarnings } from './inputWarnings.ts';
+import { criteriaWarnings, storyShearWarnings } from './inputWarnings.ts';
 import { liveWarnings } from './liveWarnings.ts';
 
 const extent = { extent_x: 60, extent_y: 40, x: 30, y: 20 };
@@ -114,7 +114,8 @@ describe('driftWarnings', () => {
     const ratios = analysis.drifts.map(({ torsionRatio }) => torsionRatio ?? 0);
     expect(Math.min(...ratios.filter((ratio) => ratio > 0))).toBeGreaterThan(1.4);
     expect(twisted).toHaveLength(1);
-    expect(twisted[0]?.message).toContain('at L2 to Roof, above 1.2 and above 1.4: extreme');
+    expect(twisted[0]?.message).toContain('at L2 to Roof, above 1.2, and above 1.4: rho 1.3 unless shown');
+    expect(driftWarnings(analysis, 'asce7-16')[0]?.message).toContain('above 1.4: extreme, type 1b (ASCE/SEI 7-16');
   });
 });
 
@@ -131,6 +132,16 @@ describe('criteria and assumptions', () => {
     expect(codes(quake, { given: ['sds', 'sdc', 'rho'], sdc: 'C' })).toEqual([]);
     expect(codes(quake, { given: ['sds', 'sdc', 'rho'], sdc: 'D' })[0]?.[0]).toBe('ordinary-class');
     expect(codes([force('Roof', 'WX', 'wind', 9, 0)], {})).toEqual([]);
+  });
+
+  it('says that points of story shears are not used', () => {
+    const codes = (forcesAre: Settings['forcesAre'], x: number | null) => {
+      const rows = ['Roof', 'L3', 'L2'].map((name) => force(name, 'WX', 'wind', 9, 0, { x }));
+      return storyShearWarnings(input(rows, { forcesAre })).map(({ code }) => code);
+    };
+    expect(codes('story-shear', 25)).toEqual(['points-not-used']);
+    expect(codes('story-shear', null)).toEqual([]);
+    expect(codes('level-force', 25)).toEqual([]);
   });
 
   it('prints what is assumed, walls on springs by name', () => {

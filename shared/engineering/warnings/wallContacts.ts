@@ -11,7 +11,7 @@ const twelveFeetIn = 144;
 export interface WallContact {
   readonly a: number;
   readonly b: number;
-  /** `meet`: an end of one within the other's thickness; `gap`: on one line with a short clear gap */
+  /** `meet`: an end of one within the other's thickness, or the two cross; `gap`: on one line with a short clear gap */
   readonly kind: 'meet' | 'gap';
   /** clear gap, in; 0 where they meet */
   readonly gapIn: number;
@@ -35,7 +35,7 @@ export function wallContacts(model: Model, story: number): WallContact[] {
           return [];
         return [{ ...pair, kind: 'gap', ...gap }];
       }
-      const at = endWithin(a.segment, b.segment) ?? endWithin(b.segment, a.segment);
+      const at = endWithin(a.segment, b.segment) ?? endWithin(b.segment, a.segment) ?? crossing(a.segment, b.segment);
       return at === null ? [] : [{ ...pair, kind: 'meet', gapIn: 0, ...at }];
     }),
   );
@@ -63,6 +63,18 @@ function fills(c: WallSegment, a: WallSegment, gap: Pick<WallContact, 'gapIn' | 
   if (!onOneLine(a, c)) return false;
   const along = Math.abs((c.centroidXIn - gap.xIn) * a.cos + (c.centroidYIn - gap.yIn) * a.sin);
   return along < gap.gapIn / 2 + c.lengthIn / 2 && gap.gapIn > 0;
+}
+
+/** Where two walls cross between their ends; null where they do not. */
+function crossing(a: WallSegment, b: WallSegment): Pick<WallContact, 'xIn' | 'yIn'> | null {
+  const sine = a.cos * b.sin - a.sin * b.cos;
+  if (Math.abs(sine) <= parallelSine) return null;
+  const dx = b.centroidXIn - a.centroidXIn;
+  const dy = b.centroidYIn - a.centroidYIn;
+  const alongA = (dx * b.sin - dy * b.cos) / sine;
+  const alongB = (dx * a.sin - dy * a.cos) / sine;
+  if (Math.abs(alongA) > a.lengthIn / 2 || Math.abs(alongB) > b.lengthIn / 2) return null;
+  return { xIn: a.centroidXIn + alongA * a.cos, yIn: a.centroidYIn + alongA * a.sin };
 }
 
 /** The end of `a` that lies within the thickness of `b`, corners included; null where none does. */
