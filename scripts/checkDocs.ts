@@ -25,15 +25,18 @@ for (const name of ['README.md', 'DEVELOPERS.md', 'shared/engineering/README.md'
   }
 }
 
-function jsonFiles(folder: string): string[] {
+/** Lists of published values; a folder of program input and output beside them says its source in its own README. */
+function publishedLists(folder: string): string[] {
   if (!existsSync(folder)) return [];
   return readdirSync(folder).flatMap((name) => {
     const path = join(folder, name);
-    return statSync(path).isDirectory() ? jsonFiles(path) : path.endsWith('.json') ? [path] : [];
+    if (!statSync(path).isDirectory()) return path.endsWith('.json') ? [path] : [];
+    if (!existsSync(join(path, 'README.md'))) faults.push(`fixtures/published/${name} has no README with its source`);
+    return [];
   });
 }
 
-for (const file of jsonFiles(join(root, 'fixtures', 'published'))) {
+for (const file of publishedLists(join(root, 'fixtures', 'published'))) {
   const content: unknown = JSON.parse(readFileSync(file, 'utf8'));
   const cases: unknown[] = Array.isArray(content) ? content : [content];
   for (const entry of cases) {
