@@ -111,12 +111,15 @@ function storyLines(question: {
   const base = applied[0] ?? noLoads;
   const more = assigned[story] ?? noLoads;
   const open = basis.along ? 0 : (basis.openTorqueKipIn?.[actionIndex * model.stories.length + story] ?? 0);
+  // of the whole action, so that a direction without force is not measured by its own rounding
+  const baseForce = Math.sqrt(base.fx * base.fx + base.fy * base.fy);
+  const baseOver = Math.sqrt(base.overX * base.overX + base.overY * base.overY);
   const lines = [
-    lineOf('force x', here.fx + more.fx, sums.x, base.fx),
-    lineOf('force y', here.fy + more.fy, sums.y, base.fy),
+    lineOf('force x', here.fx + more.fx, sums.x, baseForce),
+    lineOf('force y', here.fy + more.fy, sums.y, baseForce),
     ...(basis.along ? [] : [lineOf('torque', here.torque + more.torque + open, sums.torque, base.torque)]),
-    lineOf('overturning x', here.overX + more.overX, sums.overX, base.overX),
-    lineOf('overturning y', here.overY + more.overY, sums.overY, base.overY),
+    lineOf('overturning x', here.overX + more.overX, sums.overX, baseOver),
+    lineOf('overturning y', here.overY + more.overY, sums.overY, baseOver),
   ];
   if (effects) {
     lines.push(lineOf('vertical', more.vertical, sums.vertical, more.vertical));
