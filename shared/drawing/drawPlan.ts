@@ -108,8 +108,8 @@ export function drawPlan(input: PlanInput): Drawing {
     width: scale.width,
     height: scale.height,
     elements: [
-      ...drawSlab(input, scale),
       ...drawDisplaced(input, scale),
+      ...drawSlab(input, scale),
       ...placed.flatMap((one) => drawPlanWall(one, one.wall.name === input.chosenWall)),
       ...arrows.flatMap((arrow) => arrow.elements),
       ...centers.under,
