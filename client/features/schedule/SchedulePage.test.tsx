@@ -136,12 +136,19 @@ describe('SchedulePage', () => {
 
   it('shows what is not settled, and why, and the way to what there is to weigh', async () => {
     const answers = withRow({ state: 'not settled', notDesigned: ['out-of-plane slenderness'] });
-    fakeServer(answers);
+    // one of three is settled, and drift has a note of its own
+    const warnings = [
+      { code: 'core', message: 'A core.' },
+      { code: 'opening-solid', level: 'L2', wall: 'P2', message: 'P2 is taken as solid.' },
+      { code: 'wall-stops-below-roof', level: 'L3', wall: 'Q2', message: 'Q2 stops at L3.', settled: true },
+      { code: 'drift-not-available', message: 'Drift is not available.' },
+    ];
+    fakeServer({ ...answers, 'GET /api/buildings/b1/results': { body: { ...sample.document, warnings } } });
     renderAt(address);
     const cell = await cellOf(1, /not settled/);
     expect(cell).toHaveAttribute('aria-description', expect.stringContaining('not settled'));
     expect(screen.getByText('Not designed: out-of-plane slenderness')).toBeInTheDocument();
-    expect(screen.getByRole('link', { name: '3 points to weigh' })).toHaveAttribute(
+    expect(screen.getByRole('link', { name: '2 points to weigh' })).toHaveAttribute(
       'href',
       '/buildings/b1/distribution?level=L2&wall=P1#what-to-weigh',
     );
