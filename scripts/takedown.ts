@@ -21,12 +21,17 @@ interface ProblemLine {
 
 const usage = 'usage: takedown --in DIR [--out DIR] [--json] [--all-actions] | --section FILE.json';
 
+/** The input was refused and everything said: nothing is left to do. */
+class Refused extends Error {}
+
 function refuse(problems: readonly ProblemLine[], json: boolean): never {
+  // file descriptors may be pipes that are full for the moment: everything goes through the streams, and the process ends by itself
   for (const { file, row, column, message } of problems) {
     process.stderr.write(`${file}:${row ?? ''}:${column ?? ''}: ${message}\n`);
   }
-  if (json) writeFileSync(1, `${JSON.stringify({ problems })}\n`);
-  process.exit(2);
+  if (json) process.stdout.write(`${JSON.stringify({ problems })}\n`);
+  process.exitCode = 2;
+  throw new Refused();
 }
 
 function readFiles(folder: string): Map<string, Uint8Array> {
@@ -53,7 +58,7 @@ function runSection(file: string): void {
       true,
     );
   }
-  writeFileSync(1, `${JSON.stringify(outcome.output)}\n`);
+  process.stdout.write(`${JSON.stringify(outcome.output)}\n`);
 }
 
 async function runFolder(folder: string, out: string | undefined, json: boolean, allActions: boolean): Promise<void> {
@@ -91,7 +96,7 @@ async function runFolder(folder: string, out: string | undefined, json: boolean,
     });
     writeFileSync(join(out, 'schedule.xlsx'), workbook);
   }
-  if (json || out === undefined) writeFileSync(1, text);
+  if (json || out === undefined) process.stdout.write(text);
 }
 
 /** One array a line, so that no single string has to hold a large building. */
@@ -129,9 +134,13 @@ function readArguments() {
 }
 
 const values = readArguments();
-if (values.section !== undefined) runSection(values.section);
-else if (values.in !== undefined) await runFolder(values.in, values.out, values.json, values['all-actions']);
-else {
-  process.stderr.write(`${usage}\n`);
-  process.exit(1);
+try {
+  if (values.section !== undefined) runSection(values.section);
+  else if (values.in !== undefined) await runFolder(values.in, values.out, values.json, values['all-actions']);
+  else {
+    process.stderr.write(`${usage}\n`);
+    process.exitCode = 1;
+  }
+} catch (error) {
+  if (!(error instanceof Refused)) throw error;
 }
