@@ -52,7 +52,9 @@ async function startTests(copy) {
   const failureOf = async (specifications) => {
     const { testModules } = await vitest.runTestSpecifications(specifications);
     if (testModules.length === 0) return 'no test ran';
-    for (const module of testModules) {
+    // the report holds every module ever run: only those of this run speak
+    const asked = new Set(specifications.map(({ moduleId }) => moduleId));
+    for (const module of testModules.filter(({ moduleId }) => asked.has(moduleId))) {
       const place = module.moduleId.slice(copy.length + 1);
       if (module.errors().length > 0) return `${place}: ${module.errors()[0].message}`;
       for (const test of module.children.allTests('failed')) return `${place}: ${test.fullName}`;
