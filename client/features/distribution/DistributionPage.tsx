@@ -21,6 +21,7 @@ import {
 import { ResultGate } from '../../components/drawing/ResultGate.tsx';
 import { Stack } from '../../components/drawing/Stack.tsx';
 import { useWallKey } from '../../components/drawing/useWallKey.ts';
+import { useWidth } from '../../components/drawing/useWidth.ts';
 import { Segments } from '../../components/ui/Segments.tsx';
 import { StateNote } from '../../components/ui/StateNote.tsx';
 import { weighWarnings } from '../../components/warnings/heldRows.ts';
@@ -35,7 +36,8 @@ import { ShareTable } from './ShareTable.tsx';
 import { storyBalances } from './storyBalances.ts';
 import { storyShares, type WallShare } from './storyShares.ts';
 
-const planWidth = 690;
+/** px; a narrower page scrolls the plan sideways rather than shrink its text */
+const planWidth = { least: 480, most: 690 };
 
 /** What every wall takes of each story, and that nothing was lost. */
 export function DistributionPage(): ReactElement {
@@ -74,6 +76,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
   const { units } = document;
   const accidental = useBuilding(id).data?.accidental ?? 0;
   const forces = useTable(id, 'forces').data?.rows;
+  const [planBox, drawnWidth] = useWidth(planWidth.least, planWidth.most);
   const comparison = useComparison(id, document);
   const seismic = forces?.find((row) => row.case === chosen.case)?.kind === 'seismic';
   const massName = seismic ? 'center of mass' : 'point of the force';
@@ -106,8 +109,8 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
         { keys: ['W'], does: 'next wall' },
       ]}
     >
-      <div className="grid gap-x-5 gap-y-4 min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
-        <div>
+      <div className="grid gap-x-5 gap-y-4 min-[1400px]:grid-cols-[690px_minmax(0,1fr)] print:grid-cols-[690px_minmax(0,1fr)]">
+        <div ref={planBox} className="min-w-0 max-[639px]:overflow-x-auto">
           <div className="flex flex-wrap gap-3">
             <Segments
               label="Case"
@@ -127,7 +130,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
           <Plan
             input={{
               units,
-              width: planWidth,
+              width: drawnWidth,
               extent: level.extent,
               walls: shares.walls.map((one) => ({
                 ...one.geometry,
@@ -162,7 +165,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
           onChooseWall={chooseWall}
         />
       </div>
-      <div className="mt-4 grid gap-5 min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
+      <div className="mt-4 grid gap-5 min-[1400px]:grid-cols-[690px_minmax(0,1fr)] print:grid-cols-[690px_minmax(0,1fr)]">
         {balances.length > 0 ? (
           <BalanceTable balances={balances} title={`Balance, ${level.level}, ${chosen.case}`} units={units}>
             <RecomputeLine comparison={comparison} />
