@@ -46,7 +46,7 @@ export function BuildingLayout() {
   }
   const { data } = building;
   return (
-    <div className="gw-frame">
+    <div className="gw-frame" data-units={data?.units}>
       <Strip>
         <Link className="gw-cell" to={paths.inputs(id, 'settings')}>
           <b>{data === undefined ? 'Building' : `Building ${data.number}`}</b>

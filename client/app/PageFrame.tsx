@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 
 import { Foot, type KeyHint } from './Foot.tsx';
+import { useTitleBlock } from './useTitleBlock.ts';
 
 export interface PageFrameProps {
   readonly title: string;
@@ -31,6 +32,7 @@ export function PageFrame({
   computes = true,
   children,
 }: PageFrameProps) {
+  useTitleBlock(title);
   return (
     <>
       <aside className="contents" aria-label="Stories">

@@ -21,6 +21,9 @@ async function invalidateBuilding(client: QueryClient, id: string): Promise<void
   ]);
 }
 
+/** Edits of a building go one after the other, in the order they were made: an undo waits for the edit it shall undo. */
+const inOrder = (id: string): { id: string } => ({ id: `building-${id}` });
+
 export function useSignIn(): UseMutationResult<Session, ApiError, SignIn> {
   const client = useQueryClient();
   return useMutation<Session, ApiError, SignIn>({
@@ -60,6 +63,7 @@ export function usePatchBuilding(id: string): UseMutationResult<BuildingResource
   const client = useQueryClient();
   return useMutation<BuildingResource, ApiError, BuildingPatch>({
     mutationFn: (body) => api<BuildingResource>('PATCH', routes.building(id), { body }),
+    scope: inOrder(id),
     onSuccess: (building) => {
       client.setQueryData(keys.settings(id), building);
     },
@@ -76,8 +80,7 @@ export function usePatchTable<T extends EditableTable>(
   const key = keys.table(id, table);
   return useMutation<TablePatchAnswer<T>, ApiError, Partial<TablePatch>, { before: TableResource<T> | undefined }>({
     mutationFn: (body) => api<TablePatchAnswer<T>>('PATCH', routes.table(id, table), { body }),
-    // one after the other, in the order they were typed
-    scope: { id: `table-${id}` },
+    scope: inOrder(id),
     onMutate: async (patch) => {
       await client.cancelQueries({ queryKey: key });
       const before = client.getQueryData<TableResource<T>>(key);
@@ -136,7 +139,7 @@ export function usePatchSchedule(id: string): UseMutationResult<SchedulePatchAns
   const client = useQueryClient();
   return useMutation<SchedulePatchAnswer, ApiError, ScheduleEdit>({
     mutationFn: ({ rowId, patch }) => api<SchedulePatchAnswer>('PATCH', routes.scheduleRow(id, rowId), { body: patch }),
-    scope: { id: `schedule-${id}` },
+    scope: inOrder(id),
     onSettled: () => invalidateBuilding(client, id),
   });
 }
@@ -156,6 +159,7 @@ export function useUndo(id: string): UseMutationResult<unknown, ApiError, unknow
   const client = useQueryClient();
   return useMutation<unknown, ApiError, unknown>({
     mutationFn: () => api<unknown>('POST', routes.undo(id), { body: {} }),
+    scope: inOrder(id),
     onSettled: () => invalidateBuilding(client, id),
   });
 }

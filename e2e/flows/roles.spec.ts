@@ -51,3 +51,17 @@ test('an unknown building says so and shows a way', async ({ page }) => {
   await page.goto('/buildings/01a00000-0000-7000-8000-000000000000/inputs');
   await expect(page.getByRole('link', { name: /buildings/i }).first()).toBeVisible();
 });
+
+test('a story that comes to rest does not call the reader back from the next page', async ({ page }) => {
+  await signInByApi(page.request, 'engineer');
+  const id = await demoBuildingId(page.request);
+  await page.route(/SchedulePage/, async (route) => {
+    await new Promise((fulfill) => setTimeout(fulfill, 700));
+    await route.continue();
+  });
+  await page.goto(`/buildings/${id}/inputs`);
+  await page.getByRole('grid', { name: 'Levels' }).getByRole('gridcell').nth(1).click();
+  await page.getByRole('navigation', { name: 'Building' }).getByRole('link', { name: 'Schedule' }).click();
+  await expect(page.getByRole('grid', { name: 'Wall schedule' })).toBeVisible();
+  await expect(page).toHaveURL(/schedule/);
+});

@@ -9,7 +9,7 @@ import { mutationList } from './mutationList.mjs';
 /**
  * Can the tests fail? Applies each change of the list to a copy of the tree in a temporary folder, runs the engine's tests there and
  * prints `killed` with the first test that failed, or `SURVIVED`. Exit 1 where one survived. The tree itself is never touched.
- *   node scripts/mutations/mutate.mjs [--copies 2] [--only TEXT] [--from N] [--json FILE]
+ *   node scripts/mutations/mutate.mjs [--copies 2] [--only TEXT|TEXT] [--from N] [--json FILE]
  * Quick test files run first; the whole set runs only where those pass.
  */
 const root = resolve(import.meta.dirname, '../..');
@@ -52,7 +52,9 @@ async function startTests(copy) {
   const failureOf = async (specifications) => {
     const { testModules } = await vitest.runTestSpecifications(specifications);
     if (testModules.length === 0) return 'no test ran';
-    for (const module of testModules) {
+    // the report holds every module ever run: only those of this run speak
+    const asked = new Set(specifications.map(({ moduleId }) => moduleId));
+    for (const module of testModules.filter(({ moduleId }) => asked.has(moduleId))) {
       const place = module.moduleId.slice(copy.length + 1);
       if (module.errors().length > 0) return `${place}: ${module.errors()[0].message}`;
       for (const test of module.children.allTests('failed')) return `${place}: ${test.fullName}`;
@@ -91,7 +93,8 @@ async function checkList(list) {
 
 const only = argument('--only');
 const list = mutationList.filter(
-  ([name], n) => (only === null || name.includes(only)) && n >= Number(argument('--from') ?? 0),
+  ([name], n) =>
+    (only === null || only.split('|').some((part) => name.includes(part))) && n >= Number(argument('--from') ?? 0),
 );
 await checkList(list);
 const queue = [...list];

@@ -36,6 +36,7 @@ const balance = 'engineering/balance/balanceLines.ts';
 const units = 'engineering/units.ts';
 const defaults = 'combination-text/defaultCombinations.ts';
 const linear = 'combination-text/linearFactors.ts';
+const mass = 'engineering/schedule/rowMass.ts';
 
 export const mutationList = [
   // section strength
@@ -356,4 +357,16 @@ export const mutationList = [
     'newtonsPerPound / (millimetersPerInch * millimetersPerInch)',
     'newtonsPerPound / (25.4 * 25)',
   ],
+  // quantities
+  ['mass: end bars of one end', mass, '2 * bars.ends.count', '1 * bars.ends.count'],
+  ['mass: horizontal hooks of 6 db', mass, '24 * horizontal.bar.diameterIn', '12 * horizontal.bar.diameterIn'],
+  [
+    'mass: one curtain of the web',
+    mass,
+    'webCount(bars, lengthIn) * bars.curtains * bars.web',
+    'webCount(bars, lengthIn) * bars.web',
+  ],
+  ['mass: ties of one end', mass, 'const sets = 2 * rowsOf', 'const sets = rowsOf'],
+  ['mass: no laps', mass, 'heightsIn.length * (lapIn ?? 0)', '0 * (lapIn ?? 0)'],
+  ['stock bars of 40 ft', limits, 'stockIn: 720', 'stockIn: 480'],
 ];

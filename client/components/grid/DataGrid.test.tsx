@@ -301,4 +301,22 @@ describe('DataGrid', () => {
     await user.keyboard('8');
     expect(screen.getByRole('status')).toHaveTextContent('height reads as 8');
   });
+
+  it('puts every row of a long grid on paper, and only what is in view on the screen', () => {
+    const many = Array.from({ length: 300 }, (_, index) => ({
+      id: `r${index}`,
+      name: `L${index}`,
+      height: 10,
+      kind: 'rigid',
+    }));
+    render(
+      <DataGrid name="Levels" columns={columns} rows={many} rowId={rowId} rowHeight={32} onCommit={() => undefined} />,
+    );
+    const drawn = () => screen.getAllByRole('row').length - 1;
+    expect(drawn()).toBeLessThan(300);
+    fireEvent(window, new Event('beforeprint'));
+    expect(drawn()).toBe(300);
+    fireEvent(window, new Event('afterprint'));
+    expect(drawn()).toBeLessThan(300);
+  });
 });

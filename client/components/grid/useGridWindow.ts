@@ -9,6 +9,7 @@ import {
 import { useEffect, useLayoutEffect, useReducer, useState, type RefObject } from 'react';
 
 import type { GridLine } from './gridLines.ts';
+import { usePrinting } from './usePrinting.ts';
 
 /** Below this many lines all of them are in the page. */
 export const windowFrom = 200;
@@ -46,7 +47,8 @@ const everything: GridWindow = {
 /** Draws only the lines in view once a grid is long; space stands for the lines that are left out. */
 export function useGridWindow({ lines, rowHeight, scroller, keptLine }: GridWindowOptions): GridWindow {
   const [, redraw] = useReducer((count: number) => count + 1, 0);
-  const active = lines.length > windowFrom;
+  const printing = usePrinting();
+  const active = lines.length > windowFrom && !printing;
   const options = {
     count: active ? lines.length : 0,
     enabled: active,

@@ -23,6 +23,8 @@ export function NewBuildingDialog({ onClose, onCreated }: NewBuildingDialogProps
   const [units, setUnits] = useState<'us' | 'si'>('us');
   const [blank, setBlank] = useState(false);
   const create = useCreateBuilding();
+  /** a second click of a double click comes before the page has drawn the first */
+  const sending = useRef(false);
   const titleId = useId();
   const problemId = useId();
 
@@ -35,12 +37,19 @@ export function NewBuildingDialog({ onClose, onCreated }: NewBuildingDialogProps
 
   const submit = (event: SubmitEvent<HTMLFormElement>) => {
     event.preventDefault();
+    if (sending.current) return;
     if (name.trim() === '') {
       setBlank(true);
       return;
     }
     const body = { name: name.trim(), units, ...(number.trim() === '' ? {} : { number: number.trim() }) };
-    create.mutate(body, { onSuccess: (building) => onCreated(building.id) });
+    sending.current = true;
+    create.mutate(body, {
+      onSuccess: (building) => onCreated(building.id),
+      onSettled: () => {
+        sending.current = false;
+      },
+    });
   };
   const problem = blank
     ? 'Name is blank, expected the name of the building.'

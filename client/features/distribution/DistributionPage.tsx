@@ -18,6 +18,7 @@ import {
 } from '../../components/drawing/resultChoice.ts';
 import { ResultGate } from '../../components/drawing/ResultGate.tsx';
 import { useWallKey } from '../../components/drawing/useWallKey.ts';
+import { useWidth } from '../../components/drawing/useWidth.ts';
 import { Segments } from '../../components/ui/Segments.tsx';
 import { StateNote } from '../../components/ui/StateNote.tsx';
 import { weighWarnings } from '../../components/warnings/heldRows.ts';
@@ -41,6 +42,9 @@ import { StoryPlan } from './StoryPlan.tsx';
 import { storyShares, type WallShare } from './storyShares.ts';
 import { WallBasesSection } from './WallBasesSection.tsx';
 import { wallUnderBases } from './wallUnderBases.ts';
+
+/** px; a narrower page scrolls the plan sideways rather than shrink its text */
+const planWidth = { least: 480, most: 690 };
 
 /** What every wall takes of each story, and that nothing was lost. */
 export function DistributionPage(): ReactElement {
@@ -82,6 +86,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
   const canEdit = useCanEdit();
   const accidental = building?.accidental ?? 0;
   const forces = useTable(id, 'forces').data?.rows;
+  const [planBox, drawnWidth] = useWidth(planWidth.least, planWidth.most);
   const comparison = useComparison(id, document);
   const seismic = forces?.find((row) => row.case === chosen.case)?.kind === 'seismic';
   const massName = seismic ? 'center of mass' : 'point of the force';
@@ -138,8 +143,8 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
         { keys: ['W'], does: 'next wall' },
       ]}
     >
-      <div className="grid gap-x-5 gap-y-4 max-[1399px]:max-w-[690px] min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
-        <div>
+      <div className="grid gap-x-5 gap-y-4 max-[1399px]:max-w-[690px] min-[1400px]:grid-cols-[690px_minmax(0,1fr)] print:grid-cols-[690px_minmax(0,1fr)]">
+        <div ref={planBox} className="min-w-0 max-[639px]:overflow-x-auto">
           <div className="flex flex-wrap gap-3 max-[1399px]:pt-2">
             <Segments
               label="Case"
@@ -166,6 +171,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
           </div>
           <StoryPlan
             document={document}
+            width={drawnWidth}
             chosen={{ ...chosen, variant: choice.variant }}
             shares={shares}
             drift={drifts.find((one) => one.level === level.level)}
@@ -187,7 +193,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
           <p className="note mt-2 max-w-[68ch] pl-2">{sayUse(document)}</p>
         </BasesTable>
       </div>
-      <div className="mt-4 grid items-start gap-5 max-[1399px]:max-w-[690px] min-[1400px]:grid-cols-[690px_minmax(0,1fr)]">
+      <div className="mt-4 grid items-start gap-5 max-[1399px]:max-w-[690px] min-[1400px]:grid-cols-[690px_minmax(0,1fr)] print:grid-cols-[690px_minmax(0,1fr)]">
         <ShareTable
           shares={shares}
           units={units}

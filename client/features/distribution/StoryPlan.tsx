@@ -14,10 +14,10 @@ import type { ResultChoice } from '../../components/drawing/resultChoice.ts';
 import type { LevelDrift } from './levelDrifts.ts';
 import type { StoryShares } from './storyShares.ts';
 
-const planWidth = 690;
-
 export interface StoryPlanProps {
   document: ResultDocument;
+  /** px, as wide as the page has room */
+  width: number;
   chosen: ResultChoice;
   shares: StoryShares;
   drift: LevelDrift | undefined;
@@ -28,7 +28,7 @@ export interface StoryPlanProps {
 
 /** The plan of the story with what each wall takes, and the slab as the case moves it. */
 export function StoryPlan(props: StoryPlanProps): ReactElement {
-  const { document, chosen, shares, drift, massName, wall, onChooseWall } = props;
+  const { document, width, chosen, shares, drift, massName, wall, onChooseWall } = props;
   const { units } = document;
   const { level } = chosen;
   const force = unitLabels.force[units];
@@ -38,7 +38,7 @@ export function StoryPlan(props: StoryPlanProps): ReactElement {
   );
   const input: PlanInput = {
     units,
-    width: planWidth,
+    width,
     extent: level.extent,
     walls: shares.walls.map((one) => ({
       ...one.geometry,

@@ -1,5 +1,5 @@
 import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
-import { Navigate, useNavigate, useParams, useSearchParams } from 'react-router-dom';
+import { Navigate, useNavigate, useParams, useSearchParams, useNavigation } from 'react-router-dom';
 
 import { editableTables, type EditableTable } from '#shared/contracts/tableColumns';
 import { templateCsv } from '#shared/csv/writeCsv';
@@ -79,6 +79,11 @@ export function InputsPage() {
 
   const resting = useRef<ReturnType<typeof setTimeout> | undefined>(undefined);
   useEffect(() => () => clearTimeout(resting.current), []);
+  // a story that comes to rest while another page is being fetched must not call the reader back
+  const leaving = useNavigation().state !== 'idle';
+  useEffect(() => {
+    if (leaving) clearTimeout(resting.current);
+  }, [leaving]);
   const onFocusRow = useCallback(
     (row: InputRow) => {
       clearTimeout(resting.current);

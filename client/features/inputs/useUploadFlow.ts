@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 
 import type { ApiProblem } from '#shared/contracts/errors';
 import type { EditableTable } from '#shared/contracts/tableColumns';
@@ -48,6 +48,20 @@ export interface UploadFlow {
   readonly next: () => void;
 }
 
+const largestFile = 8 * 1024 * 1024;
+
+/** The bytes of a file, or why there are none to look at. */
+async function readBytes(file: File): Promise<Uint8Array | string> {
+  if (file.size > largestFile) {
+    return `${file.name} has ${(file.size / 1024 / 1024).toFixed(1)} MB, expected at most 8 MB. Upload the table alone, as CSV.`;
+  }
+  try {
+    return new Uint8Array(await file.arrayBuffer());
+  } catch {
+    return `${file.name} can not be read any more; it was moved or changed since it was chosen. Choose it again.`;
+  }
+}
+
 /** A file from choice to rows: read on both sides, tried without storing, then taken or left. */
 export function useUploadFlow(
   buildingId: string,
@@ -61,11 +75,17 @@ export function useUploadFlow(
   const [choices, setChoices] = useState<ColumnChoices>({});
   const [samples, setSamples] = useState<readonly string[]>([]);
   const [rowCount, setRowCount] = useState(0);
+  /** a second click of a double click comes before the page has drawn the first */
+  const taking = useRef(false);
 
   const check = async (file: File, table: EditableTable, wanted: ColumnChoices) => {
     setState({ step: 'checking', file, table });
     setChoices(wanted);
-    const bytes = new Uint8Array(await file.arrayBuffer());
+    const bytes = await readBytes(file);
+    if (typeof bytes === 'string') {
+      setState({ step: 'refused', file, table, problems: [], message: bytes });
+      return;
+    }
     const reading = readTable(table, bytes, file.name, units, wanted);
     setSamples(columnSamples(bytes, reading.delimiter));
     setColumns(reading.columns);
@@ -117,7 +137,8 @@ export function useUploadFlow(
       }
     },
     take: () => {
-      if (state.step !== 'ready') return;
+      if (state.step !== 'ready' || taking.current) return;
+      taking.current = true;
       const { file, table } = state;
       const matched = Object.keys(choices).length === 0 ? {} : { columns: choices };
       upload.mutate(
@@ -126,6 +147,9 @@ export function useUploadFlow(
           onSuccess: (answer) => {
             setState({ step: 'taken', file, answer });
             onTaken(table);
+          },
+          onSettled: () => {
+            taking.current = false;
           },
           onError: (error) =>
             setState({

@@ -70,7 +70,7 @@ export function Leaders({ host, rows, wall, chosenRowId, down }: LeadersProps): 
   }, [host, rows, wall, chosenRowId, down]);
   return (
     <svg
-      className="pointer-events-none absolute top-0 -left-[24px] overflow-visible"
+      className="gw-leaders pointer-events-none absolute top-0 -left-[24px] overflow-visible"
       width={24}
       height={1}
       aria-hidden="true"

@@ -34,7 +34,7 @@ export function ScheduleToolbar({
   const column = columnId !== null && isEditedColumn(columnId) ? columnId : null;
   const releasable = row !== null && column !== null && row.overwritten.includes(editedColumns[column]);
   return (
-    <div className="flex min-h-[32px] flex-wrap items-center gap-x-3 gap-y-1 text-note text-graphite">
+    <div className="gw-no-print flex min-h-[32px] flex-wrap items-center gap-x-3 gap-y-1 text-note text-graphite">
       {canEdit ? (
         <>
           <Button

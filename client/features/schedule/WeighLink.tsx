@@ -20,7 +20,7 @@ export function WeighLink({ buildingId, document }: WeighLinkProps): ReactElemen
   if (count === 0) return null;
   return (
     <Link
-      className="whitespace-nowrap text-ink underline decoration-line underline-offset-[3px] hover:decoration-ink"
+      className="inline-flex min-h-[24px] items-center whitespace-nowrap text-ink underline decoration-line underline-offset-[3px] hover:decoration-ink"
       to={`${paths.distribution(buildingId)}${carriedSearch(search)}#${warningsAnchor}`}
     >
       {count === 1 ? '1 point to weigh' : `${count} points to weigh`}

@@ -1,4 +1,4 @@
-import { useId, useState, type SubmitEvent } from 'react';
+import { useId, useRef, useState, type SubmitEvent } from 'react';
 import { useNavigate, useSearchParams } from 'react-router-dom';
 
 import { sentenceOf } from '../../app/errorSentences.ts';
@@ -20,6 +20,8 @@ export function SignInPage() {
   const [password, setPassword] = useState('');
   const [missing, setMissing] = useState<string | null>(null);
   const signIn = useSignIn();
+  /** a second click of a double click comes before the page has drawn the first */
+  const sending = useRef(false);
   const navigate = useNavigate();
   const [parameters] = useSearchParams();
   const problemId = useId();
@@ -28,6 +30,7 @@ export function SignInPage() {
 
   const submit = (event: SubmitEvent<HTMLFormElement>) => {
     event.preventDefault();
+    if (sending.current) return;
     if (email.trim() === '' || password === '') {
       setMissing(
         email.trim() === '' ? 'Email is blank; enter the address of your account.' : 'Password is blank; enter it.',
@@ -35,9 +38,15 @@ export function SignInPage() {
       return;
     }
     setMissing(null);
+    sending.current = true;
     signIn.mutate(
       { email: email.trim(), password },
-      { onSuccess: () => void navigate(wayBack(parameters.get('to')), { replace: true }) },
+      {
+        onSuccess: () => void navigate(wayBack(parameters.get('to')), { replace: true }),
+        onSettled: () => {
+          sending.current = false;
+        },
+      },
     );
   };
 

@@ -187,7 +187,7 @@ function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactE
         { keys: ['W'], does: 'next wall' },
       ]}
     >
-      <div className="grid gap-x-5 gap-y-4 min-[1400px]:grid-cols-[704px_minmax(0,1fr)]">
+      <div className="grid gap-x-5 gap-y-4 min-[1400px]:grid-cols-[704px_minmax(0,1fr)] print:grid-cols-[704px_minmax(0,1fr)]">
         <DownTheHeight
           diagrams={heightDiagrams(document, down, wall, chosen, hovered ?? chosen.level.level)}
           chosen={chosen.level.level}

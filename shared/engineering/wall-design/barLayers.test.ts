@@ -27,6 +27,8 @@ describe('bars of a row as layers', () => {
     expect(layers[4]?.positionIn).toBeCloseTo(21 + 78 / 7, 12);
     expect(layers[0]).toEqual({ positionIn: 3, areaIn2: 2, compression: true });
     expect(layers.reduce((sum, layer) => sum + layer.areaIn2, 0)).toBeCloseTo(16 + 6 * 0.62, 12);
+    // both ends alike: the far columns at 99, 105, 111 and 117 in
+    expect(layers.slice(10).map(({ positionIn }) => positionIn)).toEqual([99, 105, 111, 117]);
   });
   it('a run that is a whole number of spaces takes no extra bar: 114 in at 9.5 in', () => {
     expect(webPlaces({ ...plain, webSpacingIn: 9.5 }, 120)).toHaveLength(13);

@@ -1,8 +1,11 @@
 import { describe, expect, it } from 'vitest';
 
+import { aci31819 } from '../codes/aci31819.ts';
+
 import { findBar } from './bars.ts';
 import { acrossFit, barFit, neededClear } from './barFit.ts';
 import { detailLimits } from './detailLimits.ts';
+import { hookLength } from './developmentLength.ts';
 import { leastTie, tieLegsAcross, tieSpacingLimit } from './endTies.ts';
 import { designContext } from './designContext.ts';
 import { lapCell } from './rowLaps.ts';
@@ -38,6 +41,13 @@ describe('round lengths', () => {
       return lapCell(bars, horizontal, 5000, context).splice;
     };
     expect([32, 36, 43, 57].map(lap)).toEqual(['lap', 'lap', 'coupler', 'coupler']);
+  });
+});
+
+describe('least hook, 25.4.3.1', () => {
+  it('8 bar diameters where the formula gives less: 30,000 x 1.25/(55 x 100) = 6.8 in of a 1 in bar; 6 in of a thin one', () => {
+    expect(hookLength(findBar('us', 8), 30, 10000, 1, aci31819, detailLimits.us)).toBe(8);
+    expect(hookLength(findBar('us', 4), 30, 10000, 1, aci31819, detailLimits.us)).toBe(6);
   });
 });
 

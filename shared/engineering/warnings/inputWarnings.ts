@@ -48,7 +48,7 @@ export function combinationWarnings(
   if (zeroLoads.length > 0) {
     warnings.push({
       code: 'loads-read-zero',
-      message: `${zeroLoads.join(', ')} in the combinations count as 0: no table brings them in.`,
+      message: `${zeroLoads.join(', ')} in the combinations ${zeroLoads.length === 1 ? 'counts' : 'count'} as 0: no table brings ${zeroLoads.length === 1 ? 'it' : 'them'} in.`,
     });
   }
   return warnings;
