@@ -142,6 +142,9 @@ function dimensionBelow(input: PlanInput, mass: PlanPoint, rigidity: PlanPoint, 
   const [left, right] = rigidityLeft ? [rigidity.x, mass.x] : [mass.x, rigidity.x];
   const [leftName, rightName] = rigidityLeft ? [rigidityName, input.massName] : [input.massName, rigidityName];
   const unit = input.units === 'us' ? 'ft' : 'm';
+  const number = `${formatPlanLength(distance, input.units)} ${unit}`;
+  // wider than its dimension, it would be struck through by the lines that come down to it
+  const numberY = textWidth(number, 12, 500) + 6 > right - left ? y + 20 : y - 6;
   return {
     lines: [
       dim(mass.x, mass.y + 12, mass.x, y + 5),
@@ -151,7 +154,7 @@ function dimensionBelow(input: PlanInput, mass: PlanPoint, rigidity: PlanPoint, 
       tick(right, y),
     ],
     texts: [
-      strong(note(`${formatPlanLength(distance, input.units)} ${unit}`, (left + right) / 2, y - 6, 'middle')),
+      strong(note(number, (left + right) / 2, numberY, 'middle')),
       note(leftName, left - 10, y + 4, 'end'),
       note(rightName, right + 10, y + 4, 'start'),
     ],

@@ -49,6 +49,7 @@ export function BalanceTable({ balances, residuals, lost, title, units, children
   const lines = balances.flatMap((balance) =>
     balance.lines.map((one) => ({
       ...one,
+      closed: balance.residual <= closedResidual,
       name: one.line === 'vertical' ? `Vertical, ${balance.case}` : names[one.line],
     })),
   );
@@ -70,7 +71,7 @@ export function BalanceTable({ balances, residuals, lost, title, units, children
           </tr>
         </thead>
         <tbody>
-          {lines.map(({ name, line, applied, resisted }) => {
+          {lines.map(({ name, line, applied, resisted, closed }) => {
             const isMoment = line.startsWith('torque') || line.startsWith('overturning');
             const print = isMoment ? formatMoment : formatForce;
             return (
@@ -79,8 +80,8 @@ export function BalanceTable({ balances, residuals, lost, title, units, children
                   {name}
                 </th>
                 <td className="num">{print(applied)}</td>
-                <td className="num">{informs(line) ? 'informs' : print(resisted)}</td>
-                <td className="num">{informs(line) ? '–' : sayResidual(resisted - applied)}</td>
+                <td className="num">{informs(line) ? '–' : print(resisted)}</td>
+                <td className="num">{informs(line) ? '–' : closed ? print(0) : sayResidual(resisted - applied)}</td>
                 <td className="pl-3 text-graphite">{unitLabels[isMoment ? 'moment' : 'force'][units]}</td>
               </tr>
             );
@@ -102,6 +103,7 @@ export function BalanceTable({ balances, residuals, lost, title, units, children
       </table>
       <p className="note mt-2">
         Residual: the largest difference over the larger of the action and the sum of magnitudes; closed below 1e−9.
+        {lines.some(({ line }) => informs(line)) ? ' A line without a difference stands beside the balance.' : ''}
       </p>
       {children}
     </Section>
@@ -117,6 +119,6 @@ function sayBroken(broken: readonly BasisResidual[], lost: ShareSum | null, unit
   return `Balance broken: ${sentences.join('; ')}. A load is lost on the way; do not use the figures of this case.`;
 }
 
-/** A difference that is rounding reads in powers of ten, not as a row of zeros. */
+/** A residual reads in powers of ten, not as a row of zeros. */
 export const sayResidual = (value: number): string =>
   value === 0 ? '0.0' : value.toExponential(1).replaceAll('-', minusSign);

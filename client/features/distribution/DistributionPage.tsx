@@ -143,7 +143,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
         { keys: ['W'], does: 'next wall' },
       ]}
     >
-      <div className="grid gap-x-5 gap-y-4 max-[1399px]:max-w-[690px] min-[1400px]:grid-cols-[690px_minmax(0,1fr)] print:grid-cols-[690px_minmax(0,1fr)]">
+      <div className="grid gap-x-5 gap-y-4 min-[1400px]:grid-cols-[690px_minmax(0,1fr)] print:grid-cols-[690px_minmax(0,1fr)]">
         <div ref={planBox} className="min-w-0 max-[639px]:overflow-x-auto">
           <div className="flex flex-wrap gap-3 max-[1399px]:pt-2">
             <Segments
@@ -193,7 +193,7 @@ function Shown({ id, document, walls, chosen }: ShownProps): ReactElement {
           <p className="note mt-2 max-w-[68ch] pl-2">{sayUse(document)}</p>
         </BasesTable>
       </div>
-      <div className="mt-4 grid items-start gap-5 max-[1399px]:max-w-[690px] min-[1400px]:grid-cols-[690px_minmax(0,1fr)] print:grid-cols-[690px_minmax(0,1fr)]">
+      <div className="mt-4 grid items-start gap-5 min-[1400px]:grid-cols-[690px_minmax(0,1fr)] print:grid-cols-[690px_minmax(0,1fr)]">
         <ShareTable
           shares={shares}
           units={units}

@@ -1,4 +1,5 @@
 import type { ResultBalance, ResultDocument } from '#shared/contracts/result';
+import { basisOrder } from '#shared/drawing/basisStyles';
 import type { Basis } from '#shared/engineering/input';
 
 import { variantUnder, type ResultChoice } from '../../components/drawing/resultChoice.ts';
@@ -22,9 +23,11 @@ export interface BasisResidual {
 
 /** The residual of the case at its story under every basis, gravity cases with it. */
 export function basisResiduals(document: ResultDocument, chosen: ResultChoice): readonly BasisResidual[] {
-  return chosen.bases.map((basis) => {
-    const variant = variantUnder(document, basis, chosen.case, chosen.variant);
-    const balances = storyBalances(document, { ...chosen, basis, variant });
-    return { basis, residual: balances.reduce((worst, one) => Math.max(worst, Math.abs(one.residual)), 0) };
-  });
+  return basisOrder
+    .filter((basis) => chosen.bases.includes(basis))
+    .map((basis) => {
+      const variant = variantUnder(document, basis, chosen.case, chosen.variant);
+      const balances = storyBalances(document, { ...chosen, basis, variant });
+      return { basis, residual: balances.reduce((worst, one) => Math.max(worst, Math.abs(one.residual)), 0) };
+    });
 }

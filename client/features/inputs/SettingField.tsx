@@ -8,6 +8,12 @@ const switchChoices = [
   { value: 'no', text: 'No' },
 ];
 
+/** A list shows all of its eight usual spacings; a number stands at the right. */
+const fieldClass = (kind: Described['kind']): string => {
+  if (kind === 'list') return 'mono w-[min(288px,56vw)]!';
+  return kind === 'text' ? 'w-[220px]!' : 'w-[112px]! text-right';
+};
+
 /** One setting: its label with unit and note, and a field of its kind; a problem stands beneath. */
 export function SettingField({
   field,
@@ -34,7 +40,6 @@ export function SettingField({
       {aside === '' ? null : <small>{aside}</small>}
     </>
   );
-  const wide = field.kind === 'list' || field.kind === 'text';
   return (
     <div className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-3 border-t border-rule py-1 first:border-t-0">
       {choices === undefined ? (
@@ -49,7 +54,7 @@ export function SettingField({
       ) : choices === undefined ? (
         <input
           id={id}
-          className={`gw-input gw-input-low ${wide ? 'w-[220px]!' : 'w-[112px]! text-right'} ${field.kind === 'list' ? 'mono' : ''}`}
+          className={`gw-input gw-input-low ${fieldClass(field.kind)}`}
           value={draft}
           disabled={disabled}
           aria-invalid={problem !== null}
@@ -107,7 +112,7 @@ function SetOf({
           type="button"
           aria-pressed={chosen.includes(value)}
           disabled={disabled || (chosen.length === 1 && chosen[0] === value)}
-          onClick={() => onDraft(toggled(value).join('  '))}
+          onClick={() => onDraft(toggled(value).join(' '))}
         >
           {text}
         </button>

@@ -7,6 +7,7 @@ import { gravityCases } from '#shared/engineering/model/model';
 
 import type { GridColumn, Parsed } from '../../components/grid/gridTypes.ts';
 import { cellEditText, cellText, columnDecimals } from './cellText.ts';
+import { printedUnit } from './printedUnit.ts';
 
 export type InputRow = StoredRow;
 
@@ -109,7 +110,7 @@ export function inputColumns(table: EditableTable, context: ColumnContext): read
       context.rows.map((row) => valueOf(row, column.name)),
       context.units,
     );
-    const unit = column.quantity === undefined ? '' : unitLabels[column.quantity][context.units];
+    const unit = column.quantity === undefined ? '' : printedUnit(unitLabels[column.quantity][context.units]);
     const choices = choicesOf(table, column, context);
     const worksOut = table === 'levels' && column.name === 'elevation';
     const workedOut = (row: InputRow): number | undefined =>

@@ -12,7 +12,7 @@ export function valueAt(settings: unknown, path: string): unknown {
 /** A stored setting as the text of its field. */
 export function draftOf(value: unknown): string {
   if (value === null || value === undefined) return '';
-  if (Array.isArray(value)) return value.map(String).join('  ');
+  if (Array.isArray(value)) return value.map(String).join(' ');
   return typeof value === 'boolean' ? (value ? 'yes' : 'no') : String(value);
 }
 

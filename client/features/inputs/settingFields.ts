@@ -1,6 +1,8 @@
 import { unitLabels } from '#shared/contracts/quantities';
 import type { Quantity } from '#shared/contracts/tableColumns';
 
+import { printedUnit } from './printedUnit.ts';
+
 /** One field of building.json that is built; what is not built has no field. */
 export interface SettingField {
   /** path of the key, parts joined by points */
@@ -197,4 +199,4 @@ export const settingGroups: readonly SettingGroup[] = [
 ];
 
 export const fieldUnit = (field: SettingField, units: 'us' | 'si'): string =>
-  field.quantity === undefined ? '' : unitLabels[field.quantity][units];
+  field.quantity === undefined ? '' : printedUnit(unitLabels[field.quantity][units]);

@@ -31,14 +31,14 @@ export function GovernsTable({ title, rows, units }: GovernsTableProps): ReactEl
           <tbody>
             {rows.map(({ effect, value, action }) => (
               <tr key={effect}>
-                <th scope="row" className="align-top! font-normal">
+                <th scope="row" className="align-baseline! font-normal">
                   {effects[effect]}
                 </th>
-                <td className="num font-medium whitespace-nowrap!">
+                <td className="num align-baseline! font-medium whitespace-nowrap!">
                   {effect === 'moment' ? formatMoment(value) : formatForce(value)}{' '}
                   {unitLabels[effect === 'moment' ? 'moment' : 'force'][units]}
                 </td>
-                <td className="text-note">
+                <td className="align-baseline! text-note">
                   {action.combination}, {action.basis}
                 </td>
               </tr>

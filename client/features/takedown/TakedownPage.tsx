@@ -3,6 +3,7 @@ import { useState, type ReactElement } from 'react';
 import { unitLabels } from '#shared/contracts/quantities';
 import type { ResultDocument, ResultTransferred } from '#shared/contracts/result';
 import type { TableResource } from '#shared/contracts/tables';
+import { basisOrder } from '#shared/drawing/basisStyles';
 import { placeStackWalls } from '#shared/drawing/placeStackWalls';
 import type { WallRow } from '#shared/engineering/input';
 import { forceDecimals, formatForce, formatMoment } from '#shared/format/force';
@@ -99,6 +100,7 @@ function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactE
   const overrides = useTable(id, 'overrides').data?.rows;
   const accidental = building?.accidental ?? 0;
   const down = levelsDown(document);
+  const bases = basisOrder.filter((one) => chosen.bases.includes(one));
   const stories = wallStories(document, down, wall, chosen);
   const reactions = baseReactions(document, down, names, chosen);
   const chooseWall = (name: string): void => choose({ wall: name });
@@ -155,7 +157,7 @@ function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactE
           {chosen.bases.length > 1 ? (
             <Segments
               label="Basis"
-              options={chosen.bases.map((one) => ({ value: one, text: one }))}
+              options={bases.map((one) => ({ value: one, text: one }))}
               value={chosen.basis}
               onChoose={(basis) => choose({ basis })}
             />
@@ -236,8 +238,8 @@ function Shown({ id, document, walls, chosen, wall, names }: ShownProps): ReactE
           <CaseReactionTable
             wall={wall}
             level={foot.level}
-            rows={caseReactions(document, wall, foot.level, chosen.bases)}
-            bases={chosen.bases}
+            rows={caseReactions(document, wall, foot.level, bases)}
+            bases={bases}
             accidental={accidental}
             units={units}
           />
