@@ -69,6 +69,21 @@ it('dimensions the distance between the centers', () => {
   expect(shown).toContain('center of rigidity');
 });
 
+it('writes the distance under a dimension that is narrower than it', () => {
+  // 5 ft are 28.5 px, less than the number; 10 ft are 57 px
+  const heights = (x: number): { number: number; name: number } => {
+    const texts = drawPlan(input({ rigidity: { x, y: 30 } })).elements.filter(
+      (element): element is TextElement => element.shape === 'text',
+    );
+    const heightOf = (text: string): number => texts.find((one) => one.text === text)?.y ?? Number.NaN;
+    return { number: heightOf(x === 55 ? '5.0 ft' : '10.0 ft'), name: heightOf('center of mass') };
+  };
+  const narrow = heights(55);
+  const wide = heights(60);
+  expect(narrow.number - narrow.name).toBeCloseTo(16, 9);
+  expect(wide.number - wide.name).toBeCloseTo(-10, 9);
+});
+
 it('leads the names aside where the centers nearly meet', () => {
   const shown = words(drawPlan(input({ rigidity: { x: 51, y: 30 } })).elements);
   expect(shown).not.toContain('1.0 ft');

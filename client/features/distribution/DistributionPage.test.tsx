@@ -25,6 +25,10 @@ describe('DistributionPage', () => {
     expect(within(balance).getByRole('rowheader', { name: 'Vertical, D' }).closest('tr')).toHaveTextContent('1,018.2');
     expect(within(balance).getByRole('rowheader', { name: 'Vertical, L' }).closest('tr')).toHaveTextContent('120.0');
     expect(within(balance).queryByRole('rowheader', { name: 'Vertical, S' })).toBeNull();
+    // what closes reads to the decimals of the balance, not as the rounding of the machine
+    expect(within(balance).getByRole('rowheader', { name: 'Force y' }).closest('tr')).toHaveTextContent(
+      'Force y135.0135.00.0kip',
+    );
     expect(within(balance).getByText('closed')).toBeInTheDocument();
   });
 

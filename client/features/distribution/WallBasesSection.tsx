@@ -56,12 +56,12 @@ export function WallBasesSection(props: WallBasesSectionProps): ReactElement {
             <tr>
               <th>Level</th>
               {bases.map((basis) => (
-                <th key={basis} className="num">
+                <th key={basis} className="num first-letter:uppercase">
                   {basis}
                 </th>
               ))}
-              <th className="num">spread</th>
-              <th className="num">of the largest</th>
+              <th className="num">Spread</th>
+              <th className="num">Of the largest</th>
             </tr>
           </thead>
           <tbody>

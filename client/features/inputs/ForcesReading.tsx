@@ -64,19 +64,19 @@ export function ForcesReading({ building, levels, forces, canEdit }: ForcesReadi
             <tr>
               <th scope="col">Case</th>
               <th scope="col" className="num">
-                as forces at each level
+                As forces at each level
               </th>
               <th scope="col" className="num">
-                as story shears
+                As story shears
               </th>
               <th scope="col" className="num">
-                of the weight
+                Of the weight
               </th>
               <th scope="col" className="num">
-                load sheet
+                Load sheet
               </th>
               <th scope="col" className="num">
-                differs
+                Differs
               </th>
             </tr>
           </thead>
