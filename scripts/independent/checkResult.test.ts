@@ -135,6 +135,16 @@ describe('the independent check sees a fault', () => {
       'residual of force x, compatible',
     ],
     [
+      'a drift check on a level that is not there',
+      (document) => ({
+        ...document,
+        checks: document.checks.map((row) =>
+          row.check.startsWith('drift') ? { ...row, level: 'nowhere', ok: false } : row,
+        ),
+      }),
+      'nowhere demand',
+    ],
+    [
       'an envelope that is not the worst',
       (document) => ({
         ...document,

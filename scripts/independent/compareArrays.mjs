@@ -15,7 +15,8 @@ export class Comparison {
     const difference = Math.abs(theirs - own);
     const size = Math.max(Math.abs(theirs), Math.abs(own));
     this.largest = Math.max(this.largest, difference / Math.max(size, Math.abs(scale), 1e-300));
-    if (difference > 0.001 * size + 1e-5 * Math.abs(scale)) {
+    // turned round on purpose: a number that is not known here compares as NaN and must not pass
+    if (!(difference <= 0.001 * size + 1e-5 * Math.abs(scale))) {
       this.lines.push(`${where}: ${String(theirs)} in the result, ${String(own)} here`);
     }
   }

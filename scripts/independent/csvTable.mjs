@@ -53,7 +53,7 @@ function records(text, delimiter) {
         i += 1;
       } else if (character === '"') quoted = false;
       else field += character;
-    } else if (character === '"') quoted = true;
+    } else if (character === '"' && field === '') quoted = true;
     else if (character === delimiter) {
       out.at(-1).push(field);
       field = '';
